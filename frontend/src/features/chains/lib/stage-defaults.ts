@@ -1,0 +1,70 @@
+import type { Device, FeedbackStage, Stage, StageKind } from '../../../api/types';
+import { pairHoldingFeedback } from './resistors';
+
+export const STAGE_KINDS: readonly { readonly kind: StageKind; readonly label: string; readonly note: string }[] = [
+  { kind: 'voltage-feedback', label: 'Voltage-feedback amplifier', note: 'spends gain-bandwidth' },
+  { kind: 'current-feedback', label: 'Current-feedback amplifier', note: 'has no gain-bandwidth; Rf sets its corner' },
+  { kind: 'rc-section', label: 'RC section', note: 'passive: series and shunt parts' },
+  { kind: 'matched-block', label: 'Matched block', note: 'gain block, attenuator or filter in a 50 Ω system' },
+];
+
+export const STAGE_KIND_LABELS = Object.fromEntries(STAGE_KINDS.map(({ kind, label }) => [kind, label])) as Record<
+  StageKind,
+  string
+>;
+
+const NAMES: Readonly<Record<StageKind, string>> = {
+  'voltage-feedback': 'Gain',
+  'current-feedback': 'Driver',
+  'rc-section': 'RC section',
+  'matched-block': 'Block',
+};
+
+function amplifierStage(id: string, device: Device): FeedbackStage {
+  const name = NAMES[device.kind];
+  if (device.kind === 'current-feedback') {
+    const pair = pairHoldingFeedback(1, device.referenceFeedbackOhm, 'exact');
+    return {
+      id,
+      name,
+      kind: 'current-feedback',
+      topology: 'non-inverting',
+      deviceId: device.id,
+      wantedGain: 2,
+      ...pair,
+    };
+  }
+  // A part that is not stable at low gain starts at one where it is.
+  const stable = device.kind === 'voltage-feedback' ? (device.minimumStableGain ?? 1) : 1;
+  const wantedGain = Math.max(10, Math.ceil(stable));
+  const gainOhm = 100;
+  return {
+    id,
+    name,
+    kind: 'voltage-feedback',
+    topology: 'non-inverting',
+    deviceId: device.id,
+    wantedGain,
+    gainOhm,
+    feedbackOhm: gainOhm * (wantedGain - 1),
+  };
+}
+
+export function needsDevice(kind: StageKind): boolean {
+  return kind !== 'rc-section';
+}
+
+/** A stage to begin with. Kinds with a device need one: there is no amplifier without it. */
+export function newStage(id: string, kind: StageKind, device: Device | null): Stage | null {
+  if (kind === 'rc-section') return { id, name: NAMES[kind], kind, seriesOhm: 50, shuntF: 100e-12 };
+  if (!device || device.kind !== kind) return null;
+  return kind === 'matched-block' ? { id, name: NAMES[kind], kind, deviceId: device.id } : amplifierStage(id, device);
+}
+
+export function isFeedbackStage(stage: Stage): stage is FeedbackStage {
+  return stage.kind === 'voltage-feedback' || stage.kind === 'current-feedback';
+}
+
+export function deviceIdOf(stage: Stage): string | null {
+  return stage.kind === 'rc-section' ? null : stage.deviceId;
+}
