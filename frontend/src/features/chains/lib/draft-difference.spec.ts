@@ -15,12 +15,15 @@ describe('draftDifferences', () => {
 
   it('names stages that only one side has, and fields that differ', () => {
     const lines = draftDifferences(draft({ ...one, seriesOhm: 120 }), draft(one, two));
-    expect(lines).toEqual(['S1 Input: seriesOhm differ', 'S2 Output: only in the saved version']);
+    expect(lines).toEqual(['S1 Input: series resistor changed', 'S2 Output: only in the saved version']);
   });
 
   it('names another order and another specification', () => {
     const theirs = { ...draft(two, one), specification: { ...EMPTY_SPECIFICATION, ambientK: 300 } };
-    expect(draftDifferences(draft(one, two), theirs)).toEqual(['Specification: ambient temperature differ']);
+    expect(draftDifferences(draft(one, two), theirs)).toEqual([
+      'The order of the stages differs',
+      'Specification: ambient temperature changed',
+    ]);
     expect(draftDifferences(draft(one, two), draft(two, one))).toEqual(['The order of the stages differs']);
   });
 });

@@ -20,7 +20,7 @@ function stageDifferences(mine: Draft, theirs: Draft): string[] {
     if (!other) lines.push(`${title}: only in yours`);
     else {
       const fields = changedFields(stage, other.stage);
-      if (fields.length > 0) lines.push(`${title}: ${fields.join(', ')} differ`);
+      if (fields.length > 0) lines.push(`${title}: ${fields.join(', ')} changed`);
     }
   });
   theirs.stages.forEach((stage, index) => {
@@ -33,7 +33,7 @@ function stageDifferences(mine: Draft, theirs: Draft): string[] {
 
 function specificationDifferences(mine: Draft, theirs: Draft): string[] {
   const fields = changedFields(mine.specification, theirs.specification);
-  return fields.length === 0 ? [] : [`Specification: ${fields.join(', ')} differ`];
+  return fields.length === 0 ? [] : [`Specification: ${fields.join(', ')} changed`];
 }
 
 const FIELD_NAMES: Readonly<Record<string, string>> = {
@@ -49,6 +49,10 @@ const FIELD_NAMES: Readonly<Record<string, string>> = {
   isolationOhm: 'isolation',
   gainBasis: 'gain basis',
   ambientK: 'ambient temperature',
+  seriesOhm: 'series resistor',
+  seriesF: 'series capacitor',
+  shuntOhm: 'shunt resistor',
+  shuntF: 'shunt capacitor',
 };
 
 function changedFields(a: object, b: object): string[] {

@@ -21,8 +21,12 @@ export function gainOfResistors(
   return gainOhm ? -feedbackOhm / gainOhm : null;
 }
 
-/** How far the resistor that is held may wander to meet the ratio better, as a factor. */
-const REACH = 2;
+/**
+ * How far the resistor that is held may wander to meet the ratio better, as a factor. The feedback resistor of a
+ * current-feedback amplifier sets its bandwidth and stays close.
+ */
+const GAIN_RESISTOR_REACH = 2;
+const FEEDBACK_REACH = 1.2;
 
 interface Choice {
   readonly held: number;
@@ -37,11 +41,12 @@ interface Choice {
  */
 function choose(
   held: number,
+  reach: number,
   series: Exclude<ResistorSeries, 'exact'>,
   otherFor: (held: number) => number,
 ): Choice | null {
   let best: Choice | null = null;
-  for (const candidate of preferredValuesBetween(series, held / REACH, held * REACH)) {
+  for (const candidate of preferredValuesBetween(series, held / reach, held * reach)) {
     const wanted = otherFor(candidate);
     for (const other of preferredValuesBetween(series, wanted / 1.25, wanted * 1.25)) {
       const error = Math.abs(Math.log(other / wanted));
@@ -64,13 +69,13 @@ function isBetter(a: Choice, b: Choice): boolean {
 
 export function pairHoldingGainResistor(ratio: number, gainOhm: number, series: ResistorSeries): ResistorPair {
   if (series === 'exact') return { feedbackOhm: gainOhm * ratio, gainOhm };
-  const choice = choose(gainOhm, series, (held) => held * ratio);
+  const choice = choose(gainOhm, GAIN_RESISTOR_REACH, series, (held) => held * ratio);
   return choice ? { gainOhm: choice.held, feedbackOhm: choice.other } : { feedbackOhm: gainOhm * ratio, gainOhm };
 }
 
 /** For current feedback: Rf sets the bandwidth, so it is what stays near its value. */
 export function pairHoldingFeedback(ratio: number, feedbackOhm: number, series: ResistorSeries): ResistorPair {
   if (series === 'exact') return { feedbackOhm, gainOhm: feedbackOhm / ratio };
-  const choice = choose(feedbackOhm, series, (held) => held / ratio);
+  const choice = choose(feedbackOhm, FEEDBACK_REACH, series, (held) => held / ratio);
   return choice ? { feedbackOhm: choice.held, gainOhm: choice.other } : { feedbackOhm, gainOhm: feedbackOhm / ratio };
 }
