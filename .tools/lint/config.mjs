@@ -11,7 +11,15 @@ import { importZones } from './import-zones.mjs';
 import { localPlugin } from './local-rules.mjs';
 
 const TYPESCRIPT = ['**/*.ts', '**/*.tsx'];
-const SPECS = ['**/*.spec.ts', '**/*.spec.tsx', '**/*.test.ts', '**/*.test.tsx', '**/*.e2e-spec.ts', '**/*.spec.mjs'];
+const SPECS = [
+  '**/*.spec.ts',
+  '**/*.spec.tsx',
+  '**/*.test.ts',
+  '**/*.test.tsx',
+  '**/*.e2e-spec.ts',
+  '**/*.spec.mjs',
+  '**/*.test-support.ts',
+];
 const TEST_CODE = [...SPECS, 'backend/test/**', 'frontend/src/testing/**', 'e2e/**'];
 
 const IGNORED = [
