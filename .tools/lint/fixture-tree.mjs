@@ -43,6 +43,7 @@ const FILES = {
   'backend/src/calculator/engine/cycle-a.ts': value('a'),
   'frontend/src/app/router.ts': value('router'),
   'frontend/src/api/client.ts': value('client'),
+  'frontend/src/api/types.ts': value('types'),
   'frontend/src/api/api-error.ts': value('apiError'),
   'frontend/src/lib/units.ts': value('units'),
   'frontend/src/components/figure.ts': value('figure'),

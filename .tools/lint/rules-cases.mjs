@@ -64,6 +64,7 @@ const restricted = [
   path('components know no feature', 'frontend/src/components/bar.tsx', '../features/ledger/lanes', '../lib/units'),
   path('components fetch nothing', 'frontend/src/components/list.tsx', '../api/client', '../api/api-error'),
   path('lib stands lowest', 'frontend/src/lib/scale.ts', '../components/figure', './units'),
+  path('lib fetches nothing', 'frontend/src/lib/scale.ts', '../api/client', '../api/types'),
   path('api stands below components', 'frontend/src/api/session.ts', '../components/figure', '../lib/units'),
   path('a feature imports no other feature', 'frontend/src/features/ledger/row.tsx', '../devices/queries', './lanes'),
   path(
