@@ -1,0 +1,59 @@
+import { type ArgumentsHost, Catch, type ExceptionFilter, HttpException, Logger } from '@nestjs/common';
+import type { Response } from 'express';
+import { ForeignKeyConstraintError, UniqueConstraintError } from 'sequelize';
+import { AppError, ConflictError, NotFoundError, UnauthenticatedError, UnreadableError } from './errors';
+import { currentRequestId } from './request-context';
+
+const INTERNAL = new AppError(500, 'internal', 'Something went wrong on the server. It has been logged.');
+
+function fromUniqueConstraint(error: UniqueConstraintError): ConflictError {
+  const fieldErrors = Object.keys(error.fields ?? {}).map((column) => ({
+    path: column.replace(/_([a-z])/g, (_match, letter: string) => letter.toUpperCase()),
+    code: 'already_exists',
+    message: 'This is taken already.',
+  }));
+  return new ConflictError('already_exists', 'Something with this name or code exists already.', { fieldErrors });
+}
+
+/** Nest's own exceptions: unknown routes, and what a library raised before our code ran. */
+function fromHttpException(error: HttpException): AppError {
+  const status = error.getStatus();
+  if (status === 404) return new NotFoundError();
+  if (status === 401) return new UnauthenticatedError();
+  if (status === 400) return new UnreadableError('The request could not be read.');
+  return status < 500 ? new AppError(status, 'refused', 'The request was refused.') : INTERNAL;
+}
+
+/** What the client is told about anything that was thrown. */
+export function toAppError(error: unknown): AppError {
+  if (error instanceof AppError) return error;
+  if (error instanceof UniqueConstraintError) return fromUniqueConstraint(error);
+  if (error instanceof ForeignKeyConstraintError) {
+    return new ConflictError('in_use', 'Something else still depends on this, or what it refers to is gone.');
+  }
+  return error instanceof HttpException ? fromHttpException(error) : INTERNAL;
+}
+
+/** The one place where an error becomes an answer: `{ code, message, fieldErrors?, requestId }`. */
+@Catch()
+export class ErrorFilter implements ExceptionFilter {
+  private readonly logger = new Logger('Error');
+
+  catch(error: unknown, host: ArgumentsHost): void {
+    const response = host.switchToHttp().getResponse<Response>();
+    const answer = toAppError(error);
+    const requestId = currentRequestId() ?? String(response.getHeader('X-Request-Id') ?? '');
+    if (answer.status >= 500) {
+      this.logger.error(`request ${requestId}: ${error instanceof Error ? error.stack : String(error)}`);
+    }
+    if (response.headersSent) {
+      response.end();
+      return;
+    }
+    if (answer.details.retryAfterSeconds !== undefined) {
+      response.setHeader('Retry-After', String(answer.details.retryAfterSeconds));
+    }
+    response.setHeader('Cache-Control', 'no-store');
+    response.status(answer.status).json({ code: answer.code, message: answer.message, ...answer.details, requestId });
+  }
+}

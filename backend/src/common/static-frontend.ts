@@ -1,0 +1,30 @@
+import { existsSync } from 'node:fs';
+import path from 'node:path';
+import express, { type RequestHandler, type Response } from 'express';
+
+const HASHED_ASSET = /[\\/]assets[\\/]/;
+
+function setCaching(response: Response, file: string): void {
+  response.setHeader('Cache-Control', HASHED_ASSET.test(file) ? 'public, max-age=31536000, immutable' : 'no-cache');
+}
+
+function wantsPage(method: string, requestPath: string, acceptsHtml: boolean): boolean {
+  const isApi = requestPath === '/api' || requestPath.startsWith('/api/');
+  return (method === 'GET' || method === 'HEAD') && acceptsHtml && !isApi && path.extname(requestPath) === '';
+}
+
+/** The built frontend: its files, and its one page for every address that belongs to the router in the browser. */
+export function staticFrontend(frontendDir: string): RequestHandler[] {
+  const page = path.join(frontendDir, 'index.html');
+  const files = express.static(frontendDir, { index: false, redirect: false, setHeaders: setCaching });
+  const fallback: RequestHandler = (request, response, next) => {
+    if (!wantsPage(request.method, request.path, request.accepts('html') === 'html')) {
+      next();
+    } else if (existsSync(page)) {
+      response.sendFile(page, { headers: { 'Cache-Control': 'no-cache' }, cacheControl: false });
+    } else {
+      response.status(503).type('text').send('The screens have not been built yet: run npm run build.\n');
+    }
+  };
+  return [files, fallback];
+}
