@@ -40,6 +40,7 @@ export interface Money {
   readonly amountMicros: number | null;
   /** ISO 4217. */
   readonly currency: string;
+  /** Why there is no amount; beside an amount: a remark on it, e.g. that the first break's price stands in. */
   readonly reason?: string;
 }
 
@@ -359,4 +360,16 @@ export interface CandidatesReport {
   readonly needs: readonly StageNeed[];
   /** Cheapest that pass first; then tight, unknown, over; by cost within. */
   readonly candidates: readonly CandidateReport[];
+}
+
+/** A chain in one line, for lists. */
+export interface ChainSummary {
+  readonly verdict: Verdict;
+  readonly lead: string;
+  readonly text: string;
+  readonly worstHeadroom: Figure;
+  /** "S2 Gain"; null: no stage has a GBW. */
+  readonly worstHeadroomStage: string | null;
+  readonly gain: Figure;
+  readonly cost: Money;
 }

@@ -298,4 +298,6 @@ export interface ChainInput {
   readonly currency: string;
   /** Boards per build. */
   readonly buildQuantity: number;
+  /** Plain date (YYYY-MM-DD) on which quotes are judged lapsed. Absent: no quote is. The calculator has no clock. */
+  readonly today?: string;
 }

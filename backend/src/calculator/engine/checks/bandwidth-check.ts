@@ -1,0 +1,82 @@
+import type { Check, Verdict } from '../report';
+import { isFeedbackStage, partName } from '../report/facts';
+import type { ChainFacts, StageFacts } from '../report/facts';
+import { limitFigure } from '../report/figures';
+import { stageFigure } from '../report/stage-figures';
+import { setFrequency, targetText, valueText } from '../text/phrases';
+import { isAbove, isBelow } from '../text/deciding-digits';
+import { makeCheck, unknownCheck } from './make-check';
+
+const TITLE = 'closed-loop bandwidth';
+const LOWER_TITLE = 'lower corner';
+
+/** Passive sections are filters: a band edge outside their corners is over, and no target applies. */
+function targetFactor(facts: ChainFacts, stage: StageFacts): number {
+  return stage.stage.kind === 'rc-section' ? 1 : facts.policy.bandwidthTarget;
+}
+
+/** The exact, loaded −3 dB corner against the top of the band. */
+export function bandwidthCheck(facts: ChainFacts, stage: StageFacts): Check | null {
+  const corner = stage.analysis.cornerUpperHz;
+  const actual = stageFigure(facts, stage, 'cornerUpper');
+  if (corner.value === null) {
+    if (!isCornerUnknown(stage)) return null;
+    return unknownCheck('bandwidth', TITLE, `The corner cannot be told: ${corner.reason}.`, actual);
+  }
+  const { highHz } = facts.input.specification.band;
+  const factor = targetFactor(facts, stage);
+  const verdict: Verdict = isBelow(corner.value, highHz)
+    ? 'over'
+    : isBelow(corner.value, highHz * factor)
+      ? 'tight'
+      : 'clear';
+  const limit = limitFigure(verdict === 'over' ? highHz : highHz * factor, 'Hz');
+  return makeCheck('bandwidth', TITLE, verdict, upperSentence(facts, stage, corner.value, verdict), { actual, limit });
+}
+
+/** A corner beyond the search range is no limit; a corner that cannot be computed is unknown. */
+function isCornerUnknown(stage: StageFacts): boolean {
+  return stage.analysis.gainOperatingDb.value === null;
+}
+
+function upperSentence(facts: ChainFacts, stage: StageFacts, corner: number, verdict: Verdict): string {
+  const { highHz, operatingHz } = facts.input.specification.band;
+  const factor = targetFactor(facts, stage);
+  const is = `${partName(stage)} is at −3 dB at ${valueText(corner, 'Hz', [highHz, highHz * factor])} here, loaded`;
+  if (stage.analysis.operatingBeyondCorner) {
+    return `${is}: the operating frequency of ${setFrequency(operatingHz)} is already beyond the corner.`;
+  }
+  if (verdict === 'over') return `${is}; the band goes up to ${setFrequency(highHz)}.`;
+  const ratio = valueText(corner / highHz, 'ratio', [1, factor]);
+  if (verdict === 'tight') return `${is}: ${ratio} the top of the band, target ${targetText(factor)}.`;
+  return `${is}: ${ratio} the top of the band.`;
+}
+
+/** The lower −3 dB corner against the bottom of the band; a stage that goes down to DC has none. */
+export function lowerCornerCheck(facts: ChainFacts, stage: StageFacts): Check | null {
+  const corner = stage.analysis.cornerLowerHz;
+  if (corner.value === null || corner.value <= 0) return null;
+  const { lowHz } = facts.input.specification.band;
+  const factor = targetFactor(facts, stage);
+  const verdict: Verdict = isAbove(corner.value, lowHz)
+    ? 'over'
+    : isAbove(corner.value * factor, lowHz)
+      ? 'tight'
+      : 'clear';
+  const limit = limitFigure(verdict === 'over' ? lowHz : lowHz / factor, 'Hz');
+  const value = valueText(corner.value, 'Hz', [lowHz, lowHz / factor]);
+  const cause = isFeedbackStage(stage.stage)
+    ? 'Its coupling puts the lower −3 dB corner at'
+    : 'Its lower −3 dB corner is at';
+  const ratio = valueText(lowHz / corner.value, 'ratio', [1, factor]);
+  const tail = {
+    over: `the band starts at ${setFrequency(lowHz)}`,
+    tight: `${ratio} below the bottom of the band, target ${targetText(factor)}`,
+    clear: `${ratio} below the bottom of the band`,
+    unknown: '',
+  }[verdict];
+  return makeCheck('lower-corner', LOWER_TITLE, verdict, `${cause} ${value}: ${tail}.`, {
+    actual: stageFigure(facts, stage, 'cornerLower'),
+    limit,
+  });
+}

@@ -1,0 +1,158 @@
+import type { Check, Figure, Verdict } from '../report';
+import { chainFigure, chainGainUnit } from '../report/chain-figures';
+import type { ChainFacts } from '../report/facts';
+import { limitFigure } from '../report/figures';
+import { ratioToDb } from '../report/maybe';
+import { isAbove, isBelow } from '../text/deciding-digits';
+import { decibelText, setFrequency, targetText, valueText } from '../text/phrases';
+import { flatnessContributions, gainContributions, largestContributionText } from './contributions';
+import { makeCheck, unknownCheck, verdictAtMost } from './make-check';
+
+/** Gain at the operating frequency against the window, the least and the most that are required. */
+export function gainCheck(facts: ChainFacts): Check | null {
+  const { gainDb, minimumGainDb, maximumGainDb } = facts.input.specification.requirements;
+  if (gainDb === undefined && minimumGainDb === undefined && maximumGainDb === undefined) return null;
+  const gain = facts.chain.gainOperatingDb;
+  const actual = chainFigure(facts, 'gainOperating');
+  if (gain.value === null)
+    return unknownCheck('gain', 'chain gain', `The gain cannot be told: ${gain.reason}.`, actual);
+  const bounds = gainBounds(facts);
+  const { verdict, limit } = judgeBounds(gain.value, bounds);
+  const sentence = gainSentence(facts, gain.value, verdict, limit);
+  return makeCheck('gain', 'chain gain', verdict, sentence, {
+    actual,
+    limit: limitFigure(limit, chainGainUnit(facts)),
+  });
+}
+
+/** A side of the allowed gain and how close to it is tight, in dB. */
+interface GainBound {
+  readonly side: 'least' | 'most';
+  readonly limitDb: number;
+  readonly tightDb: number;
+}
+
+/**
+ * A target ± tolerance is tight within the margin's share of the tolerance. A one-sided limit is tight within the margin's
+ * share of the limit's own value: of the gain as a ratio (20 % are 1.58 dB), not of its decibels.
+ */
+function gainBounds(facts: ChainFacts): readonly GainBound[] {
+  const { gainDb, minimumGainDb, maximumGainDb } = facts.input.specification.requirements;
+  const { toleranceMargin } = facts.policy;
+  const bounds: GainBound[] = [];
+  if (gainDb) {
+    const tightDb = gainDb.tolerance * toleranceMargin;
+    bounds.push({ side: 'least', limitDb: gainDb.target - gainDb.tolerance, tightDb });
+    bounds.push({ side: 'most', limitDb: gainDb.target + gainDb.tolerance, tightDb });
+  }
+  if (minimumGainDb !== undefined) {
+    bounds.push({ side: 'least', limitDb: minimumGainDb, tightDb: ratioToDb(1 + toleranceMargin) });
+  }
+  if (maximumGainDb !== undefined) {
+    bounds.push({ side: 'most', limitDb: maximumGainDb, tightDb: -ratioToDb(1 - toleranceMargin) });
+  }
+  return bounds;
+}
+
+function judgeBounds(gain: number, bounds: readonly GainBound[]): { verdict: Verdict; limit: number } {
+  const left = (bound: GainBound): number => (bound.side === 'least' ? gain - bound.limitDb : bound.limitDb - gain);
+  const nearest = bounds.reduce((a, b) => (left(b) < left(a) ? b : a));
+  const isOver = nearest.side === 'least' ? isBelow(gain, nearest.limitDb) : isAbove(gain, nearest.limitDb);
+  const isTight = bounds.some((bound) => left(bound) < bound.tightDb);
+  return { verdict: isOver ? 'over' : isTight ? 'tight' : 'clear', limit: nearest.limitDb };
+}
+
+function gainSentence(facts: ChainFacts, gain: number, verdict: Verdict, limit: number): string {
+  const unit = chainGainUnit(facts) === 'dBΩ' ? 'dBΩ' : 'dB';
+  const at = setFrequency(facts.input.specification.band.operatingHz);
+  const is = `The gain at ${at} is ${decibelText(gain, [limit], unit)}`;
+  if (verdict === 'clear') return `${is}, within ${requiredGainText(facts)}.`;
+  if (verdict === 'tight')
+    return `${is}, ${decibelText(Math.abs(gain - limit))} inside the limit of ${decibelText(limit, [], unit)}.`;
+  const side = gain < limit ? 'below' : 'above';
+  return `${is}, ${side} ${decibelText(limit, [], unit)} (${requiredGainText(facts)}).${gainCause(facts, gain, limit)}`;
+}
+
+/** Either the gains are set wrong, or stages lose gain: then which one loses most. */
+function gainCause(facts: ChainFacts, gain: number, limit: number): string {
+  const ideal = facts.chain.idealGainDb.value;
+  if (ideal === null) return '';
+  if (gain > limit) return '';
+  if (isBelow(ideal, limit)) {
+    return ` Even with ideal amplifiers it would be ${decibelText(ideal, [limit])}: ${decibelText(limit - ideal)} more gain has to be set.`;
+  }
+  return largestContributionText(gainContributions(facts), ideal - gain);
+}
+
+/** "60 ±1 dB", "at least 20 dB" … */
+export function requiredGainText(facts: ChainFacts): string {
+  const { gainDb, minimumGainDb, maximumGainDb } = facts.input.specification.requirements;
+  const unit = chainGainUnit(facts);
+  const parts: string[] = [];
+  if (gainDb) parts.push(`${gainDb.target} ±${gainDb.tolerance} ${unit}`);
+  if (minimumGainDb !== undefined) parts.push(`at least ${minimumGainDb} ${unit}`);
+  if (maximumGainDb !== undefined) parts.push(`at most ${maximumGainDb} ${unit}`);
+  return parts.join(', ');
+}
+
+/** Largest minus smallest gain over the band. */
+export function flatnessCheck(facts: ChainFacts): Check | null {
+  const required = facts.input.specification.requirements.flatnessDb;
+  if (required === undefined) return null;
+  const { flatnessDb } = facts.chain;
+  const actual = chainFigure(facts, 'flatness');
+  if (flatnessDb.value === null) {
+    return unknownCheck('flatness', 'flatness', `The flatness cannot be told: ${flatnessDb.reason}.`, actual);
+  }
+  const verdict = verdictAtMost(flatnessDb.value, required, required * (1 - facts.policy.toleranceMargin));
+  const { lowHz, highHz } = facts.input.specification.band;
+  const value = decibelText(flatnessDb.value, [required, required * (1 - facts.policy.toleranceMargin)]);
+  const is = `From ${setFrequency(lowHz)} to ${setFrequency(highHz)} the gain changes by ${value}; the limit is ${decibelText(required)}.`;
+  const cause = verdict === 'clear' ? '' : largestContributionText(flatnessContributions(facts), flatnessDb.value);
+  return makeCheck('flatness', 'flatness', verdict, is + cause, { actual, limit: limitFigure(required, 'dB') });
+}
+
+/** The chain's exact upper −3 dB corner. */
+export function upperCornerCheck(facts: ChainFacts): Check | null {
+  const required = facts.input.specification.requirements.upperCornerHz;
+  if (required === undefined) return null;
+  const corner = facts.chain.cornerUpperHz;
+  const actual = chainFigure(facts, 'cornerUpper');
+  if (corner.value === null) return cornerWithoutValue(facts, 'upper-corner', 'upper corner', corner.reason, actual);
+  const target = required * (1 + facts.policy.toleranceMargin);
+  const verdict: Verdict = isBelow(corner.value, required) ? 'over' : isBelow(corner.value, target) ? 'tight' : 'clear';
+  const beyond = facts.chain.operatingBeyondCorner ? ' The operating frequency is beyond the corner.' : '';
+  const sentence = `The chain is at −3 dB at ${valueText(corner.value, 'Hz', [required])}; required is ${setFrequency(required)}.${beyond}`;
+  return makeCheck('upper-corner', 'upper corner', verdict, sentence, { actual, limit: limitFigure(required, 'Hz') });
+}
+
+/** The chain's lower −3 dB corner. */
+export function chainLowerCornerCheck(facts: ChainFacts): Check | null {
+  const required = facts.input.specification.requirements.lowerCornerHz;
+  if (required === undefined) return null;
+  const corner = facts.chain.cornerLowerHz;
+  const actual = chainFigure(facts, 'cornerLower');
+  if (corner.value === null)
+    return cornerWithoutValue(facts, 'chain-lower-corner', 'lower corner', corner.reason, actual);
+  const verdict = verdictAtMost(corner.value, required, required * (1 - facts.policy.toleranceMargin));
+  const ratio = verdict === 'over' ? '' : ` (${targetText(Number((required / corner.value).toPrecision(3)))} below it)`;
+  const sentence = `The chain's lower −3 dB corner is ${valueText(corner.value, 'Hz', [required])}; required is ${setFrequency(required)}${ratio}.`;
+  return makeCheck('chain-lower-corner', 'lower corner', verdict, sentence, {
+    actual,
+    limit: limitFigure(required, 'Hz'),
+  });
+}
+
+/** No corner: flat on that side when the gain is known, else unknown. */
+function cornerWithoutValue(
+  facts: ChainFacts,
+  id: 'upper-corner' | 'chain-lower-corner',
+  title: string,
+  reason: string,
+  actual: Figure,
+): Check {
+  if (facts.chain.gainOperatingDb.value === null) {
+    return unknownCheck(id, title, `The ${title} cannot be told: ${reason}.`, actual);
+  }
+  return makeCheck(id, title, 'clear', `The ${title} is no limit: ${reason}.`, { actual });
+}

@@ -1,0 +1,88 @@
+import { unitPrice } from '../../cost/unit-price';
+import type { CheckId, Remedy } from '../../report';
+import { bandwidthRatio, gbwUsed, slewHeadroom, worstHeadroom } from '../../report/derived';
+import type { StageFacts } from '../../report/facts';
+import { gainText, ratioText } from '../../text/phrases';
+import type { ChainInput, Device, Policy, Stage } from '../../types';
+import { consequenceText, priceDifferenceText, trialStages, trialVerdict } from './trials';
+import type { Trial, Trials } from './trials';
+
+/** Devices tried in a stage before the search for a cheaper one is given up. */
+const MOST_DEVICES = 6;
+
+/** Rough enough never to leave out a device that the full model would pass. */
+const PREFILTER_SHARE = 0.9;
+
+/** The same stage with another device in it; null when the device does not fit the kind of stage. */
+export function withDevice(stage: Stage, device: Device): Stage | null {
+  return 'deviceId' in stage && stage.kind === device.kind ? { ...stage, deviceId: device.id } : null;
+}
+
+/** Price of one piece when this stage alone would use it beside those that use it already. */
+export function priceInPlace(input: ChainInput, stage: Stage, device: Device): number | null {
+  const others = input.stages.filter(
+    (each) => each.id !== stage.id && 'deviceId' in each && each.deviceId === device.id,
+  );
+  const needed = input.buildQuantity * (others.length + 1);
+  return unitPrice(device, { currency: input.currency, needed, today: input.today }).money.amountMicros;
+}
+
+function workingGbwHz(device: Device, policy: Policy): number | null {
+  if (device.kind !== 'voltage-feedback') return null;
+  const { min, typ } = device.gainBandwidthHz;
+  const minimum = min ?? (typ === undefined ? null : typ * policy.gbwDerating);
+  if (policy.gbwCase === 'typical') return typ ?? minimum;
+  if (minimum === null) return null;
+  return policy.gbwCase === 'minimumHot' ? minimum * policy.temperatureFactor : minimum;
+}
+
+function mayPass(trials: Trials, stage: StageFacts, device: Device): boolean {
+  if (device.kind !== 'voltage-feedback') return true;
+  const { facts } = trials.before;
+  const have = workingGbwHz(device, facts.policy);
+  const used = gbwUsed(facts, stage, 'worst').value;
+  if (have === null || used === null) return have !== null;
+  const tooUnstable = (device.minimumStableGain ?? 1) * PREFILTER_SHARE > (stage.analysis.noiseGain ?? 1);
+  return have >= used * facts.policy.headroomTarget * PREFILTER_SHARE && !tooUnstable;
+}
+
+/**
+ * The cheapest of the given devices that is clear in this very stage, the whole chain re-evaluated; else the cheapest that
+ * is tight where the present one is over.
+ */
+export function deviceRemedy(trials: Trials, stage: StageFacts, checkId: CheckId): Remedy | null {
+  const { input } = trials.before.facts;
+  const priced = input.devices
+    .filter((device) => device.id !== stage.device?.id && withDevice(stage.stage, device) !== null)
+    .filter((device) => mayPass(trials, stage, device))
+    .map((device) => ({ device, price: priceInPlace(input, stage.stage, device) ?? Number.POSITIVE_INFINITY }))
+    .sort((a, b) => a.price - b.price || a.device.partNumber.localeCompare(b.device.partNumber, 'en'));
+  for (const { device } of priced.slice(0, MOST_DEVICES)) {
+    const replacement = withDevice(stage.stage, device);
+    const trial = replacement && trials.replace(stage.index, [replacement]);
+    if (trial && trialVerdict(trial) === 'clear') return remedyOf(trial, device, checkId);
+  }
+  return null;
+}
+
+function remedyOf(trial: Trial, device: Device, checkId: CheckId): Remedy {
+  const { signalGain } = trialStages(trial)[0].analysis;
+  const at = device.kind === 'matched-block' ? 'in its place' : `at ${gainText(signalGain)}`;
+  const sentence = `${device.partNumber} ${at} would ${benefit(trial, checkId)}${priceDifferenceText(trial)}.${consequenceText(trial)}`;
+  return { sentence, verdict: trialVerdict(trial), action: `Use ${device.partNumber}`, stages: trial.stages };
+}
+
+/** What the device gives there, in the figure of the check that fails now. */
+function benefit(trial: Trial, checkId: CheckId): string {
+  const { facts } = trial.after;
+  const stage = trialStages(trial)[0];
+  const headroom = worstHeadroom(facts, stage).headroom.value;
+  const slew = slewHeadroom(stage).value;
+  if (checkId === 'slew' && slew !== null)
+    return `leave a slew rate of ${ratioText(slew, [1, facts.policy.slewTarget])}`;
+  if (checkId === 'gbw' && headroom !== null) return `leave ${ratioText(headroom, [1, facts.policy.headroomTarget])}`;
+  const ratio = bandwidthRatio(facts, stage).value;
+  if (checkId === 'bandwidth' && ratio !== null)
+    return `reach ${ratioText(ratio, [1, facts.policy.bandwidthTarget])} the top of the band`;
+  return 'pass every check here';
+}

@@ -1,0 +1,93 @@
+import type { Check, CheckId, Remedy } from '../../report';
+import type { StageFacts } from '../../report/facts';
+import { flatnessContributions, gainContributions } from '../contributions';
+import type { Judgement } from '../judge';
+import { badness, worstCheck } from '../verdict-order';
+import { chainDeviceRemedy } from './chain-remedy';
+import { deviceRemedy } from './device-remedy';
+import { gbwRemedies } from './gbw-remedies';
+import {
+  couplingRemedies,
+  feedbackResistorRemedies,
+  slewRemedies,
+  stabilityRemedies,
+  swingRemedies,
+} from './other-remedies';
+import { createTrials } from './trials';
+import type { Trials } from './trials';
+
+/** Evaluations of modified chains that one report may spend on remedies; the worst stages are served first. */
+const MOST_EVALUATIONS = 24;
+
+type Finder = (trials: Trials, stage: StageFacts) => readonly Remedy[];
+
+const FINDERS: Partial<Readonly<Record<CheckId, Finder>>> = {
+  gbw: gbwRemedies,
+  slew: slewRemedies,
+  swing: swingRemedies,
+  stability: stabilityRemedies,
+  'lower-corner': couplingRemedies,
+  'feedback-resistor': feedbackResistorRemedies,
+};
+
+/** Checks for which a device of the same kind can be the answer. */
+const DEVICE_CAN_HELP: ReadonlySet<CheckId> = new Set<CheckId>([
+  'gbw',
+  'bandwidth',
+  'stability',
+  'slew',
+  'swing',
+  'compression',
+  'output-current',
+  'supply-voltage',
+  'loop-gain',
+]);
+
+/** Checks by stage and of the chain, with remedies on those that decide. */
+export interface ChecksWithRemedies {
+  readonly stageChecks: readonly (readonly Check[])[];
+  readonly chainChecks: readonly Check[];
+}
+
+/**
+ * Looks for what would help: on the deciding check of every stage that is over or tight, and on gain and flatness of a chain
+ * whose stages pass. Every figure named comes from the full model of the changed chain.
+ *
+ * @param judgement the chain as it is
+ */
+export function findRemedies(judgement: Judgement): ChecksWithRemedies {
+  const trials = createTrials(judgement, MOST_EVALUATIONS);
+  const found = new Map<Check, readonly Remedy[]>();
+  const order = judgement.facts.stages
+    .map((stage) => ({ stage, check: worstCheck(judgement.stageChecks[stage.index]) }))
+    .filter((each): each is { stage: StageFacts; check: Check } => each.check !== null && canHelp(each.check))
+    .sort((a, b) => badness(b.check.verdict) - badness(a.check.verdict));
+  for (const { stage, check } of order) found.set(check, stageRemedies(trials, stage, check));
+  for (const check of judgement.chainChecks) found.set(check, chainRemedies(trials, check));
+  const withRemedies = (check: Check): Check => ({ ...check, remedies: found.get(check) ?? check.remedies });
+  return {
+    stageChecks: judgement.stageChecks.map((checks) => checks.map(withRemedies)),
+    chainChecks: judgement.chainChecks.map(withRemedies),
+  };
+}
+
+function canHelp(check: Check): boolean {
+  return check.verdict === 'over' || check.verdict === 'tight';
+}
+
+function stageRemedies(trials: Trials, stage: StageFacts, check: Check): readonly Remedy[] {
+  const own = FINDERS[check.id]?.(trials, stage) ?? [];
+  const device = DEVICE_CAN_HELP.has(check.id) ? deviceRemedy(trials, stage, check.id) : null;
+  return device ? [...own.slice(0, 1), device, ...own.slice(1)] : own;
+}
+
+function chainRemedies(trials: Trials, check: Check): readonly Remedy[] {
+  if (!canHelp(check) || trials.before.stageVerdicts.includes('over')) return [];
+  const { facts } = trials.before;
+  const contributions =
+    check.id === 'flatness' ? flatnessContributions(facts) : check.id === 'gain' ? gainContributions(facts) : null;
+  const largest = contributions?.[0];
+  if (!largest || largest.valueDb >= 0) return [];
+  const remedy = chainDeviceRemedy(trials, largest.stage, check.id);
+  return remedy ? [remedy] : [];
+}

@@ -1,0 +1,104 @@
+import type { Remedy } from '../../report';
+import { bandwidthRatio, slewAvailable, swingHeadroom } from '../../report/derived';
+import { isFeedbackStage, partName } from '../../report/facts';
+import type { StageFacts } from '../../report/facts';
+import { ratioToDb } from '../../report/maybe';
+import { worsePoint } from '../../report/stage-figures';
+import { atLeastText, atMostText, noiseGainText, setFrequency, targetText, valueText } from '../../text/phrases';
+import { typed } from '../../text/si-format';
+import { nearestPreferred } from '../../preferred-values';
+import { consequenceText, trialStages, trialVerdict } from './trials';
+import type { Trials } from './trials';
+
+const ISOLATION_OHM: readonly number[] = [10, 22, 47, 100];
+
+/** Slew: what the stage needs, the level that this device can follow, and that splitting is no way out. */
+export function slewRemedies(trials: Trials, stage: StageFacts): readonly Remedy[] {
+  const { facts } = trials.before;
+  const needed = stage.analysis.slewNeededVPerS.value;
+  const have = slewAvailable(stage).value;
+  if (needed === null || have === null || needed <= 0) return [];
+  const target = facts.policy.slewTarget;
+  const bare = have < needed ? ` (${atLeastText(needed, 'V/s')} for ×1)` : '';
+  const peak = (stage.analysis.outputPeakV.value ?? 0) * (have / (needed * target));
+  const { highHz } = facts.input.specification.band;
+  return [
+    {
+      sentence:
+        `It needs at least ${atLeastText(needed * target, 'V/s')} for the target ${targetText(target)}${bare}. ` +
+        'Splitting the gain cannot help: the output has to swing as far.',
+      verdict: 'clear',
+    },
+    {
+      sentence: `${partName(stage)} follows at most ${atMostText(peak, 'V')} peak at ${setFrequency(highHz)} with ${targetText(target)}.`,
+      verdict: 'clear',
+    },
+  ];
+}
+
+/** Swing: how much the level has to come down. */
+export function swingRemedies(trials: Trials, stage: StageFacts): readonly Remedy[] {
+  const headroom = swingHeadroom(stage).value;
+  if (headroom === null || headroom <= 0) return [];
+  const missing = trials.before.facts.policy.levelMarginDb - ratioToDb(headroom);
+  const sentence = `The level here has to come down by ${valueText(missing, 'dB')}, or the supply has to go up.`;
+  return [{ sentence, verdict: 'clear' }];
+}
+
+/** Stability: the noise gain that the device asks for, or a resistor that separates a capacitive load. */
+export function stabilityRemedies(trials: Trials, stage: StageFacts): readonly Remedy[] {
+  const least = stage.device?.kind === 'voltage-feedback' ? stage.device.minimumStableGain : undefined;
+  if (least !== undefined && (stage.analysis.noiseGain ?? least) < least) {
+    const sentence = `${partName(stage)} needs a noise gain of at least ${noiseGainText(least)}; a unity-gain stable device has no such limit.`;
+    return [{ sentence, verdict: 'clear' }];
+  }
+  const isolation = isolationRemedy(trials, stage);
+  return isolation ? [isolation] : [];
+}
+
+function isolationRemedy(trials: Trials, stage: StageFacts): Remedy | null {
+  const set = stage.stage;
+  if (!isFeedbackStage(set) || stage.stability?.loadCapacitive !== true || (set.isolationOhm ?? 0) > 0) return null;
+  for (const isolationOhm of ISOLATION_OHM) {
+    const trial = trials.replace(stage.index, [{ ...set, isolationOhm }]);
+    if (!trial) return null;
+    const margin = worsePoint(trialStages(trial)[0])?.phaseMarginDeg ?? null;
+    if (trialVerdict(trial) !== 'clear' || margin === null) continue;
+    const value = typed(isolationOhm, 'Ω');
+    const sentence = `${value} in series with its output would bring the phase margin to ${valueText(margin, 'deg')}.${consequenceText(trial)}`;
+    return { sentence, verdict: 'clear', action: `Add ${value} isolation`, stages: trial.stages };
+  }
+  return null;
+}
+
+/** A larger coupling capacitor, the next of E6 that meets the target. */
+export function couplingRemedies(trials: Trials, stage: StageFacts): readonly Remedy[] {
+  const { facts } = trials.before;
+  const set = stage.stage;
+  const corner = stage.analysis.cornerLowerHz.value;
+  if (!isFeedbackStage(set) || typeof set.couplingF !== 'number' || corner === null) return [];
+  const least = (set.couplingF * corner * facts.policy.bandwidthTarget) / facts.input.specification.band.lowHz;
+  const nearest = nearestPreferred(least, 'E6');
+  const couplingF = nearest >= least ? nearest : nearestPreferred(least * 1.5, 'E6');
+  const trial = trials.replace(stage.index, [{ ...set, couplingF }]);
+  const after = trial && trialStages(trial)[0].analysis.cornerLowerHz.value;
+  if (!trial || after === null) return [];
+  const sentence = `A coupling of ${typed(couplingF, 'F')} would put the corner at ${valueText(after, 'Hz')}.${consequenceText(trial)}`;
+  return [{ sentence, verdict: trialVerdict(trial), action: `Use ${typed(couplingF, 'F')}`, stages: trial.stages }];
+}
+
+/** Rf of the reference circuit for a current-feedback stage whose Rf is too small, the gain kept. */
+export function feedbackResistorRemedies(trials: Trials, stage: StageFacts): readonly Remedy[] {
+  const set = stage.stage;
+  const { device } = stage;
+  if (set.kind !== 'current-feedback' || device?.kind !== 'current-feedback') return [];
+  const scale = device.referenceFeedbackOhm / set.feedbackOhm;
+  const gainOhm = typeof set.gainOhm === 'number' ? set.gainOhm * scale : set.gainOhm;
+  const trial = trials.replace(stage.index, [{ ...set, feedbackOhm: device.referenceFeedbackOhm, gainOhm }]);
+  if (!trial) return [];
+  const ratio = bandwidthRatio(trial.after.facts, trialStages(trial)[0]).value;
+  const reach = ratio === null ? '' : ` The corner would be ${valueText(ratio, 'ratio')} the top of the band.`;
+  const value = typed(device.referenceFeedbackOhm, 'Ω');
+  const sentence = `With ${value} for Rf, as in the datasheet's reference circuit, it is as its maker measured it.${reach}${consequenceText(trial)}`;
+  return [{ sentence, verdict: trialVerdict(trial), action: `Use ${value}`, stages: trial.stages }];
+}

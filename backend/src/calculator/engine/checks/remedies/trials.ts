@@ -1,0 +1,90 @@
+import type { Check, Remedy } from '../../report';
+import { tryEvaluate } from '../../report/evaluate';
+import type { StageFacts } from '../../report/facts';
+import { formatFigure } from '../../text/si-format';
+import { decimalAmount } from '../../text/si-format';
+import { listText } from '../../text/phrases';
+import type { Stage } from '../../types';
+import type { Judgement } from '../judge';
+import { worstVerdict } from '../verdict-order';
+
+/** A chain with one stage replaced, evaluated by the full model. */
+export interface Trial {
+  readonly before: Judgement;
+  readonly after: Judgement;
+  /** Where the replacement stands in the new chain. */
+  readonly firstIndex: number;
+  readonly stages: readonly Stage[];
+}
+
+/** Runs replacements through the full model, up to a number of them for one report. */
+export interface Trials {
+  readonly before: Judgement;
+  /** Null: refused by the model, or the budget of evaluations is spent. */
+  replace(stageIndex: number, stages: readonly Stage[]): Trial | null;
+}
+
+/** @param mostEvaluations how many chains may be evaluated for the remedies of one report */
+export function createTrials(before: Judgement, mostEvaluations: number): Trials {
+  let left = mostEvaluations;
+  return {
+    before,
+    replace(stageIndex, stages) {
+      if (left <= 0) return null;
+      left -= 1;
+      const { input } = before.facts;
+      const all = [...input.stages.slice(0, stageIndex), ...stages, ...input.stages.slice(stageIndex + 1)];
+      const after = tryEvaluate({ ...input, stages: all });
+      return after ? { before, after, firstIndex: stageIndex, stages } : null;
+    },
+  };
+}
+
+/** The replaced stages as they are afterwards. */
+export function trialStages(trial: Trial): readonly StageFacts[] {
+  return trial.after.facts.stages.slice(trial.firstIndex, trial.firstIndex + trial.stages.length);
+}
+
+/** Worst verdict of the replaced stages. */
+export function trialVerdict(trial: Trial): Remedy['verdict'] {
+  const own = trial.after.stageVerdicts.slice(trial.firstIndex, trial.firstIndex + trial.stages.length);
+  return worstVerdict(own);
+}
+
+/** What else changes: polarity, price, requirements that fail afterwards. Empty, or starting with a space. */
+export function consequenceText(trial: Trial): string {
+  const sentences = [polarityText(trial), failureText(trial)].filter((text) => text !== '');
+  return sentences.map((text) => ` ${text}`).join('');
+}
+
+function polarityText(trial: Trial): string {
+  const turned = trial.before.facts.chain.inverted !== trial.after.facts.chain.inverted;
+  return turned ? 'This turns the polarity over.' : '';
+}
+
+function failureText(trial: Trial): string {
+  const failing = trial.after.chainChecks.filter((check) => check.verdict === 'over' && check.id !== 'polarity');
+  if (failing.length === 0) return '';
+  const before = new Set(trial.before.chainChecks.filter((check) => check.verdict === 'over').map((check) => check.id));
+  const still = failing.every((check) => before.has(check.id)) ? 'still ' : '';
+  return `The chain would ${still}fail: ${listText(failing.map((check) => failureOf(trial, check)))}.`;
+}
+
+function failureOf(trial: Trial, check: Check): string {
+  if (check.id === 'cost') {
+    const { amountMicros, currency } = trial.after.facts.cost.total;
+    return `cost ${decimalAmount(amountMicros ?? 0)} ${currency}`;
+  }
+  const title = check.title.replace(/^chain /, '');
+  return check.actual && check.actual.value !== null ? `${title} ${formatFigure(check.actual)}` : title;
+}
+
+/** "for 0.83 USD more", "for 0.10 USD less", "at the same cost"; empty when a price is missing. */
+export function priceDifferenceText(trial: Trial): string {
+  const before = trial.before.facts.cost.total;
+  const after = trial.after.facts.cost.total;
+  if (before.amountMicros === null || after.amountMicros === null) return '';
+  const difference = after.amountMicros - before.amountMicros;
+  if (difference === 0) return ' at the same cost';
+  return ` for ${decimalAmount(Math.abs(difference))} ${after.currency} ${difference > 0 ? 'more' : 'less'}`;
+}

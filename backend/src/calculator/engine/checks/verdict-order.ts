@@ -1,0 +1,39 @@
+import { CHECK_IDS } from '../report';
+import type { Check, Verdict } from '../report';
+
+/** From best to worst. */
+const BADNESS: Readonly<Record<Verdict, number>> = { clear: 0, tight: 1, unknown: 2, over: 3 };
+
+/** How bad a verdict is: over > unknown > tight > clear. */
+export function badness(verdict: Verdict): number {
+  return BADNESS[verdict];
+}
+
+/** The worst of several verdicts; clear when there are none. */
+export function worstVerdict(verdicts: readonly Verdict[]): Verdict {
+  return verdicts.reduce<Verdict>((worst, each) => (badness(each) > badness(worst) ? each : worst), 'clear');
+}
+
+/**
+ * The check that a verdict rests on: the worst; among equals the one furthest from its limit in the same check, else the
+ * earlier kind of check.
+ */
+export function worstCheck(checks: readonly Check[]): Check | null {
+  return checks.reduce<Check | null>((worst, each) => (worst === null || isWorse(each, worst) ? each : worst), null);
+}
+
+/** True when check `a` is worse than check `b`. */
+export function isWorse(a: Check, b: Check): boolean {
+  if (a.verdict !== b.verdict) return badness(a.verdict) > badness(b.verdict);
+  if (a.id !== b.id) return CHECK_IDS.indexOf(a.id) < CHECK_IDS.indexOf(b.id);
+  return distance(a) > distance(b);
+}
+
+/** How far a check's figure is from its limit, as a ratio ≥ 1. */
+function distance(check: Check): number {
+  const actual = Math.abs(check.actual?.value ?? 0);
+  const limit = Math.abs(check.limit?.value ?? 0);
+  if (actual === 0 || limit === 0) return 0;
+  const ratio = Math.abs(Math.log(actual / limit));
+  return check.verdict === 'over' ? ratio : -ratio;
+}
