@@ -4,6 +4,7 @@ import { refuseForeignHost } from './common/demo-host';
 import { bodyErrors, jsonBody } from './common/json-body';
 import { requestContextMiddleware } from './common/request-context';
 import { securityHeaders } from './common/security-headers';
+import { SESSION_COOKIE } from './common/session-cookie';
 import { staticFrontend } from './common/static-frontend';
 import { Runtime } from './config/runtime';
 import { SessionStore } from './database/session-store';
@@ -18,7 +19,6 @@ export function configureApp(app: NestExpressApplication): void {
   app.set('trust proxy', config.trustProxyHops);
   app.set('etag', false);
   app.setGlobalPrefix('api');
-  app.enableShutdownHooks([]);
   app.use(requestContextMiddleware, securityHeaders(config.publicUrl));
   if (runtime.demo) app.use(refuseForeignHost);
   app.use(...staticFrontend(config.frontendDir));
@@ -26,7 +26,7 @@ export function configureApp(app: NestExpressApplication): void {
   app.use(
     '/api',
     session({
-      name: 'bandledger.sid',
+      name: SESSION_COOKIE,
       secret: runtime.sessionSecret,
       store: app.get(SessionStore).store,
       resave: false,

@@ -51,6 +51,8 @@ function fail(error: unknown): never {
 }
 
 async function main(): Promise<void> {
+  // Password hashes and session data are for the user that runs the server alone.
+  process.umask(0o077);
   const config = readProcessEnvironment();
   const booted = await bootApp(config);
   stopOnSignal(booted);

@@ -4,7 +4,7 @@ import { ForbiddenError, NotFoundError, UnauthenticatedError } from '../common/e
 import type { SessionUser } from '../common/session-user';
 import { Runtime } from '../config/runtime';
 import { AccountsService } from '../users/accounts.service';
-import type { User } from '../users/models/user.model';
+import type { Account } from '../users/account';
 import { PasswordHasher } from '../users/password-hasher';
 import type { LinkOwnerDto, SessionDto } from './dto/session.dto';
 import type { SetupDto } from './dto/sign-in.dto';
@@ -34,13 +34,18 @@ export class AuthService {
       user: user === undefined ? null : { ...user, roles: [...user.roles] },
       demo,
       setupNeeded: !demo && !(await this.accounts.exist()),
-      demoAccounts: demoAccounts.map(({ id, name, roles, title }) => ({ userId: id, name, roles, title: title ?? '' })),
+      demoAccounts: demoAccounts.map(({ id, name, roles, title }) => ({
+        userId: id,
+        name,
+        roles: [...roles],
+        title: title ?? '',
+      })),
       version: config.version,
     };
   }
 
   /** The account for a mail address and password; unknown, deactivated and wrong take the same time and answer. */
-  async verifyPassword(email: string, password: string, address: string): Promise<User> {
+  async verifyPassword(email: string, password: string, address: string): Promise<Account> {
     this.limiter.assertAllowed(email, address);
     const user = await this.accounts.findByEmail(email);
     const matches = await this.hasher.verify(password, user?.passwordHash ?? null);
@@ -52,14 +57,14 @@ export class AuthService {
     return user;
   }
 
-  async findDemoAccount(userId: string): Promise<User> {
+  async findDemoAccount(userId: string): Promise<Account> {
     if (!this.runtime.demo) throw new NotFoundError();
     const user = await this.accounts.findActive(userId);
     if (user === null || !user.isDemo) throw new NotFoundError();
     return user;
   }
 
-  async setUp(dto: SetupDto, address: string): Promise<User> {
+  async setUp(dto: SetupDto, address: string): Promise<Account> {
     const expected = this.runtime.setupToken;
     if (expected === null || (await this.accounts.exist())) throw new NotFoundError();
     this.limiter.assertAllowed(SETUP_ACCOUNT, address);
@@ -76,7 +81,7 @@ export class AuthService {
     return { name: user.name, email: user.email };
   }
 
-  async choosePassword(token: string, password: string): Promise<User> {
+  async choosePassword(token: string, password: string): Promise<Account> {
     const user = await this.accounts.setPasswordByLink(token, password);
     this.limiter.forgive(user.email);
     return user;

@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { PassportStrategy } from '@nestjs/passport';
 import type { Request } from 'express';
 import { Strategy } from 'passport-local';
-import type { User } from '../users/models/user.model';
+import type { Account } from '../users/account';
 import { AuthService } from './auth.service';
 
 @Injectable()
@@ -11,7 +11,7 @@ export class LocalStrategy extends PassportStrategy(Strategy, 'local') {
     super({ usernameField: 'email', passwordField: 'password', passReqToCallback: true });
   }
 
-  validate(request: Request, email: string, password: string): Promise<User> {
+  validate(request: Request, email: string, password: string): Promise<Account> {
     return this.auth.verifyPassword(email, password, request.ip ?? 'unknown');
   }
 }

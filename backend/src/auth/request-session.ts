@@ -1,5 +1,5 @@
 import type { Request } from 'express';
-import type { User } from '../users/models/user.model';
+import type { Account } from '../users/account';
 
 /** A session is written back at most this often while it is being used. */
 const RENEW_AFTER_MS = 5 * 60_000;
@@ -11,7 +11,7 @@ function regenerate(request: Request): Promise<void> {
 }
 
 /** Signs a person in: always under a new session id, so that one planted beforehand is worth nothing. */
-export async function startSession(request: Request, user: User, nowMs: number): Promise<void> {
+export async function startSession(request: Request, user: Account, nowMs: number): Promise<void> {
   await regenerate(request);
   request.session.user = { id: user.id, epoch: user.sessionEpoch };
   request.session.renewedAtMs = nowMs;

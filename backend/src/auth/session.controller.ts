@@ -1,13 +1,14 @@
-import { Body, Controller, Delete, Get, HttpCode, Post, Req, UseGuards } from '@nestjs/common';
+import { Body, Controller, Delete, Get, HttpCode, Post, Req, Res, UseGuards } from '@nestjs/common';
 import { ApiBody, ApiNoContentResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
-import type { Request } from 'express';
+import type { Request, Response } from 'express';
 import { CurrentUser, NoStore, Public } from '../common/decorators';
 import type { SessionUser } from '../common/session-user';
-import type { User } from '../users/models/user.model';
+import type { Account } from '../users/account';
 import { AuthService } from './auth.service';
 import { SessionDto, SignedInDto } from './dto/session.dto';
 import { DemoSignInDto, SignInDto } from './dto/sign-in.dto';
 import { LocalAuthGuard } from './local-auth.guard';
+import { SESSION_COOKIE } from '../common/session-cookie';
 import { endSession } from './request-session';
 import { SignInService } from './sign-in.service';
 
@@ -36,7 +37,7 @@ export class SessionController {
   @ApiBody({ type: SignInDto })
   @ApiOkResponse({ type: SignedInDto })
   create(@Req() request: Request): Promise<SignedInDto> {
-    return this.signIn.start(request, request.user as User, 'password');
+    return this.signIn.start(request, request.user as Account, 'password');
   }
 
   /** Demo mode only: become one of the invented team without a password. */
@@ -53,7 +54,8 @@ export class SessionController {
   @HttpCode(204)
   @Delete()
   @ApiNoContentResponse()
-  async remove(@Req() request: Request): Promise<void> {
+  async remove(@Req() request: Request, @Res({ passthrough: true }) response: Response): Promise<void> {
     await endSession(request);
+    response.clearCookie(SESSION_COOKIE, { path: '/' });
   }
 }

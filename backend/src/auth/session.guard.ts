@@ -7,7 +7,7 @@ import { ForbiddenError, UnauthenticatedError } from '../common/errors';
 import type { Role } from '../common/role';
 import type { SessionUser } from '../common/session-user';
 import { AccountsService } from '../users/accounts.service';
-import { toSessionUser } from '../users/user.presenter';
+import { toSessionUser } from '../users/account';
 import { renewSession } from './request-session';
 
 type RequestWithUser = Request & { user?: SessionUser };

@@ -2,8 +2,8 @@ import { Injectable } from '@nestjs/common';
 import type { Request } from 'express';
 import { Clock } from '../common/clock';
 import { AccountsService } from '../users/accounts.service';
-import type { User } from '../users/models/user.model';
-import { toSessionUser } from '../users/user.presenter';
+import { type Account, toSessionUser } from '../users/account';
+
 import type { SignedInDto } from './dto/session.dto';
 import { startSession } from './request-session';
 
@@ -15,7 +15,7 @@ export class SignInService {
     private readonly clock: Clock,
   ) {}
 
-  async start(request: Request, user: User, way: 'password' | 'demo' | 'link' | 'setup'): Promise<SignedInDto> {
+  async start(request: Request, user: Account, way: 'password' | 'demo' | 'link' | 'setup'): Promise<SignedInDto> {
     await this.accounts.recordSignIn(user, way);
     await startSession(request, user, this.clock.now().getTime());
     const { roles, ...identity } = toSessionUser(user);

@@ -24,6 +24,12 @@ function fromHttpException(error: HttpException): AppError {
   return status < 500 ? new AppError(status, 'refused', 'The request was refused.') : INTERNAL;
 }
 
+/** Errors of Express and its middleware (a malformed address, for instance) say by `status` that the client is at fault. */
+function isClientError(error: unknown): boolean {
+  const status = error instanceof Error && 'status' in error ? Number(error.status) : 500;
+  return status >= 400 && status < 500;
+}
+
 /** What the client is told about anything that was thrown. */
 export function toAppError(error: unknown): AppError {
   if (error instanceof AppError) return error;
@@ -31,7 +37,8 @@ export function toAppError(error: unknown): AppError {
   if (error instanceof ForeignKeyConstraintError) {
     return new ConflictError('in_use', 'Something else still depends on this, or what it refers to is gone.');
   }
-  return error instanceof HttpException ? fromHttpException(error) : INTERNAL;
+  if (error instanceof HttpException) return fromHttpException(error);
+  return isClientError(error) ? new UnreadableError('The request could not be read.') : INTERNAL;
 }
 
 /** The one place where an error becomes an answer: `{ code, message, fieldErrors?, requestId }`. */

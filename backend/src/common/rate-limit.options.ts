@@ -18,7 +18,13 @@ export function rateLimitOptions(runtime: Runtime): ThrottlerModuleOptions {
   };
   const { rateGeneralPerMinute, rateCalculationsPerMinute } = runtime.config;
   return [
-    { name: 'general', limit: rateGeneralPerMinute, ttl: MINUTE_MS, skipIf: unlessIn('general') },
-    { name: 'calculation', limit: rateCalculationsPerMinute, ttl: MINUTE_MS, skipIf: unlessIn('calculation') },
+    { name: 'general', setHeaders: false, limit: rateGeneralPerMinute, ttl: MINUTE_MS, skipIf: unlessIn('general') },
+    {
+      name: 'calculation',
+      setHeaders: false,
+      limit: rateCalculationsPerMinute,
+      ttl: MINUTE_MS,
+      skipIf: unlessIn('calculation'),
+    },
   ];
 }

@@ -37,10 +37,11 @@ export class ConfigError extends Error {}
 
 type Environment = Readonly<Record<string, string | undefined>>;
 
-const LOOPBACK_HOSTS: readonly string[] = ['127.0.0.1', '::1', 'localhost'];
+const LOOPBACK = /^(localhost|127(\.\d{1,3}){3}|::1|\[::1\])$/i;
 
+/** Whether only this machine itself can reach the address. */
 export function isLoopback(host: string): boolean {
-  return LOOPBACK_HOSTS.includes(host.replace(/^\[|\]$/g, ''));
+  return LOOPBACK.test(host);
 }
 
 /** `http://host:port` with the brackets that an IPv6 address needs. */

@@ -6,6 +6,7 @@ import { ConflictError, NotFoundError } from '../common/errors';
 import type { Role } from '../common/role';
 import { SessionStore } from '../database/session-store';
 import { WriteQueue } from '../database/write-queue';
+import type { Account } from './account';
 import { User } from './models/user.model';
 import { OneTimeLinksService } from './one-time-links.service';
 import { PasswordHasher } from './password-hasher';
@@ -31,15 +32,15 @@ export class AccountsService {
     private readonly sessions: SessionStore,
   ) {}
 
-  findActive(id: string): Promise<User | null> {
+  findActive(id: string): Promise<Account | null> {
     return this.users.findOne({ where: { id, active: true } });
   }
 
-  findByEmail(email: string): Promise<User | null> {
+  findByEmail(email: string): Promise<Account | null> {
     return this.users.findOne({ where: { email: email.trim().toLowerCase() } });
   }
 
-  findDemoAccounts(): Promise<User[]> {
+  findDemoAccounts(): Promise<Account[]> {
     return this.users.findAll({ where: { isDemo: true, active: true }, order: ['createdAt', 'name'] });
   }
 
@@ -48,7 +49,7 @@ export class AccountsService {
   }
 
   /** One person of the invented team; no password, so only the demo's own sign-in opens the account. */
-  async createDemoAccount(account: DemoAccount, transaction: Transaction): Promise<User> {
+  async createDemoAccount(account: DemoAccount, transaction: Transaction): Promise<Account> {
     const user = await this.users.create({ ...account, isDemo: true }, { transaction });
     await this.audit.record(transaction, {
       actorId: null,
@@ -61,7 +62,7 @@ export class AccountsService {
   }
 
   /** The first person of a new installation; 404 as soon as there is anybody. */
-  async createFirstAdmin(name: string, email: string, password: string): Promise<User> {
+  async createFirstAdmin(name: string, email: string, password: string): Promise<Account> {
     const passwordHash = await this.hasher.hash(password);
     return this.queue.transaction(async (transaction) => {
       if ((await this.users.count({ transaction })) > 0) throw new NotFoundError();
@@ -77,13 +78,13 @@ export class AccountsService {
     });
   }
 
-  async findByLink(token: string): Promise<User | null> {
+  async findByLink(token: string): Promise<Account | null> {
     const userId = await this.links.findUserId(token);
     return userId === null ? null : this.findActive(userId);
   }
 
   /** Uses a link up: the person has a new password and every earlier session is over. */
-  async setPasswordByLink(token: string, password: string): Promise<User> {
+  async setPasswordByLink(token: string, password: string): Promise<Account> {
     if ((await this.findByLink(token)) === null) throw new NotFoundError();
     const passwordHash = await this.hasher.hash(password);
     const user = await this.queue.transaction(async (transaction) => {
@@ -105,7 +106,7 @@ export class AccountsService {
   }
 
   /** Puts a sign-in on record. */
-  async recordSignIn(user: User, way: 'password' | 'demo' | 'link' | 'setup'): Promise<void> {
+  async recordSignIn(user: Account, way: 'password' | 'demo' | 'link' | 'setup'): Promise<void> {
     await this.queue.transaction(async (transaction) => {
       const current = await this.users.findByPk(user.id, { transaction });
       if (current === null || !current.active) throw new ConflictError('account_changed', 'Please sign in again.');

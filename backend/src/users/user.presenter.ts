@@ -14,7 +14,3 @@ export function presentUser(user: User, actor: SessionUser): UserDto {
 export function auditedUser({ name, email, roles, active }: User): Record<string, unknown> {
   return { name, email, roles, active };
 }
-
-export function toSessionUser({ id, name, email, roles }: User): SessionUser {
-  return { id, name, email, roles };
-}
