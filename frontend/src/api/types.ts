@@ -689,6 +689,8 @@ export interface UserRow {
   readonly roles: readonly Role[];
   readonly active: boolean;
   readonly email?: string;
+  /** Whether a password has been chosen; for administrators only. */
+  readonly hasPassword?: boolean;
   readonly version: number;
   readonly can: { readonly edit: boolean };
 }
@@ -726,7 +728,9 @@ export interface Project {
   readonly policy: Policy;
   readonly currency: string;
   readonly buildQuantity: number;
+  readonly chainCount: number;
   readonly version: number;
+  readonly updatedAt: string;
   readonly can: {
     readonly edit: boolean;
     readonly setPolicy: boolean;

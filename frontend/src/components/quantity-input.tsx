@@ -103,6 +103,7 @@ export function QuantityInput(props: QuantityInputProps) {
       spellCheck={false}
       status={message ? 'error' : undefined}
       aria-invalid={message ? true : undefined}
+      data-unreadable={current.message ? true : undefined}
       aria-required={required || undefined}
       aria-label={bare ? (ariaLabel ?? String(label)) : ariaLabel}
       aria-describedby={bare ? undefined : describedBy(id, message, understood ?? hint)}
