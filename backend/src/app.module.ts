@@ -4,6 +4,8 @@ import { ThrottlerModule } from '@nestjs/throttler';
 import { AuditModule } from './audit/audit.module';
 import { AuthModule } from './auth/auth.module';
 import { SessionGuard } from './auth/session.guard';
+import { CalculatorModule } from './calculator/calculator.module';
+import { ChainsModule } from './chains/chains.module';
 import { CommonModule } from './common/common.module';
 import { CsrfGuard } from './common/csrf.guard';
 import { ErrorFilter } from './common/error.filter';
@@ -13,7 +15,10 @@ import { AppValidationPipe } from './common/validation.pipe';
 import { Runtime } from './config/runtime';
 import { RuntimeModule } from './config/runtime.module';
 import { DatabaseModule } from './database/database.module';
+import { DevicesModule } from './devices/devices.module';
 import { HealthModule } from './health/health.module';
+import { ProjectsModule } from './projects/projects.module';
+import { QuotesModule } from './quotes/quotes.module';
 import { SettingsModule } from './settings/settings.module';
 import { UsersModule } from './users/users.module';
 
@@ -26,6 +31,11 @@ import { UsersModule } from './users/users.module';
     UsersModule,
     AuthModule,
     HealthModule,
+    ProjectsModule,
+    DevicesModule,
+    QuotesModule,
+    CalculatorModule,
+    ChainsModule,
     ThrottlerModule.forRootAsync({ inject: [Runtime], useFactory: rateLimitOptions }),
   ],
   providers: [

@@ -7,8 +7,7 @@ import { LIST_LIMITS, TEXT_LIMITS } from '../../common/limits';
 import { DEVICE } from '../../devices/dto/device-input.dto';
 import type { DeviceInputDto } from '../../devices/dto/device-input.dto';
 import { PolicyChangeDto } from '../../projects/dto/policy.dto';
-import type { CurveRequest, WorkingRequest } from '../engine/report';
-import type { GbwCase } from '../engine/types';
+import type { CurveRequest, GbwCase, WorkingRequest } from '../engine';
 import { ChainReportDto } from './chain-report.dto';
 import { CurvesDto } from './curves.dto';
 import { SpecificationDto } from './specification.dto';
@@ -25,7 +24,7 @@ export class CurveRequestDto implements CurveRequest {
 
 @ApiSchema({ name: 'WorkingRequest' })
 export class WorkingRequestDto implements WorkingRequest {
-  @Uuid({ optional: true, nullable: true, description: 'Null: a figure of the chain' })
+  @Uuid({ nullable: true, description: 'Null: a figure of the chain' })
   readonly stageId: string | null;
 
   @Text({ maximum: TEXT_LIMITS.shortText, description: "A key of the figures, or 'unitCost' / 'cost'" })

@@ -1,6 +1,5 @@
 import { ApiProperty, ApiSchema } from '@nestjs/swagger';
-import type { CandidateReport, CandidatesReport, StageNeed, Verdict } from '../engine/report';
-import type { Grade } from '../engine/types';
+import type { CandidateReport, CandidatesReport, Grade, StageNeed, Verdict } from '../engine';
 import { FigureDto, MoneyDto, VERDICTS } from './figure.dto';
 
 const VERDICT = { enum: VERDICTS, enumName: 'Verdict' };

@@ -1,18 +1,20 @@
 import { ApiProperty, ApiSchema } from '@nestjs/swagger';
-import { CHAIN_FIGURES, STAGE_FIGURES } from '../engine/report';
+import { CHAIN_FIGURES, STAGE_FIGURES } from '../engine';
 import type {
   ChainCaseReport,
   ChainFigureKey,
   ChainReport,
   Figure,
   FrequencyAxis,
+  GbwCase,
+  Grade,
   HeadlineItem,
   StageCaseReport,
   StageFigureKey,
+  StageKind,
   StageReport,
   Verdict,
-} from '../engine/report';
-import type { GbwCase, Grade, StageKind } from '../engine/types';
+} from '../engine';
 import { CheckDto, DataMarkDto, LaneDto, VerdictReportDto } from './check.dto';
 import { FigureDto, MoneyDto, VERDICTS } from './figure.dto';
 

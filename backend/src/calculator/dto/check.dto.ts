@@ -1,8 +1,7 @@
 import { ApiProperty, ApiSchema, getSchemaPath } from '@nestjs/swagger';
 import { membersOf } from '../../common/fields/choice';
-import { CHECK_IDS } from '../engine/report';
-import type { Check, CheckId, DataMark, Lane, Remedy, Verdict, VerdictReport } from '../engine/report';
-import type { Stage } from '../engine/types';
+import { CHECK_IDS } from '../engine';
+import type { Check, CheckId, DataMark, Lane, Remedy, Stage, Verdict, VerdictReport } from '../engine';
 import { FigureDto, VERDICTS } from './figure.dto';
 
 const nullableNumber = (description?: string) => ({ type: 'number', nullable: true, description }) as const;

@@ -1,6 +1,5 @@
 import { ApiProperty, ApiSchema } from '@nestjs/swagger';
-import type { CurveCase, Curves } from '../engine/report';
-import type { GbwCase } from '../engine/types';
+import type { CurveCase, Curves, GbwCase } from '../engine';
 
 const NULLABLE_NUMBERS = { type: 'array', items: { type: 'number', nullable: true } } as const;
 

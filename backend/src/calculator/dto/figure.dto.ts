@@ -1,6 +1,6 @@
 import { ApiProperty, ApiSchema } from '@nestjs/swagger';
 import { membersOf } from '../../common/fields/choice';
-import type { Figure, Money, Unit, Verdict } from '../engine/report';
+import type { Figure, Money, Unit, Verdict } from '../engine';
 
 export const VERDICTS = membersOf<Verdict>({ clear: true, tight: true, over: true, unknown: true });
 

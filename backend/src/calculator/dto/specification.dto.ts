@@ -13,7 +13,7 @@ import type {
   Specification,
   Supply,
   VoltageSource,
-} from '../engine/types';
+} from '../engine';
 
 @ApiSchema({ name: 'VoltageSource' })
 export class VoltageSourceDto implements VoltageSource {
@@ -58,7 +58,7 @@ export const SOURCE = declareUnion('Source', 'kind', { voltage: VoltageSourceDto
 
 @ApiSchema({ name: 'Load' })
 export class LoadDto implements Load {
-  @Quantity('positiveResistanceOhm', { nullable: true, optional: true, description: 'Null: open' })
+  @Quantity('positiveResistanceOhm', { nullable: true, description: 'Null: open' })
   readonly resistanceOhm: number | null;
 
   @Quantity('capacitanceF', { optional: true })

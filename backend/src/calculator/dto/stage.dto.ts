@@ -12,7 +12,7 @@ import type {
   RcSectionStage,
   VoltageFeedbackStage,
   VoltageFeedbackTopology,
-} from '../engine/types';
+} from '../engine';
 
 const named = (name: string): ChoiceOptions => ({ name });
 

@@ -1,6 +1,5 @@
 import { ApiProperty, ApiSchema } from '@nestjs/swagger';
-import type { Working, WorkingDatum, WorkingStep } from '../engine/report';
-import type { GbwCase } from '../engine/types';
+import type { GbwCase, Working, WorkingDatum, WorkingStep } from '../engine';
 
 @ApiSchema({ name: 'WorkingStep' })
 export class WorkingStepDto implements WorkingStep {

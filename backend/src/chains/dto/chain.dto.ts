@@ -1,6 +1,6 @@
 import { ApiProperty, ApiSchema, PartialType } from '@nestjs/swagger';
 import { SpecificationDto } from '../../calculator/dto/specification.dto';
-import type { Policy, Specification } from '../../calculator/engine/types';
+import type { Policy, Specification } from '../../calculator/engine';
 import { Nested } from '../../common/fields/nested';
 import { Quantity } from '../../common/fields/quantity';
 import { Text } from '../../common/fields/text';

@@ -1,7 +1,7 @@
 import { ApiProperty, ApiSchema, getSchemaPath } from '@nestjs/swagger';
 import { STAGE } from '../../calculator/dto/stage.dto';
 import type { StageDto } from '../../calculator/dto/stage.dto';
-import type { Stage } from '../../calculator/engine/types';
+import type { Stage } from '../../calculator/engine';
 import { NestedUnionList } from '../../common/fields/nested';
 import { Quantity } from '../../common/fields/quantity';
 import { Text, Uuid } from '../../common/fields/text';

@@ -1,6 +1,6 @@
 import { ApiProperty, ApiSchema } from '@nestjs/swagger';
 import { FigureDto, MoneyDto, VERDICTS } from '../../calculator/dto/figure.dto';
-import type { Verdict } from '../../calculator/engine/report';
+import type { Verdict } from '../../calculator/engine';
 
 /** What lists show of an option, computed from its stages as they are stored. */
 @ApiSchema({ name: 'OptionSummary' })

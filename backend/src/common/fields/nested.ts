@@ -17,7 +17,8 @@ const mustBeObject = rule('not_an_object', (value) => isAbsent(value) || isPlain
 export function Nested(type: () => Class<unknown>, options: FieldOptions = {}): PropertyDecorator {
   return applyDecorators(
     ApiProperty({
-      type,
+      // The generator knows a lazy type by the name that this property gives the function.
+      type: () => type(),
       required: !options.optional,
       ...(options.nullable ? { nullable: true } : {}),
       ...(options.description ? { description: options.description } : {}),
@@ -69,7 +70,7 @@ const listSchema = (options: ListOptions) => ({
 
 export function NestedList(type: () => Class<unknown>, options: ListOptions): PropertyDecorator {
   return applyDecorators(
-    ApiProperty({ type, isArray: true, ...listSchema(options) }),
+    ApiProperty({ type: () => type(), isArray: true, ...listSchema(options) }),
     ...listRules(options),
     ValidateNested({ each: true }),
     Type(type),

@@ -21,7 +21,6 @@ export function Quantity(name: LimitName, options: FieldOptions = {}): PropertyD
     }),
     ...presence(options),
     ...withinLimit(limit),
-    Transform(({ value }) => (Object.is(value, -0) ? 0 : value)),
   );
 }
 

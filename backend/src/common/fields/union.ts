@@ -22,9 +22,9 @@ export function declareUnion(name: string, property: string, shapes: Readonly<Re
   return union;
 }
 
-/** Makes the shapes of the unions known to the generator of openapi.json. */
-export function UsesUnions(...unions: readonly Union[]): ClassDecorator & MethodDecorator {
-  return ApiExtraModels(...unions.flatMap((union) => Object.values(union.shapes))) as ClassDecorator & MethodDecorator;
+/** Makes the shapes of the unions, and further shapes that are only referred to, known to the OpenAPI generator. */
+export function UsesUnions(unions: readonly Union[], others: readonly Class<unknown>[] = []): ClassDecorator {
+  return ApiExtraModels(...unions.flatMap((union) => Object.values(union.shapes)), ...others) as ClassDecorator;
 }
 
 /** Adds every declared union to the document as a schema of its own. */

@@ -1,9 +1,9 @@
 import { applyDecorators } from '@nestjs/common';
 import type { Type as Class } from '@nestjs/common';
 import { ApiProperty, ApiSchema, getSchemaPath } from '@nestjs/swagger';
-import { Transform, Type } from 'class-transformer';
+import { Type } from 'class-transformer';
 import { ValidateNested } from 'class-validator';
-import type { DatasheetValue } from '../../calculator/engine/types';
+import type { DatasheetValue } from '../../calculator/engine';
 import { isAbsent, presence, rule } from '../../common/fields/presence';
 import type { FieldOptions } from '../../common/fields/presence';
 import { limitSchema, withinLimit } from '../../common/fields/quantity';
@@ -50,12 +50,7 @@ function shapeFor(name: LimitName): Class<DatasheetValueDto> {
   if (known) return known;
   class LimitedValue extends DatasheetValueDto {}
   for (const column of COLUMNS) {
-    const decorators = [
-      ...presence({ optional: true }),
-      ...withinLimit(LIMITS[name]),
-      ...orderRules[column],
-      Transform(({ value }) => (Object.is(value, -0) ? 0 : value)),
-    ];
+    const decorators = [...presence({ optional: true }), ...withinLimit(LIMITS[name]), ...orderRules[column]];
     for (const decorator of decorators) decorator(LimitedValue.prototype, column);
   }
   shapes.set(name, LimitedValue);

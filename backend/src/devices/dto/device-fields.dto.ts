@@ -1,5 +1,5 @@
 import { ApiSchema } from '@nestjs/swagger';
-import type { DatasheetValue, Grade, Lifecycle } from '../../calculator/engine/types';
+import type { DatasheetValue, Grade, Lifecycle } from '../../calculator/engine';
 import { Choice } from '../../common/fields/choice';
 import { Quantity } from '../../common/fields/quantity';
 import { Text } from '../../common/fields/text';

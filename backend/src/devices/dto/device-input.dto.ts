@@ -1,5 +1,5 @@
 import { ApiSchema, IntersectionType } from '@nestjs/swagger';
-import type { CurrentFeedbackDevice, MatchedBlockDevice, VoltageFeedbackDevice } from '../../calculator/engine/types';
+import type { CurrentFeedbackDevice, MatchedBlockDevice, VoltageFeedbackDevice } from '../../calculator/engine';
 import { Flag } from '../../common/fields/choice';
 import { Nested } from '../../common/fields/nested';
 import { Text } from '../../common/fields/text';

@@ -1,5 +1,5 @@
 import { ApiProperty, ApiSchema, getSchemaPath } from '@nestjs/swagger';
-import type { DeviceKind, Grade, Lifecycle } from '../../calculator/engine/types';
+import type { DeviceKind, Grade, Lifecycle } from '../../calculator/engine';
 import { Choice, QueryFlag } from '../../common/fields/choice';
 import { QueryQuantity } from '../../common/fields/quantity';
 import { Text } from '../../common/fields/text';
@@ -24,7 +24,7 @@ export class DeviceQueryDto {
   @Choice(LIFECYCLES, { name: 'Lifecycle', optional: true })
   readonly lifecycle?: Lifecycle;
 
-  @QueryQuantity('gainBandwidthHz', 'Minimum GBW (typical where the datasheet gives no minimum) at least')
+  @QueryQuantity('gainBandwidthHz', 'Minimum GBW at least; 0.7 × typical where only that is given')
   readonly minimumGbwHz?: number;
 
   @QueryQuantity('unitPriceMicros', 'Lowest unit price of the quote at most')

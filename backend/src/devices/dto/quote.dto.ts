@@ -1,5 +1,5 @@
 import { ApiSchema } from '@nestjs/swagger';
-import type { PriceBreak, Quote } from '../../calculator/engine/types';
+import type { PriceBreak, Quote } from '../../calculator/engine';
 import { NestedList } from '../../common/fields/nested';
 import { rule } from '../../common/fields/presence';
 import { Quantity } from '../../common/fields/quantity';

@@ -1,5 +1,5 @@
 import { ApiSchema, PartialType } from '@nestjs/swagger';
-import type { GbwCase, Policy } from '../../calculator/engine/types';
+import type { GbwCase, Policy } from '../../calculator/engine';
 import { Choice } from '../../common/fields/choice';
 import { Quantity } from '../../common/fields/quantity';
 

@@ -1,5 +1,5 @@
 import { ApiProperty, ApiSchema } from '@nestjs/swagger';
-import type { Policy } from '../../calculator/engine/types';
+import type { Policy } from '../../calculator/engine';
 import { PolicyDto } from './policy.dto';
 
 @ApiSchema({ name: 'ProjectMember' })
