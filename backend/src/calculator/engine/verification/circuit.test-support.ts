@@ -5,7 +5,6 @@ import {
   RightSide,
   add,
   complex,
-  magnitudeSquared,
   reciprocal,
   scale,
 } from './complex-matrix.test-support';
@@ -48,13 +47,14 @@ export type Injection =
  * impedance and an EMF, which get a row for their current so that 0 Ω is exact.
  */
 export class Circuit {
-  private nodes = 1;
+  /** Node voltages and branch currents in the order in which they are drawn: a chain gives a narrow band matrix. */
+  private unknowns = 0;
   private readonly admittances: { a: number; b: number; value: Complex }[] = [];
-  private readonly branches: Branch[] = [];
+  private readonly branches = new Map<number, Branch>();
   readonly noise: NoiseGenerator[] = [];
 
   node(): number {
-    return this.nodes++;
+    return ++this.unknowns;
   }
 
   admittance(a: number, b: number, value: Complex): void {
@@ -68,8 +68,9 @@ export class Circuit {
   /** V(from) − V(to) = Z·I + EMF + Σ gain·V(node) + Σ gain·I(branch); I flows into the branch at `from`. */
   branch(from: number, to: number, impedance: Complex, extra: Partial<Branch> = {}): number {
     const plain = { controls: [], currentControls: [], drawsFrom: true, open: false };
-    this.branches.push({ from, to, impedance, ...plain, ...extra });
-    return this.branches.length - 1;
+    const id = ++this.unknowns;
+    this.branches.set(id, { from, to, impedance, ...plain, ...extra });
+    return id;
   }
 
   /** Sets the controlled part of a branch to zero: the loop is opened there. */
@@ -82,47 +83,42 @@ export class Circuit {
     return this.withBranch(branch, { open: true });
   }
 
+  solver(): Solver {
+    const matrix = new ComplexMatrix(this.unknowns);
+    for (const { a, b, value } of this.admittances) stampAdmittance(matrix, a, b, value);
+    for (const [id, branch] of this.branches) stampBranch(matrix, branch, id - 1);
+    return new Solver(new Factorisation(matrix));
+  }
+
   private withBranch(branch: number, change: Partial<Branch>): Circuit {
     const copy = new Circuit();
-    copy.nodes = this.nodes;
+    copy.unknowns = this.unknowns;
     copy.admittances.push(...this.admittances);
-    copy.branches.push(...this.branches);
-    copy.branches[branch] = { ...this.branches[branch], ...change };
+    for (const [id, drawn] of this.branches) copy.branches.set(id, id === branch ? { ...drawn, ...change } : drawn);
     copy.noise.push(...this.noise);
     return copy;
   }
+}
 
-  solver(): Solver {
-    const matrix = new ComplexMatrix(this.nodes - 1 + this.branches.length);
-    for (const { a, b, value } of this.admittances) stampAdmittance(matrix, a, b, value);
-    this.branches.forEach((branch, index) => this.stampBranch(matrix, branch, this.rowOf(index)));
-    return new Solver(new Factorisation(matrix), (index) => this.rowOf(index));
+function stampBranch(matrix: ComplexMatrix, branch: Branch, row: number): void {
+  const one = complex(1);
+  if (branch.open) {
+    matrix.add(row, row, one);
+    return;
   }
-
-  private rowOf(branch: number): number {
-    return this.nodes - 1 + branch;
+  if (branch.from !== GROUND) {
+    matrix.add(row, branch.from - 1, one);
+    if (branch.drawsFrom) matrix.add(branch.from - 1, row, one);
   }
-
-  private stampBranch(matrix: ComplexMatrix, branch: Branch, row: number): void {
-    const one = complex(1);
-    if (branch.open) {
-      matrix.add(row, row, one);
-      return;
-    }
-    if (branch.from !== GROUND) {
-      matrix.add(row, branch.from - 1, one);
-      if (branch.drawsFrom) matrix.add(branch.from - 1, row, one);
-    }
-    if (branch.to !== GROUND) {
-      matrix.add(row, branch.to - 1, complex(-1));
-      matrix.add(branch.to - 1, row, complex(-1));
-    }
-    matrix.add(row, row, scale(branch.impedance, -1));
-    for (const { node, gain } of branch.controls) {
-      if (node !== GROUND) matrix.add(row, node - 1, scale(gain, -1));
-    }
-    for (const { branch: other, gain } of branch.currentControls) matrix.add(row, this.rowOf(other), scale(gain, -1));
+  if (branch.to !== GROUND) {
+    matrix.add(row, branch.to - 1, complex(-1));
+    matrix.add(branch.to - 1, row, complex(-1));
   }
+  matrix.add(row, row, scale(branch.impedance, -1));
+  for (const { node, gain } of branch.controls) {
+    if (node !== GROUND) matrix.add(row, node - 1, scale(gain, -1));
+  }
+  for (const { branch: other, gain } of branch.currentControls) matrix.add(row, other - 1, scale(gain, -1));
 }
 
 function stampAdmittance(matrix: ComplexMatrix, a: number, b: number, value: Complex): void {
@@ -134,45 +130,31 @@ function stampAdmittance(matrix: ComplexMatrix, a: number, b: number, value: Com
 }
 
 export class Solution {
-  constructor(
-    private readonly values: readonly Complex[],
-    private readonly rowOf: (branch: number) => number,
-  ) {}
+  constructor(private readonly values: readonly Complex[]) {}
 
   voltage(node: number): Complex {
     return node === GROUND ? complex(0) : this.values[node - 1];
   }
 
   current(branch: number): Complex {
-    return this.values[this.rowOf(branch)];
+    return this.values[branch - 1];
   }
 }
 
 export class Solver {
-  constructor(
-    private readonly factorisation: Factorisation,
-    private readonly rowOf: (branch: number) => number,
-  ) {}
+  constructor(private readonly factorisation: Factorisation) {}
 
   solve(injection: Injection): Solution {
-    return new Solution(this.factorisation.solve(this.rightSide(injection)), this.rowOf);
+    return new Solution(this.factorisation.solve(rightSide(injection)));
   }
+}
 
-  /** Σ |transfer|²·density at a node over the generators that pass the filter. */
-  noiseAt(node: number, generators: readonly NoiseGenerator[]): number {
-    return generators.reduce(
-      (sum, generator) => sum + magnitudeSquared(this.solve(generator.injection).voltage(node)) * generator.density,
-      0,
-    );
-  }
-
-  private rightSide(injection: Injection): RightSide[] {
-    if (injection.kind === 'emf') return [{ row: this.rowOf(injection.branch), value: injection.factor }];
-    const entries: RightSide[] = [];
-    if (injection.from !== GROUND) entries.push({ row: injection.from - 1, value: complex(-1) });
-    if (injection.to !== GROUND) entries.push({ row: injection.to - 1, value: complex(1) });
-    return entries;
-  }
+function rightSide(injection: Injection): RightSide[] {
+  if (injection.kind === 'emf') return [{ row: injection.branch - 1, value: injection.factor }];
+  const entries: RightSide[] = [];
+  if (injection.from !== GROUND) entries.push({ row: injection.from - 1, value: complex(-1) });
+  if (injection.to !== GROUND) entries.push({ row: injection.to - 1, value: complex(1) });
+  return entries;
 }
 
 /** R ∥ C; 0 Ω stays 0 Ω. */

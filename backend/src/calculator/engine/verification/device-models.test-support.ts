@@ -61,7 +61,19 @@ function bandwidth(value: DatasheetValue, gbwCase: GbwCase, policy: Policy): num
   return gbwCase === 'minimum' ? minimum : minimum * policy.temperatureFactor;
 }
 
+const known = new WeakMap<Device, Map<string, DeviceModel>>();
+
+/** Remembered by device: a current-feedback device is a search of its own. */
 export function deviceModel(device: Device, gbwCase: GbwCase, policy: Policy): DeviceModel {
+  const key = `${gbwCase} ${policy.gbwDerating} ${policy.temperatureFactor}`;
+  const models = known.get(device) ?? new Map<string, DeviceModel>();
+  known.set(device, models);
+  const model = models.get(key) ?? resolveModel(device, gbwCase, policy);
+  models.set(key, model);
+  return model;
+}
+
+function resolveModel(device: Device, gbwCase: GbwCase, policy: Policy): DeviceModel {
   if (device.kind === 'voltage-feedback') return voltageFeedbackModel(device, gbwCase, policy);
   if (device.kind === 'current-feedback') return currentFeedbackModel(device, gbwCase, policy);
   return blockModel(device, gbwCase, policy);

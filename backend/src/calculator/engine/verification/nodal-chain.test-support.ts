@@ -1,7 +1,24 @@
 import type { ChainInput, GbwCase } from '../types';
 import { ChainCircuit, ChainContext, chainCircuit, chainContext, wholeChain } from './chain-circuit.test-support';
 import { GROUND, NoiseGenerator, Solution, Solver } from './circuit.test-support';
-import { Complex, complex, divide, magnitudeSquared, scale, subtract } from './complex-matrix.test-support';
+import {
+  Complex,
+  SingularCircuit,
+  complex,
+  divide,
+  magnitudeSquared,
+  scale,
+  subtract,
+} from './complex-matrix.test-support';
+
+export interface NodalPort {
+  readonly openCircuit: Complex;
+  readonly impedance: Complex;
+  /** Added by all stages up to here. */
+  readonly noiseV2PerHz: number;
+  /** Of each generator of this stage. */
+  readonly ownNoiseV2PerHz: readonly number[];
+}
 
 /** What a nodal solution of the whole chain says at one frequency; the counterpart of the calculator's probe. */
 export class NodalChain {
@@ -35,15 +52,20 @@ export class NodalChain {
     return this.signal.voltage(this.whole.nodes[k + 1]);
   }
 
-  /** Open-circuit voltage behind stage k, and the impedance there, with everything behind cut off. */
-  port(k: number): { readonly openCircuit: Complex; readonly impedance: Complex; readonly noiseV2PerHz: number } {
+  /** Open-circuit voltage, impedance and noise behind stage k with everything that follows cut off. */
+  port(k: number): NodalPort {
     const cut = chainCircuit(this.context, { first: 0, last: k, withSource: true, withLoad: false });
     const solver = cut.circuit.solver();
     const out = cut.nodes[k + 1];
+    const density = (generator: NoiseGenerator): number =>
+      magnitudeSquared(solver.solve(generator.injection).voltage(out)) * generator.density;
+    const noise = cut.circuit.noise.map((generator) => ({ ...generator, v2PerHz: density(generator) }));
+    const { id } = this.context.input.stages[k];
     return {
       openCircuit: solver.solve(cut.sourceEmf!).voltage(out),
       impedance: solver.solve({ kind: 'current', from: GROUND, to: out }).voltage(out),
-      noiseV2PerHz: solver.noiseAt(out, cut.circuit.noise),
+      noiseV2PerHz: noise.reduce((sum, { v2PerHz }) => sum + v2PerHz, 0),
+      ownNoiseV2PerHz: noise.filter(({ owner }) => owner === id).map(({ v2PerHz }) => v2PerHz),
     };
   }
 
@@ -51,7 +73,13 @@ export class NodalChain {
   inputImpedance(k: number): Complex {
     const cut = chainCircuit(this.context, { first: k, last: this.last, withSource: false, withLoad: true });
     const node = cut.nodes[k];
-    return cut.circuit.solver().solve({ kind: 'current', from: GROUND, to: node }).voltage(node);
+    try {
+      return cut.circuit.solver().solve({ kind: 'current', from: GROUND, to: node }).voltage(node);
+    } catch (error) {
+      // An input without any path to ground: no current can flow into it.
+      if (error instanceof SingularCircuit) return complex(Infinity);
+      throw error;
+    }
   }
 
   /** Return ratio of the amplifier's controlled source in the complete chain; null for stages without a loop. */
@@ -70,24 +98,11 @@ export class NodalChain {
     return divide(complex(1), driven.voltage(amplifier.inverting));
   }
 
-  generators(k: number): readonly NoiseGenerator[] {
-    const { id } = this.context.input.stages[k];
-    return this.whole.circuit.noise.filter((generator) => generator.owner === id);
-  }
-
-  /** Noise that stage k adds, at the load, V²/Hz. */
-  stageNoiseAtLoad(k: number): number {
-    return this.solver.noiseAt(this.loadNode, this.generators(k));
-  }
-
-  /** |V_load / generator|² of one generator. */
-  noiseTransferSquared(generator: NoiseGenerator): number {
-    return magnitudeSquared(this.solver.solve(generator.injection).voltage(this.loadNode));
-  }
-
   /** Noise of all stages at the load, V²/Hz. */
   noiseAtLoad(): number {
-    return this.solver.noiseAt(this.loadNode, this.whole.circuit.noise);
+    const power = ({ injection, density }: NoiseGenerator): number =>
+      magnitudeSquared(this.solver.solve(injection).voltage(this.loadNode)) * density;
+    return this.whole.circuit.noise.reduce((sum, generator) => sum + power(generator), 0);
   }
 }
 
