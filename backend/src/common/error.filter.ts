@@ -7,8 +7,8 @@ import { currentRequestId } from './request-context';
 const INTERNAL = new AppError(500, 'internal', 'Something went wrong on the server. It has been logged.');
 
 function fromUniqueConstraint(error: UniqueConstraintError): ConflictError {
-  const fieldErrors = Object.keys(error.fields ?? {}).map((column) => ({
-    path: column.replace(/_([a-z])/g, (_match, letter: string) => letter.toUpperCase()),
+  const fieldErrors = error.errors.map(({ path }) => ({
+    path: (path ?? '').replace(/_([a-z])/g, (_match, letter: string) => letter.toUpperCase()),
     code: 'already_exists',
     message: 'This is taken already.',
   }));
@@ -33,7 +33,8 @@ function isClientError(error: unknown): boolean {
 /** What the client is told about anything that was thrown. */
 export function toAppError(error: unknown): AppError {
   if (error instanceof AppError) return error;
-  if (error instanceof UniqueConstraintError) return fromUniqueConstraint(error);
+  // Sequelize takes every SQLITE_CONSTRAINT for a broken UNIQUE; a CHECK or NOT NULL is our own mistake.
+  if (error instanceof UniqueConstraintError && /UNIQUE/.test(error.parent.message)) return fromUniqueConstraint(error);
   if (error instanceof ForeignKeyConstraintError) {
     return new ConflictError('in_use', 'Something else still depends on this, or what it refers to is gone.');
   }

@@ -7,7 +7,9 @@ import { canManageUsers, canSeeEmail } from './user.policy';
 export function presentUser(user: User, actor: SessionUser): UserDto {
   const { id, name, roles, active, version } = user;
   const shared = { id, name, roles, active, version, can: { edit: canManageUsers(actor) } };
-  return canSeeEmail(actor) ? { ...shared, email: user.email, hasPassword: user.passwordHash !== null } : shared;
+  return canSeeEmail(actor)
+    ? { ...shared, email: user.email, hasPassword: typeof user.passwordHash === 'string' }
+    : shared;
 }
 
 /** What goes on record about a person. */

@@ -105,7 +105,7 @@ export class UsersService {
   /** At least one active administrator who can sign in must remain, or nobody could ever let people in again. */
   private async assertAdminLeft(transaction: Transaction): Promise<void> {
     const active = await this.users.findAll({ where: { active: true }, transaction });
-    const canSignIn = (user: User) => user.passwordHash !== null || user.isDemo;
+    const canSignIn = (user: User) => typeof user.passwordHash === 'string' || user.isDemo;
     if (!active.some((user) => user.roles.includes('admin') && canSignIn(user))) {
       throw new ConflictError('last_admin', 'This is the last active administrator; make somebody else one first.');
     }
