@@ -58,7 +58,7 @@ export function buildProjectRow(changes: Partial<ProjectRow> = {}): ProjectRow {
     currency: 'USD',
     buildQuantity: 250,
     updatedAt: '2026-01-05T10:00:00.000Z',
-    can: { edit: true },
+    can: { edit: true, setPolicy: false, createChain: true, delete: false },
     ...changes,
   };
 }
