@@ -53,7 +53,7 @@ function matchesLock() {
   const have = readJson(installed).packages;
   return Object.entries(readJson(fromRoot('package-lock.json')).packages).every(
     ([path, wanted]) =>
-      !path.startsWith('node_modules/') || wanted.optional || wanted.link || have[path]?.version === wanted.version,
+      !path.includes('node_modules/') || wanted.optional || wanted.link || have[path]?.version === wanted.version,
   );
 }
 

@@ -9,7 +9,11 @@ import { readReport } from './reports.mjs';
 
 const MINUTE_MS = 60_000;
 export const reportFolder = fromRoot('.cache/reports');
-const bin = (name) => fromRoot('node_modules', name);
+
+/** npm puts a package into a workspace's own folder where another version stands at the root. */
+const bin = (name) =>
+  ['frontend', 'backend', 'e2e'].map((workspace) => fromRoot(workspace, 'node_modules', name)).find(existsSync) ??
+  fromRoot('node_modules', name);
 
 export function emptyReports() {
   rmSync(reportFolder, { recursive: true, force: true });
