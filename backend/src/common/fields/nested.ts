@@ -57,7 +57,8 @@ function listLengthRules(options: ListOptions): PropertyDecorator[] {
 function listRules(options: ListOptions): PropertyDecorator[] {
   return [
     ...listLengthRules(options),
-    rule('not_an_object', (value) => !Array.isArray(value) || value.every(isPlainObject), 'must be a list of objects'),
+    // What is no object at all is named by its index below; a list in the list would pass there.
+    rule('not_an_object', (value) => !Array.isArray(value) || !value.some(Array.isArray), 'must be a list of objects'),
   ];
 }
 

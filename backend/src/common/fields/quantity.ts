@@ -55,6 +55,13 @@ export function withinLimit(limit: Limit): PropertyDecorator[] {
 export function QueryQuantity(name: LimitName, description?: string): PropertyDecorator {
   return applyDecorators(
     Quantity(name, { optional: true, description }),
-    Transform(({ value }) => (typeof value === 'string' && value.trim() !== '' ? Number(value) : value)),
+    Transform(({ value }) => numberOf(value)),
   );
+}
+
+/** The number that a query string writes; anything else stays as it is and is refused as no number. */
+export function numberOf(text: unknown): unknown {
+  if (typeof text !== 'string' || text.trim() === '') return text;
+  const value = Number(text);
+  return Number.isNaN(value) ? text : value;
 }
