@@ -4,13 +4,18 @@ import { checkFolders, checkNode, install } from './lib/prepare.mjs';
 import { killAll } from './lib/process.mjs';
 
 const MESSAGE_LINES = 30;
+/** Frames of a stack that lie in other people's code. */
+const FOREIGN_FRAME = /^\s+at .*(node_modules|node:internal)/;
 const AT_ONCE = 2;
 const say = (text) => console.log(`Bandledger: ${text} …`);
 const startedAt = Date.now();
 const elapsed = () => `${((Date.now() - startedAt) / 1000).toFixed(0).padStart(4)} s`;
 
 function show({ title, message }) {
-  const lines = message.trimEnd().split('\n');
+  const lines = message
+    .trimEnd()
+    .split('\n')
+    .filter((text) => !FOREIGN_FRAME.test(text));
   const rest = lines.length - MESSAGE_LINES;
   console.log(`\n  ✗ ${title}`);
   for (const line of lines.slice(0, MESSAGE_LINES)) console.log(`    ${line}`);
