@@ -1,6 +1,7 @@
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import session from 'express-session';
 import { refuseForeignHost } from './common/demo-host';
+import { errorMiddleware } from './common/error.filter';
 import { bodyErrors, jsonBody } from './common/json-body';
 import { requestContextMiddleware } from './common/request-context';
 import { securityHeaders } from './common/security-headers';
@@ -21,7 +22,7 @@ export function configureApp(app: NestExpressApplication): void {
   app.setGlobalPrefix('api');
   app.use(requestContextMiddleware, securityHeaders(config.publicUrl));
   if (runtime.demo) app.use(refuseForeignHost);
-  app.use(...staticFrontend(config.frontendDir));
+  app.use(...staticFrontend(config.frontendDir), errorMiddleware);
   const https = config.publicUrl.startsWith('https:');
   app.use(
     '/api',

@@ -20,13 +20,14 @@ function explainListenError(error: NodeJS.ErrnoException, { host, port }: AppCon
   return error;
 }
 
+/** On the socket itself: Nest's own listen would log the error a second time, in its own words. */
 async function listen({ app }: BootedApp, config: AppConfig): Promise<number> {
-  try {
-    await app.listen(config.port, config.host);
-  } catch (error) {
-    throw explainListenError(error as NodeJS.ErrnoException, config);
-  }
-  return ((app.getHttpServer() as Server).address() as AddressInfo).port;
+  const server = app.getHttpServer() as Server;
+  await new Promise<void>((resolve, reject) => {
+    server.once('error', (error) => reject(explainListenError(error, config)));
+    server.listen(config.port, config.host, resolve);
+  });
+  return (server.address() as AddressInfo).port;
 }
 
 function stopOnSignal(booted: BootedApp): void {

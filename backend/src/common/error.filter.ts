@@ -1,5 +1,5 @@
 import { type ArgumentsHost, Catch, type ExceptionFilter, HttpException, Logger } from '@nestjs/common';
-import type { Response } from 'express';
+import type { ErrorRequestHandler, Response } from 'express';
 import { ForeignKeyConstraintError, UniqueConstraintError } from 'sequelize';
 import { AppError, ConflictError, NotFoundError, UnauthenticatedError, UnreadableError } from './errors';
 import { currentRequestId } from './request-context';
@@ -42,26 +42,35 @@ export function toAppError(error: unknown): AppError {
   return isClientError(error) ? new UnreadableError('The request could not be read.') : INTERNAL;
 }
 
+const logger = new Logger('Error');
+
 /** The one place where an error becomes an answer: `{ code, message, fieldErrors?, requestId }`. */
+export function sendError(error: unknown, response: Response): void {
+  const answer = toAppError(error);
+  const requestId = currentRequestId() ?? String(response.getHeader('X-Request-Id') ?? '');
+  if (answer.status >= 500) {
+    logger.error(`request ${requestId}: ${error instanceof Error ? error.stack : String(error)}`);
+  }
+  if (response.headersSent) {
+    response.end();
+    return;
+  }
+  if (answer.details.retryAfterSeconds !== undefined) {
+    response.setHeader('Retry-After', String(answer.details.retryAfterSeconds));
+  }
+  response.setHeader('Cache-Control', 'no-store');
+  response.status(answer.status).json({ code: answer.code, message: answer.message, ...answer.details, requestId });
+}
+
+/** For what happens inside Nest: guards, pipes, controllers, routes that do not exist. */
 @Catch()
 export class ErrorFilter implements ExceptionFilter {
-  private readonly logger = new Logger('Error');
-
   catch(error: unknown, host: ArgumentsHost): void {
-    const response = host.switchToHttp().getResponse<Response>();
-    const answer = toAppError(error);
-    const requestId = currentRequestId() ?? String(response.getHeader('X-Request-Id') ?? '');
-    if (answer.status >= 500) {
-      this.logger.error(`request ${requestId}: ${error instanceof Error ? error.stack : String(error)}`);
-    }
-    if (response.headersSent) {
-      response.end();
-      return;
-    }
-    if (answer.details.retryAfterSeconds !== undefined) {
-      response.setHeader('Retry-After', String(answer.details.retryAfterSeconds));
-    }
-    response.setHeader('Cache-Control', 'no-store');
-    response.status(answer.status).json({ code: answer.code, message: answer.message, ...answer.details, requestId });
+    sendError(error, host.switchToHttp().getResponse<Response>());
   }
 }
+
+/** For what happens before Nest; Express by itself would answer with a page that shows the stack. */
+export const errorMiddleware: ErrorRequestHandler = (error: unknown, _request, response, _next) => {
+  sendError(error, response);
+};

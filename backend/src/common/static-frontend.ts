@@ -1,5 +1,6 @@
 import { existsSync } from 'node:fs';
 import path from 'node:path';
+import { NotFoundError } from './errors';
 import express, { type RequestHandler, type Response } from 'express';
 
 const HASHED_ASSET = /[\\/]assets[\\/]/;
@@ -8,9 +9,12 @@ function setCaching(response: Response, file: string): void {
   response.setHeader('Cache-Control', HASHED_ASSET.test(file) ? 'public, max-age=31536000, immutable' : 'no-cache');
 }
 
+function isApi(requestPath: string): boolean {
+  return requestPath === '/api' || requestPath.startsWith('/api/');
+}
+
 function wantsPage(method: string, requestPath: string, acceptsHtml: boolean): boolean {
-  const isApi = requestPath === '/api' || requestPath.startsWith('/api/');
-  return (method === 'GET' || method === 'HEAD') && acceptsHtml && !isApi && path.extname(requestPath) === '';
+  return (method === 'GET' || method === 'HEAD') && acceptsHtml && !path.basename(requestPath).includes('.');
 }
 
 /** The built frontend: its files, and its one page for every address that belongs to the router in the browser. */
@@ -18,8 +22,10 @@ export function staticFrontend(frontendDir: string): RequestHandler[] {
   const page = path.join(frontendDir, 'index.html');
   const files = express.static(frontendDir, { index: false, redirect: false, setHeaders: setCaching });
   const fallback: RequestHandler = (request, response, next) => {
-    if (!wantsPage(request.method, request.path, request.accepts('html') === 'html')) {
+    if (isApi(request.path)) {
       next();
+    } else if (!wantsPage(request.method, request.path, request.accepts('html') === 'html')) {
+      next(new NotFoundError());
     } else if (existsSync(page)) {
       response.sendFile(page, { headers: { 'Cache-Control': 'no-cache' }, cacheControl: false });
     } else {
