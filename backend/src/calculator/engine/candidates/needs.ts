@@ -1,4 +1,4 @@
-import type { StageNeed } from '../report';
+import type { StageNeed, Unit } from '../report';
 import { gbwUsed } from '../report/derived';
 import { isFeedbackStage } from '../report/facts';
 import type { ChainFacts, StageFacts } from '../report/facts';
@@ -6,7 +6,6 @@ import { figure } from '../report/figures';
 import { dbToRatio } from '../report/maybe';
 import { atLeastText, atMostText, noiseGainText, roundAway } from '../text/phrases';
 import { decimalAmount, typed } from '../text/si-format';
-import type { Unit } from '../report';
 
 /**
  * "What passes here": what any device in this place must bring, so that every check of the stage is clear and the chain

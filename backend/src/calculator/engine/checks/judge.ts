@@ -13,14 +13,8 @@ import {
 import { feedbackResistorCheck } from './current-feedback-check';
 import { chainLowerCornerCheck, flatnessCheck, gainCheck, upperCornerCheck } from './gain-checks';
 import { gbwCheck } from './gbw-check';
-import {
-  compressionCheck,
-  loopGainCheck,
-  outputCurrentCheck,
-  slewCheck,
-  supplyVoltageCheck,
-  swingCheck,
-} from './level-checks';
+import { compressionCheck, supplyVoltageCheck } from './device-limit-checks';
+import { loopGainCheck, outputCurrentCheck, slewCheck, swingCheck } from './level-checks';
 import { stabilityCheck } from './stability-check';
 import { worstVerdict } from './verdict-order';
 

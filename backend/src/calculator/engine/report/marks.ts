@@ -23,20 +23,22 @@ export function stageMarks(facts: ChainFacts, stage: StageFacts): readonly DataM
 }
 
 function assumedMarks(stage: StageFacts, device: Device): readonly DataMark[] {
-  const missing: string[] = [];
-  if (device.kind === 'voltage-feedback') {
-    if (!device.openLoopGainDb) missing.push('open-loop gain (120 dB)');
-    if (!device.differentialCapacitanceF) missing.push('differential input capacitance (0)');
-  }
-  if (device.kind !== 'matched-block') {
-    if (!device.outputResistanceOhm) missing.push('output resistance (0)');
-    if (!device.inputResistanceOhm) missing.push('input resistance (infinite)');
-    if (!device.commonModeCapacitanceF) missing.push('input capacitance (0)');
-  }
-  if (stage.stability && stage.stability.secondPoleText !== null && stage.stability.secondPoleHz === null) {
-    missing.push('second pole (none, phase margin of 90° or more)');
-  }
+  if (device.kind === 'matched-block') return [];
+  const isVoltageFeedback = device.kind === 'voltage-feedback';
+  const silent: readonly (readonly [boolean, string])[] = [
+    [isVoltageFeedback && !device.openLoopGainDb, 'open-loop gain 120 dB'],
+    [isVoltageFeedback && !device.differentialCapacitanceF, 'no differential input capacitance'],
+    [!device.outputResistanceOhm, 'no output resistance'],
+    [!device.inputResistanceOhm, 'infinite input resistance'],
+    [!device.commonModeCapacitanceF, 'no input capacitance'],
+    [hasUnlimitedSecondPole(stage), 'no second pole (phase margin of 90° or more)'],
+  ];
+  const missing = silent.filter(([isSilent]) => isSilent).map(([, text]) => text);
   return missing.length === 0 ? [] : [{ kind: 'assumed', text: `Assumed: ${missing.join(', ')}.` }];
+}
+
+function hasUnlimitedSecondPole(stage: StageFacts): boolean {
+  return stage.stability !== null && stage.stability.secondPoleText !== null && stage.stability.secondPoleHz === null;
 }
 
 function onlyTypical(value: DatasheetValue | undefined): boolean {

@@ -46,18 +46,23 @@ function mayPass(trials: Trials, stage: StageFacts, device: Device): boolean {
   return have >= used * facts.policy.headroomTarget * PREFILTER_SHARE && !tooUnstable;
 }
 
-/**
- * The cheapest of the given devices that is clear in this very stage, the whole chain re-evaluated; else the cheapest that
- * is tight where the present one is over.
- */
-export function deviceRemedy(trials: Trials, stage: StageFacts, checkId: CheckId): Remedy | null {
+/** Devices of the kind that fits, without the present one, cheapest first; those without a price last. */
+export function devicesByPrice(trials: Trials, stage: StageFacts): readonly Device[] {
   const { input } = trials.before.facts;
-  const priced = input.devices
+  return input.devices
     .filter((device) => device.id !== stage.device?.id && withDevice(stage.stage, device) !== null)
-    .filter((device) => mayPass(trials, stage, device))
     .map((device) => ({ device, price: priceInPlace(input, stage.stage, device) ?? Number.POSITIVE_INFINITY }))
-    .sort((a, b) => a.price - b.price || a.device.partNumber.localeCompare(b.device.partNumber, 'en'));
-  for (const { device } of priced.slice(0, MOST_DEVICES)) {
+    .sort(
+      (a, b) =>
+        (a.price === b.price ? 0 : a.price - b.price) || a.device.partNumber.localeCompare(b.device.partNumber, 'en'),
+    )
+    .map(({ device }) => device);
+}
+
+/** The cheapest of the given devices that is clear in this very stage, the whole chain re-evaluated. */
+export function deviceRemedy(trials: Trials, stage: StageFacts, checkId: CheckId): Remedy | null {
+  const promising = devicesByPrice(trials, stage).filter((device) => mayPass(trials, stage, device));
+  for (const device of promising.slice(0, MOST_DEVICES)) {
     const replacement = withDevice(stage.stage, device);
     const trial = replacement && trials.replace(stage.index, [replacement]);
     if (trial && trialVerdict(trial) === 'clear') return remedyOf(trial, device, checkId);

@@ -1,7 +1,7 @@
 import type { Remedy } from '../../report';
 import { gbwUsed, worstHeadroom, worstNoiseGain } from '../../report/derived';
 import { partName } from '../../report/facts';
-import type { StageFacts } from '../../report/facts';
+import type { ChainFacts, StageFacts } from '../../report/facts';
 import { atLeastText, gainText, ratioText, roundAway, targetText, valueText } from '../../text/phrases';
 import { asNonInverting, isRatioStage, resistorGain, splitInTwo, withGain } from './replacement-stages';
 import { consequenceText, priceDifferenceText, trialStages, trialVerdict } from './trials';
@@ -64,29 +64,37 @@ function splitRemedy(trials: Trials, stage: StageFacts): Remedy | null {
   return { sentence, verdict: trialVerdict(trial), action: 'Split in two', stages: pair };
 }
 
-/** The largest gain with which this device still meets the headroom target here. */
+/** The largest gain with which this device still meets the headroom target here: scaled, evaluated, corrected. */
 function lessGainRemedy(trials: Trials, stage: StageFacts): Remedy | null {
-  const { facts } = trials.before;
   if (!isRatioStage(stage.stage)) return null;
-  const target = facts.policy.headroomTarget;
-  let noiseGain = worstNoiseGain(facts, stage).value ?? 0;
-  let headroom = worstHeadroom(facts, stage).headroom.value ?? 0;
-  let feedbackOhm = stage.stage.feedbackOhm;
+  const target = trials.before.facts.policy.headroomTarget;
+  let feedbackOhm: number = stage.stage.feedbackOhm;
+  let spent: Spent = spentBy(trials.before.facts, stage);
   for (let step = 0; step < MOST_GAIN_STEPS; step += 1) {
-    const wanted = (noiseGain * headroom) / target;
-    if (wanted <= 1 || noiseGain <= 1) return null;
-    feedbackOhm *= (wanted - 1) / (noiseGain - 1);
+    const wanted = (spent.noiseGain * spent.headroom) / target;
+    if (wanted <= 1 || spent.noiseGain <= 1) return null;
+    feedbackOhm *= (wanted - 1) / (spent.noiseGain - 1);
     const magnitude = roundAway(Math.abs(resistorGain({ ...stage.stage, feedbackOhm })), Math.floor);
     const replacement = withGain(stage.stage, magnitude);
     const trial = replacement && trials.replace(stage.index, [replacement]);
     if (!trial || !replacement) return null;
-    const after = trialStages(trial)[0];
-    headroom = headroomOf(trial, after);
-    if (headroom >= target) return lessGain(trial, magnitude, stage);
-    noiseGain = worstNoiseGain(trial.after.facts, after).value ?? 0;
-    feedbackOhm = replacement.kind === 'voltage-feedback' ? replacement.feedbackOhm : feedbackOhm;
+    feedbackOhm = replacement.feedbackOhm;
+    spent = spentBy(trial.after.facts, trialStages(trial)[0]);
+    if (spent.headroom >= target) return lessGain(trial, magnitude, stage);
   }
   return null;
+}
+
+interface Spent {
+  readonly noiseGain: number;
+  readonly headroom: number;
+}
+
+function spentBy(facts: ChainFacts, stage: StageFacts): Spent {
+  return {
+    noiseGain: worstNoiseGain(facts, stage).value ?? 0,
+    headroom: worstHeadroom(facts, stage).headroom.value ?? 0,
+  };
 }
 
 function lessGain(trial: Trial, magnitude: number, stage: StageFacts): Remedy | null {

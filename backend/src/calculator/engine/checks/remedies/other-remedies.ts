@@ -8,7 +8,7 @@ import { atLeastText, atMostText, noiseGainText, setFrequency, targetText, value
 import { typed } from '../../text/si-format';
 import { nearestPreferred } from '../../preferred-values';
 import { consequenceText, trialStages, trialVerdict } from './trials';
-import type { Trials } from './trials';
+import type { Trial, Trials } from './trials';
 
 const ISOLATION_OHM: readonly number[] = [10, 22, 47, 100];
 
@@ -61,14 +61,18 @@ function isolationRemedy(trials: Trials, stage: StageFacts): Remedy | null {
   if (!isFeedbackStage(set) || stage.stability?.loadCapacitive !== true || (set.isolationOhm ?? 0) > 0) return null;
   for (const isolationOhm of ISOLATION_OHM) {
     const trial = trials.replace(stage.index, [{ ...set, isolationOhm }]);
-    if (!trial) return null;
-    const margin = worsePoint(trialStages(trial)[0])?.phaseMarginDeg ?? null;
-    if (trialVerdict(trial) !== 'clear' || margin === null) continue;
-    const value = typed(isolationOhm, 'Ω');
-    const sentence = `${value} in series with its output would bring the phase margin to ${valueText(margin, 'deg')}.${consequenceText(trial)}`;
-    return { sentence, verdict: 'clear', action: `Add ${value} isolation`, stages: trial.stages };
+    const remedy = trial && isolationResult(trial, isolationOhm);
+    if (remedy) return remedy;
   }
   return null;
+}
+
+function isolationResult(trial: Trial, isolationOhm: number): Remedy | null {
+  const margin = worsePoint(trialStages(trial)[0])?.phaseMarginDeg ?? null;
+  if (trialVerdict(trial) !== 'clear' || margin === null) return null;
+  const value = typed(isolationOhm, 'Ω');
+  const sentence = `${value} in series with its output would bring the phase margin to ${valueText(margin, 'deg')}.${consequenceText(trial)}`;
+  return { sentence, verdict: 'clear', action: `Add ${value} isolation`, stages: trial.stages };
 }
 
 /** A larger coupling capacitor, the next of E6 that meets the target. */

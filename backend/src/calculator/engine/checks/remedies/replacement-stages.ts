@@ -14,7 +14,10 @@ export function resistorGain(stage: VoltageFeedbackStage & { gainOhm: number }):
 }
 
 /** The same stage with another size of gain: Rg stays (it loads the stage in front of an inverting one), Rf moves. */
-export function withGain(stage: VoltageFeedbackStage & { gainOhm: number }, magnitude: number): Stage | null {
+export function withGain(
+  stage: VoltageFeedbackStage & { gainOhm: number },
+  magnitude: number,
+): VoltageFeedbackStage | null {
   if (stage.topology === 'inverting') {
     return { ...stage, feedbackOhm: stage.gainOhm * magnitude, wantedGain: -magnitude };
   }

@@ -1,8 +1,7 @@
 import type { Check, Remedy } from '../../report';
 import { tryEvaluate } from '../../report/evaluate';
 import type { StageFacts } from '../../report/facts';
-import { formatFigure } from '../../text/si-format';
-import { decimalAmount } from '../../text/si-format';
+import { decimalAmount, formatFigure } from '../../text/si-format';
 import { listText } from '../../text/phrases';
 import type { Stage } from '../../types';
 import type { Judgement } from '../judge';
