@@ -21,6 +21,6 @@ export class TopBar {
 
   async signOut(): Promise<void> {
     await this.person.click();
-    await this.page.getByRole('button', { name: 'Sign out' }).click();
+    await this.page.getByRole('button', { name: 'Sign out', exact: true }).click();
   }
 }

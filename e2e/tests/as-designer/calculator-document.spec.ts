@@ -5,6 +5,8 @@ import { expect, test } from '../../fixtures/test';
 import { Api } from '../../fixtures/api';
 import { ADMINISTRATOR } from '../../testdata/people';
 
+test.use({ role: null });
+
 /** An own curl in front of the path only where the machine has none. */
 function pathWithCurl(folder: string): string {
   const tools = join(folder, 'tools');
