@@ -7,9 +7,6 @@ export interface Draft {
   readonly specification: Specification;
 }
 
-/** The calculator refuses more. */
-export const MAXIMUM_STAGES = 24;
-
 export function stageIndex(draft: Draft, stageId: string): number {
   return draft.stages.findIndex((stage) => stage.id === stageId);
 }

@@ -1,0 +1,58 @@
+import HolderOutlined from '@ant-design/icons/es/icons/HolderOutlined';
+import type { useSortable } from '@dnd-kit/sortable';
+
+import type { Stage, StageReport } from '../../../../api/types';
+import { GradeMark } from '../../../../components/data-marks';
+import { deviceIdOf } from '../../lib/stage-defaults';
+import { useWorkspace } from '../workspace-context';
+import styles from './ledger.module.css';
+
+interface StageCellProps {
+  stage: Stage;
+  index: number;
+  report: StageReport | null;
+  sortable: ReturnType<typeof useSortable>;
+}
+
+/** Where the device's name comes from while there are no figures yet. */
+function usePartNumber(stage: Stage, report: StageReport | null): string | null {
+  const { option } = useWorkspace();
+  const deviceId = deviceIdOf(stage);
+  if (report && report.deviceId === deviceId) return report.partNumber;
+  return option.devices.find((device) => device.id === deviceId)?.partNumber ?? null;
+}
+
+export function StageCell({ stage, index, report, sortable }: StageCellProps) {
+  const { editable } = useWorkspace();
+  const partNumber = usePartNumber(stage, report);
+  const topology = 'topology' in stage ? stage.topology : stage.kind === 'rc-section' ? 'passive' : 'matched';
+  return (
+    <th scope="row" className={styles.stage}>
+      <div className={styles.stageCell}>
+        {editable ? (
+          <span
+            ref={sortable.setActivatorNodeRef}
+            className={styles.handle}
+            title="Drag to reorder (Alt + arrow keys)"
+            aria-hidden="true"
+            {...sortable.listeners}
+          >
+            <HolderOutlined />
+          </span>
+        ) : (
+          <span className={styles.handle} />
+        )}
+        <div className={styles.stageText}>
+          <div className={styles.stageName} title={stage.name}>
+            S{index + 1} {stage.name}
+          </div>
+          <div className={styles.stageDevice}>
+            {partNumber && <span title={partNumber}>{partNumber}</span>} <GradeMark grade={report?.grade ?? null} />
+            {partNumber ? ' · ' : ''}
+            {topology}
+          </div>
+        </div>
+      </div>
+    </th>
+  );
+}

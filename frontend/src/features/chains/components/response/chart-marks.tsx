@@ -1,0 +1,90 @@
+import type { Curves } from '../../../../api/types';
+import { formatFigure, formatSignificant } from '../../../../lib/format-figure';
+import type { PlotBox, PlotScales } from '../../lib/response-geometry';
+import { useReport, useWorkspace } from '../workspace-context';
+import styles from './response.module.css';
+
+interface ChartMarksProps {
+  box: PlotBox;
+  scales: PlotScales;
+  curves: Curves;
+}
+
+/** Half power, in decibels: 10·log10(2). */
+const HALF_POWER_DB = 10 * Math.log10(2);
+
+/** What the curve is held to: band, required window, ideal gain and −3 dB marks. */
+export function ChartMarks({ box, scales, curves }: ChartMarksProps) {
+  const { control } = useWorkspace();
+  const { band } = control.draft.specification;
+  const from = scales.x(band.lowHz);
+  const to = scales.x(band.highHz);
+  const operating = scales.x(band.operatingHz);
+  const bottom = box.height - box.bottom;
+  const ideal = curves.idealGainDb;
+  return (
+    <g>
+      <rect className={styles.band} x={from} width={Math.max(2, to - from)} y={box.top} height={bottom - box.top} />
+      <line className={styles.operating} x1={operating} x2={operating} y1={box.top} y2={bottom} />
+      {ideal !== null && (
+        <>
+          <line
+            className={styles.ideal}
+            x1={box.left}
+            x2={box.width - box.right}
+            y1={scales.y(ideal)}
+            y2={scales.y(ideal)}
+          />
+          <text className={styles.markText} x={box.width - box.right - 4} y={scales.y(ideal) - 5} textAnchor="end">
+            ideal {formatSignificant(ideal, 4)}
+          </text>
+        </>
+      )}
+      <RequiredWindow scales={scales} from={from} to={to} />
+      {ideal !== null && <CornerMarks scales={scales} gainDb={ideal - HALF_POWER_DB} box={box} />}
+    </g>
+  );
+}
+
+function RequiredWindow({ scales, from, to }: { scales: PlotScales; from: number; to: number }) {
+  const { control } = useWorkspace();
+  const { gainDb, minimumGainDb, maximumGainDb } = control.draft.specification.requirements;
+  const low = gainDb ? gainDb.target - gainDb.tolerance : minimumGainDb;
+  const high = gainDb ? gainDb.target + gainDb.tolerance : maximumGainDb;
+  if (low === undefined && high === undefined) return null;
+  return (
+    <g className={styles.required}>
+      {high !== undefined && (
+        <path d={`M${from} ${scales.y(high) - 5}V${scales.y(high)}H${to}V${scales.y(high) - 5}`} />
+      )}
+      {low !== undefined && <path d={`M${from} ${scales.y(low) + 5}V${scales.y(low)}H${to}V${scales.y(low) + 5}`} />}
+    </g>
+  );
+}
+
+function CornerMarks({ scales, gainDb, box }: { scales: PlotScales; gainDb: number; box: PlotBox }) {
+  const { gbwCase } = useWorkspace();
+  const { figures } = useReport().cases[gbwCase];
+  return (
+    <>
+      {[figures.cornerLower, figures.cornerUpper].map((figure, index) => {
+        if (figure.value === null) return null;
+        const x = scales.x(figure.value);
+        if (x <= box.left || x >= box.width - box.right) return null;
+        return (
+          <g key={index}>
+            <line className={styles.corner} x1={x} x2={x} y1={scales.y(gainDb) - 12} y2={scales.y(gainDb) + 12} />
+            <text
+              className={styles.markText}
+              x={index === 0 ? x - 5 : x + 6}
+              y={scales.y(gainDb) + 16}
+              textAnchor={index === 0 ? 'end' : 'start'}
+            >
+              −3 dB {formatFigure(figure).text}
+            </text>
+          </g>
+        );
+      })}
+    </>
+  );
+}
