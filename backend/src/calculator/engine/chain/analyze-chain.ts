@@ -1,5 +1,11 @@
-import type { ChainAnalysis } from '../analysis';
-import type { ChainInput, GbwCase } from '../types';
+import type { ChainAnalysis, ChainCaseAnalysis } from '../analysis';
+import { EngineInputError } from '../errors';
+import { ChainInput, GBW_CASES, GbwCase } from '../types';
+import { analyzeCase } from './chain-case';
+import { ChainNetwork } from './chain-network';
+import { ChainResponse } from './response';
+import { stabilityOfChain } from './stability-analysis';
+import { validateChain } from './validate';
 
 export interface AnalyzeOptions {
   /** Cases to compute; absent: all three. The others are missing from `cases` of the answer. */
@@ -8,7 +14,27 @@ export interface AnalyzeOptions {
   readonly validated?: boolean;
 }
 
-/** The network analysis of a whole chain. Throws EngineInputError when the input cannot be calculated. */
-export function analyzeChain(_input: ChainInput, _options?: AnalyzeOptions): ChainAnalysis {
-  throw new Error('not available yet');
+/**
+ * The network analysis of a whole chain: every figure per stage and chain in the cases asked for, and the stability of
+ * every feedback stage at both ends of the GBW range. SI units, dB where a name ends in Db.
+ *
+ * @throws EngineInputError with every issue when the input cannot be calculated
+ * @example analyzeChain(input).cases.minimum.stages[1].headroomTop // { value: 0.974 }
+ */
+export function analyzeChain(input: ChainInput, options: AnalyzeOptions = {}): ChainAnalysis {
+  if (!options.validated) assertValid(input);
+  const cases: Partial<Record<GbwCase, ChainCaseAnalysis>> = {};
+  let minimum: ChainResponse | undefined;
+  for (const gbwCase of options.cases ?? GBW_CASES) {
+    const response = new ChainResponse(input, new ChainNetwork(input, gbwCase));
+    if (gbwCase === 'minimum') minimum = response;
+    cases[gbwCase] = analyzeCase(input, response, gbwCase);
+  }
+  return { cases: cases as ChainAnalysis['cases'], stability: stabilityOfChain(input, minimum) };
+}
+
+/** Throws EngineInputError with everything that is wrong with an input. */
+export function assertValid(input: ChainInput): void {
+  const issues = validateChain(input);
+  if (issues.length > 0) throw new EngineInputError(issues);
 }

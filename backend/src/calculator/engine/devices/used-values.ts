@@ -4,6 +4,7 @@ import type {
   CurrentFeedbackDevice,
   DatasheetValue,
   GbwCase,
+  MatchedBlockDevice,
   Policy,
   VoltageFeedbackDevice,
 } from '../types';
@@ -69,6 +70,15 @@ export function gbwFor(device: VoltageFeedbackDevice, policy: Policy, corner: De
 /** Reference bandwidth of a current-feedback amplifier, Hz; same rules as {@link gbwFor}. */
 export function referenceBandwidthFor(device: CurrentFeedbackDevice, policy: Policy, corner: DeviceCorner): UsedValue {
   return spreadValue(device.referenceBandwidthHz, policy, corner);
+}
+
+/**
+ * Upper −3 dB corner of a matched block, Hz; same rules as {@link gbwFor}. Null: flat upwards.
+ *
+ * @example upperCornerFor(block /* 1 GHz typ *\/, DEFAULT_POLICY, 'minimum')?.value // 0.7e9
+ */
+export function upperCornerFor(device: MatchedBlockDevice, policy: Policy, corner: DeviceCorner): UsedValue | null {
+  return device.upperCornerHz ? spreadValue(device.upperCornerHz, policy, corner) : null;
 }
 
 /** Slew rate that is judged, V/s: the minimum, else typ × slew derating, in every case; null when not entered. */

@@ -1,0 +1,186 @@
+import { DEFAULT_AMBIENT_K } from '../constants';
+import {
+  invertingInputResistanceFor,
+  lowerWorst,
+  openLoopGainDbFor,
+  openLoopTransimpedanceFor,
+  outputResistanceFor,
+  parasitic,
+  transimpedanceBandwidthFor,
+  upperWorst,
+} from '../devices/amplifier-values';
+import { currentFeedbackSecondPole, secondPoleFor } from '../devices/second-pole';
+import { DeviceCorner, gbwFor, referenceBandwidthFor, upperCornerFor } from '../devices/used-values';
+import type {
+  AmplifierDevice,
+  CurrentFeedbackDevice,
+  Device,
+  FeedbackStage,
+  MatchedBlockDevice,
+  Policy,
+  RcSectionStage,
+  Stage,
+  VoltageFeedbackDevice,
+} from '../types';
+import { dbToPower, dbToRatio } from '../units';
+import { CurrentFeedbackNetwork } from './current-feedback';
+import type { AmplifierNoise } from './feedback-noise';
+import type { FeedbackPartValues } from './feedback-parts';
+import { MatchedBlockNetwork, MatchedBlockValues } from './matched-block';
+import type { NetworkStage } from './network-stage';
+import { RcSectionNetwork, RcSectionValues } from './rc-section';
+import { VoltageFeedbackNetwork } from './voltage-feedback';
+
+/** What a stage is made ready with. */
+export interface PrepareContext {
+  readonly policy: Policy;
+  readonly corner: DeviceCorner;
+  /** Absent: 298.15 K. */
+  readonly ambientK?: number;
+}
+
+/** A stage's numbers in one corner; exactly one of the three last is there. */
+export interface PreparedStage {
+  readonly stage: Stage;
+  readonly device: Device | null;
+  readonly network: NetworkStage;
+  readonly feedback: FeedbackPartValues | null;
+  readonly section: RcSectionValues | null;
+  readonly block: MatchedBlockValues | null;
+  /** K of a current-feedback stage, Ω·rad/s. */
+  readonly transimpedanceBandwidth: number | null;
+  /** Feedback stages: GBW, with current feedback the higher of reference bandwidth and K/(2π·(Rf + Rb)), Hz. */
+  readonly loopBandwidthHz: number | null;
+  /** Feedback stages: Infinity when there is none or it is not known. */
+  readonly secondPoleHz: number | null;
+}
+
+const NO_VALUES = {
+  feedback: null,
+  section: null,
+  block: null,
+  transimpedanceBandwidth: null,
+  loopBandwidthHz: null,
+  secondPoleHz: null,
+};
+
+/** True for the topologies whose signal goes into the inverting node. */
+export function isInverting(stage: FeedbackStage): boolean {
+  return stage.topology === 'inverting' || stage.topology === 'transimpedance';
+}
+
+/**
+ * Makes a validated stage ready for one corner: picks the device values and builds its network.
+ *
+ * @example prepareStage(stage, device, { policy: DEFAULT_POLICY, corner: 'minimum' }).network.stageId // stage.id
+ */
+export function prepareStage(stage: Stage, device: Device | null, context: PrepareContext): PreparedStage {
+  const nothing = { stage, device, ...NO_VALUES };
+  if (stage.kind === 'rc-section') {
+    const section = sectionValues(stage, context);
+    return { ...nothing, section, network: new RcSectionNetwork(stage.id, section) };
+  }
+  if (stage.kind === 'matched-block') {
+    const block = blockValues(device as MatchedBlockDevice, context);
+    return { ...nothing, block, network: new MatchedBlockNetwork(stage.id, block) };
+  }
+  if (stage.kind === 'voltage-feedback') {
+    return { ...nothing, ...voltageFeedback(stage, device as VoltageFeedbackDevice, context) };
+  }
+  return { ...nothing, ...currentFeedback(stage, device as CurrentFeedbackDevice, context) };
+}
+
+function feedbackValues(stage: FeedbackStage, device: AmplifierDevice): FeedbackPartValues {
+  const inverting = isInverting(stage);
+  const gainOhm = stage.topology === 'transimpedance' || stage.topology === 'follower' ? null : stage.gainOhm;
+  const inputOhm = parasitic(device.inputResistanceOhm)?.value ?? 0;
+  const inputF = parasitic(device.commonModeCapacitanceF)?.value ?? 0;
+  return {
+    inverting,
+    feedbackOhm: stage.feedbackOhm,
+    feedbackF: stage.feedbackF ?? 0,
+    seriesOhm: inverting ? (gainOhm ?? 0) : 0,
+    gainS: !inverting && gainOhm ? 1 / gainOhm : 0,
+    nodeF: inputF + (stage.strayF ?? 0),
+    inputS: inputOhm > 0 ? 1 / inputOhm : 0,
+    inputF,
+    outputOhm: outputResistanceFor(device).value,
+    isolationOhm: stage.isolationOhm ?? 0,
+    terminationOhm: stage.terminationOhm ?? null,
+    couplingF: stage.couplingF ?? null,
+    biasOhm: inverting ? null : (stage.biasOhm ?? null),
+  };
+}
+
+function amplifierNoise(device: AmplifierDevice, context: PrepareContext): AmplifierNoise {
+  const { corner } = context;
+  const plus = upperWorst(device.currentNoiseAPerRtHz, corner)?.value ?? null;
+  const minus =
+    device.kind === 'current-feedback'
+      ? (upperWorst(device.invertingCurrentNoiseAPerRtHz, corner)?.value ?? null)
+      : plus;
+  return {
+    voltageVPerRtHz: upperWorst(device.voltageNoiseVPerRtHz, corner)?.value ?? null,
+    voltageCornerHz: device.voltageNoiseCornerHz ?? 0,
+    plusCurrentAPerRtHz: plus,
+    minusCurrentAPerRtHz: minus,
+    currentCornerHz: device.currentNoiseCornerHz ?? 0,
+    ambientK: context.ambientK ?? DEFAULT_AMBIENT_K,
+  };
+}
+
+function voltageFeedback(stage: FeedbackStage, device: VoltageFeedbackDevice, context: PrepareContext) {
+  const feedback = feedbackValues(stage, device);
+  const loopBandwidthHz = gbwFor(device, context.policy, context.corner).value;
+  const secondPoleHz = secondPoleFor(device).frequencyHz;
+  const network = new VoltageFeedbackNetwork(stage.id, feedback, {
+    openLoopGain: dbToRatio(openLoopGainDbFor(device, context.corner).value),
+    gainBandwidthHz: loopBandwidthHz,
+    secondPoleHz,
+    differentialF: parasitic(device.differentialCapacitanceF)?.value ?? 0,
+    noise: amplifierNoise(device, context),
+  });
+  return { feedback, network, loopBandwidthHz, secondPoleHz };
+}
+
+function currentFeedback(stage: FeedbackStage, device: CurrentFeedbackDevice, context: PrepareContext) {
+  const { policy, corner } = context;
+  const feedback = feedbackValues(stage, device);
+  const transimpedanceBandwidth = transimpedanceBandwidthFor(device, policy, corner);
+  const invertingInputOhm = invertingInputResistanceFor(device).value;
+  const secondPoleHz = currentFeedbackSecondPole(device).frequencyHz;
+  const network = new CurrentFeedbackNetwork(stage.id, feedback, {
+    openLoopOhm: openLoopTransimpedanceFor(device, corner).value,
+    transimpedanceBandwidth,
+    secondPoleHz,
+    invertingInputOhm,
+    noise: amplifierNoise(device, context),
+  });
+  const unityHz = transimpedanceBandwidth / (2 * Math.PI * (feedback.feedbackOhm + invertingInputOhm));
+  const loopBandwidthHz = Math.max(referenceBandwidthFor(device, policy, corner).value, unityHz);
+  return { feedback, network, loopBandwidthHz, secondPoleHz, transimpedanceBandwidth };
+}
+
+function sectionValues(stage: RcSectionStage, context: PrepareContext): RcSectionValues {
+  return {
+    seriesOhm: stage.seriesOhm ?? 0,
+    seriesF: stage.seriesF ?? 0,
+    shuntS: stage.shuntOhm ? 1 / stage.shuntOhm : 0,
+    shuntF: stage.shuntF ?? 0,
+    ambientK: context.ambientK ?? DEFAULT_AMBIENT_K,
+  };
+}
+
+function blockValues(device: MatchedBlockDevice, context: PrepareContext): MatchedBlockValues {
+  const { corner, policy } = context;
+  const gainDb = lowerWorst(device.gainDb, corner)?.value ?? 0;
+  const noiseFigureDb = upperWorst(device.noiseFigureDb, corner)?.value;
+  const silent = gainDb <= 0 ? 'loss' : null;
+  return {
+    impedanceOhm: device.impedanceOhm,
+    gain: dbToRatio(gainDb),
+    lowerCornerHz: upperWorst(device.lowerCornerHz, corner)?.value ?? 0,
+    upperCornerHz: upperCornerFor(device, policy, corner)?.value ?? Infinity,
+    noiseFactor: noiseFigureDb === undefined ? silent : dbToPower(noiseFigureDb),
+  };
+}
