@@ -8,15 +8,16 @@ export type DataKind = 'demo' | 'team';
 
 const KEY = 'data_kind';
 
+/** Set when the demo's scenarios are all there. */
+export const DEMO_SEEDED_KEY = 'demo_seeded';
+
 async function storedKind(sequelize: Sequelize): Promise<DataKind | null> {
-  const [row] = await sequelize.query<{ value: string }>('SELECT value FROM settings WHERE key = $key', {
-    bind: { key: KEY },
-    type: QueryTypes.SELECT,
-    raw: true,
-  });
+  const [row] = await sequelize.query<{ demo: number }>(
+    `SELECT value = json_quote('demo') AS demo FROM settings WHERE key = $key`,
+    { bind: { key: KEY }, type: QueryTypes.SELECT },
+  );
   if (row === undefined) return null;
-  const value: unknown = typeof row.value === 'string' && row.value.startsWith('"') ? JSON.parse(row.value) : row.value;
-  return value === 'demo' ? 'demo' : 'team';
+  return row.demo === 1 ? 'demo' : 'team';
 }
 
 /** What an empty data folder becomes. */
@@ -52,6 +53,26 @@ export async function settleDataKind(file: string, config: AppConfig): Promise<D
       );
     }
     return kind;
+  } finally {
+    await sequelize.close();
+  }
+}
+
+/**
+ * Whether seeding a demo was broken off (a power cut, Ctrl-C): the invented team is there and nobody else, but the mark
+ * of the finished seed is missing.
+ */
+export async function isHalfSeededDemo(file: string): Promise<boolean> {
+  const sequelize = new Sequelize(sqliteOptions(file));
+  try {
+    if ((await storedKind(sequelize)) !== 'demo') return false;
+    const [counts] = await sequelize.query<{ seeded: number; invented: number; real: number }>(
+      `SELECT (SELECT count(*) FROM settings WHERE key = $key) AS seeded,
+              (SELECT count(*) FROM users WHERE is_demo = 1) AS invented,
+              (SELECT count(*) FROM users WHERE is_demo = 0) AS real`,
+      { bind: { key: DEMO_SEEDED_KEY }, type: QueryTypes.SELECT },
+    );
+    return counts !== undefined && counts.seeded === 0 && counts.invented > 0 && counts.real === 0;
   } finally {
     await sequelize.close();
   }

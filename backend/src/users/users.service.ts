@@ -29,7 +29,7 @@ export class UsersService {
     return users.map((user) => presentUser(user, actor));
   }
 
-  /** The active people among `ids`, for features that refer to people (`[{id, name}]` in the given order). */
+  /** The people among `ids`, deactivated ones included, for features that refer to people (`[{id, name}]` in the given order). */
   async findNames(ids: readonly string[]): Promise<{ id: string; name: string }[]> {
     const users = await this.users.findAll({ where: { id: [...ids] } });
     const byId = new Map(users.map((user) => [user.id, user]));
