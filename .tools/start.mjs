@@ -9,7 +9,10 @@ import { readSettings } from './lib/settings.mjs';
 
 const say = (text) => console.log(`Bandledger: ${text} …`);
 
-/** Ctrl-C reaches npm and us; the server runs in its own group and hears of it once, from us. */
+/** Ctrl-C comes from the terminal and once more from npm; only a repeated one, seconds later, is meant as "at once". */
+const IMPATIENT_AFTER_MS = 2000;
+
+/** The server runs in a process group of its own and hears of Ctrl-C once, from here. */
 function serve() {
   return new Promise((resolve) => {
     const server = spawn(process.execPath, [fromRoot('backend/dist/main.js')], {
@@ -17,14 +20,14 @@ function serve() {
       detached: true,
       stdio: 'inherit',
     });
-    let asked = 0;
-    for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
-      process.on(signal, () => {
-        asked += 1;
-        killGroup(server, asked > 1 ? 'SIGKILL' : signal === 'SIGHUP' ? 'SIGTERM' : signal);
-      });
-    }
-    server.on('exit', (code) => resolve(asked > 0 ? 0 : (code ?? 1)));
+    let askedAt = null;
+    const stop = () => {
+      if (askedAt === null) killGroup(server, 'SIGINT');
+      else if (Date.now() - askedAt > IMPATIENT_AFTER_MS) killGroup(server, 'SIGKILL');
+      askedAt ??= Date.now();
+    };
+    for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, stop);
+    server.on('exit', (code) => resolve(askedAt === null ? (code ?? 1) : 0));
   });
 }
 

@@ -19,13 +19,14 @@ afterEach(() => ready.remove());
 const oneLine = (output) => assert.match(output, /^Bandledger: [^\n]+\n$/);
 
 describe('npm start', () => {
-  it('starts what is built within five seconds and ends cleanly on one interrupt', async () => {
+  it('starts what is built within five seconds and ends cleanly on Ctrl-C, which npm sends once more', async () => {
     ready = createReadyTree(SERVER);
     const startedAt = Date.now();
     let listeningAfterMs = Infinity;
     const { code, output } = await runLauncher(ready.tree, 'start.mjs', {}, (child, soFar) => {
       if (!/listening\n$/.test(soFar)) return;
       listeningAfterMs = Date.now() - startedAt;
+      child.kill('SIGINT');
       child.kill('SIGINT');
     });
     assert.equal(output, 'listening\ninterrupts: 1\n');
