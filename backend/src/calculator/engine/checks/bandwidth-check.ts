@@ -1,9 +1,9 @@
-import type { Check, Verdict } from '../report';
+import type { Check, Figure, Verdict } from '../report';
 import { isFeedbackStage, partName } from '../report/facts';
 import type { ChainFacts, StageFacts } from '../report/facts';
 import { limitFigure } from '../report/figures';
 import { stageFigure } from '../report/stage-figures';
-import { setFrequency, targetText, valueText } from '../text/phrases';
+import { cannotBeTold, capitalised, setFrequency, targetText, valueText } from '../text/phrases';
 import { isAbove, isBelow } from '../text/deciding-digits';
 import { makeCheck, unknownCheck } from './make-check';
 
@@ -20,8 +20,7 @@ export function bandwidthCheck(facts: ChainFacts, stage: StageFacts): Check | nu
   const corner = stage.analysis.cornerUpperHz;
   const actual = stageFigure(facts, stage, 'cornerUpper');
   if (corner.value === null) {
-    if (!isCornerUnknown(stage)) return null;
-    return unknownCheck('bandwidth', TITLE, `The corner cannot be told: ${corner.reason}.`, actual);
+    return bandwidthWithoutCorner(stage, corner.reason, actual);
   }
   const { highHz } = facts.input.specification.band;
   const factor = targetFactor(facts, stage);
@@ -34,15 +33,20 @@ export function bandwidthCheck(facts: ChainFacts, stage: StageFacts): Check | nu
   return makeCheck('bandwidth', TITLE, verdict, upperSentence(facts, stage, corner.value, verdict), { actual, limit });
 }
 
-/** A corner beyond the search range is no limit; a corner that cannot be computed is unknown. */
-function isCornerUnknown(stage: StageFacts): boolean {
-  return stage.analysis.gainOperatingDb.value === null;
+/** A corner beyond the search range is no limit; a gain that never comes up is over; what cannot be computed is unknown. */
+function bandwidthWithoutCorner(stage: StageFacts, reason: string, actual: Figure): Check | null {
+  const { gainOperatingDb, operatingBeyondCorner, cornerLowerHz } = stage.analysis;
+  if (gainOperatingDb.value === null)
+    return unknownCheck('bandwidth', TITLE, cannotBeTold('the corner', reason), actual);
+  if (!operatingBeyondCorner || cornerLowerHz.value !== null) return null;
+  const sentence = `${capitalised(partName(stage))} never comes to half the power of its ideal gain here.`;
+  return makeCheck('bandwidth', TITLE, 'over', sentence, { actual });
 }
 
 function upperSentence(facts: ChainFacts, stage: StageFacts, corner: number, verdict: Verdict): string {
   const { highHz, operatingHz } = facts.input.specification.band;
   const factor = targetFactor(facts, stage);
-  const is = `${partName(stage)} is at −3 dB at ${valueText(corner, 'Hz', [highHz, highHz * factor])} here, loaded`;
+  const is = `${capitalised(partName(stage))} is at −3 dB at ${valueText(corner, 'Hz', [highHz, highHz * factor])} here, loaded`;
   if (stage.analysis.operatingBeyondCorner) {
     return `${is}: the operating frequency of ${setFrequency(operatingHz)} is already beyond the corner.`;
   }

@@ -4,7 +4,15 @@ import type { ChainFacts, StageFacts } from '../report/facts';
 import { partName } from '../report/facts';
 import { limitFigure } from '../report/figures';
 import { stageFigure } from '../report/stage-figures';
-import { deviceHas, noiseGainText, ratioText, setFrequency, targetText, valueText } from '../text/phrases';
+import {
+  cannotBeTold,
+  deviceHas,
+  noiseGainText,
+  ratioText,
+  setFrequency,
+  targetText,
+  valueText,
+} from '../text/phrases';
 import { makeCheck, unknownCheck, verdictAtLeast } from './make-check';
 
 const TITLE = 'GBW limit';
@@ -18,7 +26,7 @@ export function gbwCheck(facts: ChainFacts, stage: StageFacts): Check | null {
   const { headroom, atHz } = worstHeadroom(facts, stage);
   const actual = stageFigure(facts, stage, 'headroom');
   if (headroom.value === null) {
-    return unknownCheck('gbw', TITLE, `The headroom cannot be told: ${headroom.reason}.`, actual);
+    return unknownCheck('gbw', TITLE, cannotBeTold('the headroom', headroom.reason), actual);
   }
   const target = facts.policy.headroomTarget;
   const verdict = verdictAtLeast(headroom.value, 1, target);

@@ -4,7 +4,7 @@ import { findRemedies } from '../checks/remedies/find-remedies';
 import { chainLane, stageLane } from '../lanes/lane';
 import { frequencyAxis } from '../lanes/axis';
 import type { ChainCaseReport, ChainReport, Check, HeadlineItem, StageCaseReport, StageReport } from '../report';
-import { basisText } from '../text/phrases';
+import { basisText, because } from '../text/phrases';
 import { GBW_CASES } from '../types';
 import type { ChainInput, GbwCase, GainBasis } from '../types';
 import { CALCULATOR_VERSION } from '../version';
@@ -109,7 +109,7 @@ function stageCaseReport(facts: ChainFacts, typical: ChainFacts, index: number):
 function gbwBasis(stage: StageFacts): string {
   if (stage.analysis.gbw) return basisText(stage.analysis.gbw);
   const none = gbwMaybe(stage);
-  return none.value === null ? none.reason : '';
+  return none.value === null ? because(none.reason) : '';
 }
 
 function chainCaseReport(facts: ChainFacts, typical: ChainFacts): ChainCaseReport {

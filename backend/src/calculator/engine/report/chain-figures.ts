@@ -67,11 +67,11 @@ const BUILDERS: Readonly<Record<ChainFigureKey, Builder>> = {
 };
 
 function noHeadroomReason(facts: ChainFacts): string {
-  if (facts.stages.length === 0) return 'no stages yet';
+  if (facts.stages.length === 0) return 'No stages yet.';
   const withGbw = facts.stages.find((stage) => stage.stage.kind === 'voltage-feedback');
-  if (!withGbw) return 'no stage has a GBW';
+  if (!withGbw) return 'No stage has a GBW.';
   const { headroom } = worstHeadroom(facts, withGbw);
-  return headroom.value === null ? headroom.reason : 'not known';
+  return headroom.value === null ? headroom.reason : 'Not known.';
 }
 
 /** One figure of the chain. */

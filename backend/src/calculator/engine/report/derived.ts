@@ -1,4 +1,5 @@
 import type { Maybe } from '../analysis';
+import { capitalised } from '../text/phrases';
 import type { ChainFacts, StageFacts } from './facts';
 import { combine, known, ratioToDb, unknown } from './maybe';
 
@@ -33,17 +34,17 @@ export function noiseGainMaybe(stage: StageFacts, value: number | null): Maybe {
 
 function noNoiseGainReason(stage: StageFacts): string {
   return stage.device?.kind === 'voltage-feedback' || stage.device?.kind === 'current-feedback'
-    ? 'this topology has no noise gain of its own'
-    : 'no feedback, so no noise gain';
+    ? 'This topology has no noise gain of its own.'
+    : 'No feedback, so no noise gain.';
 }
 
 /** GBW as a value that may be missing, with the reason of a stage that has none. */
 export function gbwMaybe(stage: StageFacts): Maybe {
   const { gbw, headroomTop } = stage.analysis;
   if (gbw) return known(gbw.value, gbw.basis === 'assumed' || gbw.basis === 'typ-derated');
-  if (stage.stage.kind === 'current-feedback') return unknown('has no GBW (current feedback)');
-  if (stage.stage.kind !== 'voltage-feedback') return unknown('has no GBW (no feedback amplifier)');
-  return unknown(headroomTop.value === null ? headroomTop.reason : 'the GBW is missing: enter it on the device page');
+  if (stage.stage.kind === 'current-feedback') return unknown('Has no GBW (current feedback).');
+  if (stage.stage.kind !== 'voltage-feedback') return unknown('Has no GBW (no feedback amplifier).');
+  return unknown(headroomTop.value === null ? headroomTop.reason : 'The GBW is not entered.');
 }
 
 /** Noise gain × frequency: what the stage spends at the operating frequency, at the top edge, or at the worse of them. */
@@ -74,12 +75,12 @@ export function loopGainDb(stage: StageFacts): Maybe {
 
 /** What the output can swing over what it has to. */
 export function swingHeadroom(stage: StageFacts): Maybe {
-  return ratioOf(stage.analysis.swingAvailableV, stage.analysis.outputPeakV, 'no signal: nothing to swing');
+  return ratioOf(stage.analysis.swingAvailableV, stage.analysis.outputPeakV, 'No signal: nothing to swing.');
 }
 
 /** Slew rate that the device has over the slew rate that the signal needs. */
 export function slewHeadroom(stage: StageFacts): Maybe {
-  return ratioOf(slewAvailable(stage), stage.analysis.slewNeededVPerS, 'no signal: no slew needed');
+  return ratioOf(slewAvailable(stage), stage.analysis.slewNeededVPerS, 'No signal: no slew needed.');
 }
 
 /** Slew rate as used, or what is missing. */
@@ -90,7 +91,7 @@ export function slewAvailable(stage: StageFacts): Maybe {
 
 /** Output current that the device has over the current that load and feedback take. */
 export function outputCurrentHeadroom(stage: StageFacts): Maybe {
-  return ratioOf(outputCurrentAvailable(stage), stage.analysis.outputCurrentPeakA, 'no signal: no current');
+  return ratioOf(outputCurrentAvailable(stage), stage.analysis.outputCurrentPeakA, 'No signal: no current.');
 }
 
 /** Output current as used, or what is missing. */
@@ -99,11 +100,11 @@ export function outputCurrentAvailable(stage: StageFacts): Maybe {
   return available ? known(available.value, available.basis !== 'min') : missingData(stage, 'output current');
 }
 
-/** "QUIL-D618 has no slew rate entered: enter it on its device page", or that the stage has no amplifier. */
+/** "Slew rate of QUIL-D618 is not entered.", or that the stage has no amplifier. */
 export function missingData(stage: StageFacts, what: string): Maybe {
   const { device } = stage;
-  if (!device || device.kind === 'matched-block') return unknown('no operational amplifier in this stage');
-  return unknown(`${device.partNumber} has no ${what} entered: enter it on its device page`);
+  if (!device || device.kind === 'matched-block') return unknown('No operational amplifier in this stage.');
+  return unknown(`${capitalised(what)} of ${device.partNumber} is not entered.`);
 }
 
 function ratioOf(available: Maybe, needed: Maybe, zeroReason: string): Maybe {
@@ -117,7 +118,7 @@ export function noiseShare(facts: ChainFacts, stage: StageFacts): Maybe {
   const missing = total.find((each) => each.value === null);
   if (missing) return missing;
   const sum = total.reduce((all, each) => all + (each.value ?? 0), 0);
-  return sum > 0 ? combine([stage.analysis.noiseAdded], (own) => own / sum) : unknown('no stage adds noise');
+  return sum > 0 ? combine([stage.analysis.noiseAdded], (own) => own / sum) : unknown('No stage adds noise.');
 }
 
 /** Added noise density of a stage, V/√Hz (A/√Hz). */

@@ -1,5 +1,6 @@
 import type { Maybe } from '../analysis';
 import type { Figure, Unit } from '../report';
+import { asSentence } from '../text/phrases';
 import { decidingDigits, digitsForDecimals, digitsWithoutTrailingZeros } from '../text/deciding-digits';
 
 const MOST_DIGITS_OF_A_GAIN = 4;
@@ -21,9 +22,9 @@ export interface FigureOptions {
  * @param options limits that decide the digits
  */
 export function figureOf(maybe: Maybe, unit: Unit, options: FigureOptions = {}): Figure {
-  if (maybe.value === null) return { value: null, unit, digits: USUAL_DIGITS, reason: maybe.reason };
+  if (maybe.value === null) return { value: null, unit, digits: USUAL_DIGITS, reason: asSentence(maybe.reason) };
   if (!Number.isFinite(maybe.value)) {
-    return { value: null, unit, digits: USUAL_DIGITS, reason: 'the result is not a finite number' };
+    return { value: null, unit, digits: USUAL_DIGITS, reason: 'The result is not a finite number.' };
   }
   const value = Object.is(maybe.value, -0) ? 0 : maybe.value;
   const limits = (options.limits ?? []).filter((limit): limit is number => limit !== undefined);

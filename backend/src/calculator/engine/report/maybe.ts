@@ -2,7 +2,7 @@ import type { Maybe } from '../analysis';
 
 /** A known number; a number that is not finite is none. */
 export function known(value: number, assumed = false): Maybe {
-  if (!Number.isFinite(value)) return { value: null, reason: 'the result is not a finite number' };
+  if (!Number.isFinite(value)) return { value: null, reason: 'The result is not a finite number.' };
   return assumed ? { value, assumed } : { value };
 }
 

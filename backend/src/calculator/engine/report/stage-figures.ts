@@ -23,7 +23,7 @@ import { combine, dbToRatio, known, unknown } from './maybe';
 
 type Builder = (facts: ChainFacts, stage: StageFacts) => Figure;
 
-const NO_LOOP = 'no feedback loop in this stage';
+const NO_LOOP = 'No feedback loop in this stage.';
 
 function of(unit: Unit, pick: (stage: StageFacts, facts: ChainFacts) => Maybe): Builder {
   return (facts, stage) => figureOf(pick(stage, facts), unit);
@@ -66,10 +66,10 @@ export function worsePoint(stage: StageFacts): StabilityPoint | null {
 function phaseMargin(stage: StageFacts): Maybe {
   const point = worsePoint(stage);
   if (!point) return unknown(NO_LOOP);
-  if (point.noCrossing) return unknown('the loop gain never crosses 1');
+  if (point.noCrossing) return unknown('The loop gain never crosses 1.');
   const isBound = stage.stability?.secondPoleText === null;
   return point.phaseMarginDeg === null
-    ? unknown('the phase margin cannot be told')
+    ? unknown('The phase margin cannot be told.')
     : known(point.phaseMarginDeg, isBound);
 }
 

@@ -97,3 +97,32 @@ export function capitalised(text: string): string {
 export function decibelText(value: number, limits: readonly number[] = [], unit: 'dB' | 'dBΩ' = 'dB'): string {
   return quantity(value, unit, decidingDigits(value, digitsForDecimals(value, 2), limits));
 }
+
+/**
+ * A reason as the end of a sentence, without its own full stop and capital.
+ *
+ * @param reason "Slew rate of MRWG-G072 is not entered."
+ * @returns "slew rate of MRWG-G072 is not entered"
+ */
+export function because(reason: string): string {
+  const bare = reason.trim().replace(/\.$/, '');
+  return /^[A-Z][a-z ]/.test(bare) ? bare.charAt(0).toLowerCase() + bare.slice(1) : bare;
+}
+
+/** A reason as a sentence of its own. */
+export function asSentence(reason: string): string {
+  const text = capitalised(reason.trim());
+  return /[.?]$/.test(text) ? text : `${text}.`;
+}
+
+/** Where something that is missing has to be entered; empty when nothing is. */
+export function whereToEnter(reason: string): string {
+  if (!/not entered|missing/.test(reason) || /enter (it|one)/i.test(reason)) return '';
+  if (/input level|DC current of the source/.test(reason)) return ' Enter it in the specification.';
+  return ' Enter it on the device page.';
+}
+
+/** "The slew rate cannot be judged: slew rate of MRWG-G072 is not entered. Enter it on the device page." */
+export function cannotBeTold(what: string, reason: string): string {
+  return `${capitalised(what)} cannot be told: ${because(reason)}.${whereToEnter(reason)}`;
+}

@@ -1,17 +1,19 @@
 import type { ChainFigureKey } from '../report';
 import {
-  chainCornerWorking,
   chainGainWorking,
   chainIdealWorking,
+  differenceWorking,
+  flatnessWorking,
+  worstDroopWorking,
+} from './chain-gain-workings';
+import {
+  chainCornerWorking,
   chainLevelWorking,
   chainOffsetWorking,
   chainPhaseWorking,
   chainRiseTimeWorking,
-  differenceWorking,
-  flatnessWorking,
   groupDelayWorking,
   shrinkageWorking,
-  worstDroopWorking,
   worstHeadroomWorking,
 } from './chain-workings';
 import { inputNoiseWorking, noiseFigureWorking } from './noise-workings';

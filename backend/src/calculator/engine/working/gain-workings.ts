@@ -1,6 +1,7 @@
 import type { Maybe } from '../analysis';
 import { fullLabel, isFeedbackStage } from '../report/facts';
-import { ratioToDb } from '../report/maybe';
+import { combine, ratioToDb } from '../report/maybe';
+import type { WorkingStep } from '../report';
 import { decibelText, setFrequency } from '../text/phrases';
 import { bandData, derivedDatum, loopData, networkData, terminalData } from './data';
 import { complexText, lastStep, magnitude, num, probeAt, step } from './scope';
@@ -124,36 +125,31 @@ export function stageGainWorking(scope: StageScope, frequencyHz: number, where: 
 /** Gain minus ideal gain. The one-pole droop stands beside it, because everybody checks it by hand. */
 export function droopWorking(scope: StageScope, gain: Maybe, frequencyHz: number, where: string): Draft {
   const ideal = scope.stage.analysis.idealGainDb;
-  const both = gain.value !== null && ideal.value !== null;
-  const first = scope.stage.analysis.cornerFirstOrderHz.value;
-  const onePole =
-    first === null
-      ? []
-      : [
-          step(
-            'one pole, for comparison: −10·lg(1 + (f/fcl)²)',
-            `−10·lg(1 + (${setFrequency(frequencyHz)} / ${num(first, 'Hz')})²)`,
-            decibelText(-10 * Math.log10(1 + (frequencyHz / first) ** 2)),
-          ),
-        ];
+  const difference = combine([gain, ideal], (a, b) => a - b).value;
+  const substituted = difference === null ? '—' : `${decibels(gain)} − (${decibels(ideal)})`;
   return {
     title: `Droop of ${fullLabel(scope.stage)} at ${setFrequency(frequencyHz)}, ${where}`,
-    steps: [
-      ...onePole,
-      lastStep(
-        scope,
-        'gain − ideal gain',
-        both ? `${num(gain.value ?? 0)} dB − (${num(ideal.value ?? 0)} dB)` : '—',
-        both ? (gain.value ?? 0) - (ideal.value ?? 0) : null,
-      ),
-    ],
-    data: [
-      ...derivedDatum('gain', gain.value === null ? gain.reason : `${num(gain.value)} dB`),
-      ...derivedDatum('ideal gain', ideal.value === null ? ideal.reason : `${num(ideal.value)} dB`),
-    ],
+    steps: [...onePoleStep(scope, frequencyHz), lastStep(scope, 'gain − ideal gain', substituted, difference)],
+    data: [...derivedDatum('gain', decibels(gain)), ...derivedDatum('ideal gain', decibels(ideal))],
     validity: [SMALL_SIGNAL],
     source: CLOSED_LOOP_SOURCE,
   };
+}
+
+function decibels(value: Maybe): string {
+  return value.value === null ? value.reason : `${num(value.value)} dB`;
+}
+
+function onePoleStep(scope: StageScope, frequencyHz: number): readonly WorkingStep[] {
+  const corner = scope.stage.analysis.cornerFirstOrderHz.value;
+  if (corner === null) return [];
+  return [
+    step(
+      'one pole, for comparison: −10·lg(1 + (f/fcl)²)',
+      `−10·lg(1 + (${setFrequency(frequencyHz)} / ${num(corner, 'Hz')})²)`,
+      decibelText(-10 * Math.log10(1 + (frequencyHz / corner) ** 2)),
+    ),
+  ];
 }
 
 /** Voltage of the node behind the stage over the EMF (or per ampere of the source). */

@@ -5,6 +5,7 @@ import { referenceBandwidthFor } from '../devices/used-values';
 import { gbwMaybe, gbwUsed, worstHeadroom } from '../report/derived';
 import { fullLabel, isFeedbackStage } from '../report/facts';
 import type { StageFacts } from '../report/facts';
+import type { WorkingStep } from '../report';
 import { setFrequency } from '../text/phrases';
 import { bandData, derivedDatum, deviceDatum, networkData, policyDatum } from './data';
 import { complexText, lastStep, magnitude, num, probeAt, step } from './scope';
@@ -19,52 +20,39 @@ import {
 
 /** Midband, resistive noise gain. */
 export function noiseGainWorking(scope: StageScope): Draft {
+  return {
+    title: `Noise gain of ${fullLabel(scope.stage)}`,
+    steps: noiseGainSteps(scope),
+    data: networkData(scope.stage),
+    assumptions: [
+      'Coupling shorted, shunt capacitances removed.',
+      'The noise gain, not the signal gain, sets the bandwidth: an inverting −10 has 11.',
+    ],
+    source: CLOSED_LOOP_SOURCE,
+  };
+}
+
+function noiseGainSteps(scope: StageScope): readonly WorkingStep[] {
   const { noiseGain } = scope.stage.analysis;
   const set = scope.stage.stage;
-  const title = `Noise gain of ${fullLabel(scope.stage)}`;
-  const source = CLOSED_LOOP_SOURCE;
-  if (!isFeedbackStage(set) || noiseGain === null) {
-    return { title, steps: [lastStep(scope, 'no feedback around an amplifier', '—', null)], data: [], source };
-  }
+  if (!isFeedbackStage(set) || noiseGain === null)
+    return [lastStep(scope, 'no feedback around an amplifier', '—', null)];
   const rf = set.feedbackOhm;
-  const rg = typeof set.gainOhm === 'number' ? set.gainOhm : null;
-  const isInverting = set.topology === 'inverting' || set.topology === 'transimpedance';
-  const assumptions = [
-    'Coupling shorted, shunt capacitances removed.',
-    'The noise gain, not the signal gain, sets the bandwidth: an inverting −10 has 11.',
-  ];
-  if (!isInverting) {
-    const value = rg === null ? 1 : 1 + rf / rg;
-    const substituted = rg === null ? '1' : `1 + ${num(rf, 'Ω')} / ${num(rg, 'Ω')}`;
-    return {
-      title,
-      steps: [lastStep(scope, rg === null ? '1' : '1 + Rf/Rg', substituted, value)],
-      data: networkData(scope.stage),
-      assumptions,
-      source,
-    };
+  const rg = set.gainOhm ?? 0;
+  if (set.topology === 'follower') return [lastStep(scope, '1', '1', 1)];
+  if (set.topology === 'non-inverting') {
+    return [lastStep(scope, '1 + Rf/Rg', `1 + ${num(rf, 'Ω')} / ${num(rg, 'Ω')}`, 1 + rf / rg)];
   }
-  const legOhm = rf / (noiseGain - 1);
-  const frontOhm = Math.max(0, legOhm - (rg ?? 0));
-  return {
-    title,
-    steps: [
-      step(
-        'resistance in front of the stage, Rs',
-        'source or stage in front, with its termination',
-        num(frontOhm, 'Ω'),
-      ),
-      lastStep(
-        scope,
-        '1 + Rf/(Rs + Rg)',
-        `1 + ${num(rf, 'Ω')} / (${num(frontOhm, 'Ω')} + ${num(rg ?? 0, 'Ω')})`,
-        1 + rf / (frontOhm + (rg ?? 0)),
-      ),
-    ],
-    data: networkData(scope.stage),
-    assumptions,
-    source,
-  };
+  const frontOhm = Math.max(0, rf / (noiseGain - 1) - rg);
+  return [
+    step('resistance in front of the stage, Rs', 'source or stage in front, with its termination', num(frontOhm, 'Ω')),
+    lastStep(
+      scope,
+      '1 + Rf/(Rs + Rg)',
+      `1 + ${num(rf, 'Ω')} / (${num(frontOhm, 'Ω')} + ${num(rg, 'Ω')})`,
+      1 + rf / (frontOhm + rg),
+    ),
+  ];
 }
 
 /** |noise gain| at a frequency, all capacitances in it. */

@@ -1,15 +1,14 @@
+import { sourcePeak } from '../chain/levels';
 import { headroomNegativeFor, headroomPositiveFor } from '../devices/amplifier-values';
-import { outputCurrentAvailable, slewAvailable } from '../report/derived';
+import { outputCurrentAvailable } from '../report/derived';
 import { fullLabel, isFeedbackStage } from '../report/facts';
 import type { ChainFacts } from '../report/facts';
-import type { WorkingDatum } from '../report';
+import type { WorkingDatum, WorkingStep } from '../report';
 import type { Source } from '../types';
-import { setFrequency } from '../text/phrases';
-import { bandData, derivedDatum, deviceDatum, networkData, policyDatum, specified } from './data';
-import { usedFormula } from './gbw-workings';
+import { derivedDatum, deviceDatum, networkData, specified } from './data';
 import { lastStep, num, step } from './scope';
 import type { Draft, StageScope } from './scope';
-import { COMMON_PRACTICE, DATASHEET_CONDITIONS, FEEDBACK_SOURCE, NETWORK_SOURCE, SLEW_SOURCE } from './sources';
+import { COMMON_PRACTICE, DATASHEET_CONDITIONS, FEEDBACK_SOURCE, NETWORK_SOURCE } from './sources';
 
 /** The source's peak EMF (or peak current) at its largest level, with the formula that reads the level. */
 export interface PeakLevel {
@@ -20,54 +19,47 @@ export interface PeakLevel {
   readonly data: readonly WorkingDatum[];
 }
 
-/** Reads the largest level of a source as a peak value; the nominal one stands in where no largest is set. */
+/** Reads the largest level of a source as a peak value. */
 export function peakLevel(source: Source): PeakLevel {
-  const level = source.largestLevel ?? source.nominalLevel;
-  if (level === undefined) return { formula: 'no level set', substituted: '—', value: null, unit: 'V', data: [] };
+  const level = source.largestLevel;
+  if (level === undefined)
+    return { formula: 'no largest level set', substituted: '—', value: null, unit: 'V', data: [] };
+  const value = sourcePeak(source, level);
   if (source.kind === 'current') {
     return {
       formula: 'I peak',
       substituted: num(level, 'A'),
-      value: level,
+      value,
       unit: 'A',
       data: specified('largest level', level, 'A'),
     };
   }
-  switch (source.levelKind) {
-    case 'peak-emf':
-      return {
-        formula: 'E peak',
-        substituted: num(level, 'V'),
-        value: level,
-        unit: 'V',
-        data: specified('largest level, peak EMF', level, 'V'),
-      };
-    case 'rms-emf':
-      return {
-        formula: 'E peak = √2·E rms',
-        substituted: `√2 · ${num(level, 'V')}`,
-        value: Math.SQRT2 * level,
-        unit: 'V',
-        data: specified('largest level, rms EMF', level, 'V'),
-      };
-    default: {
-      const watt = 1e-3 * 10 ** (level / 10);
-      return {
-        formula: 'E peak = √(8·Rs·P)',
-        substituted: `√(8 · ${num(source.resistanceOhm, 'Ω')} · ${num(watt, 'W')})`,
-        value: Math.sqrt(8 * source.resistanceOhm * watt),
-        unit: 'V',
-        data: [
-          {
-            label: 'largest level, available power',
-            value: `${num(level)} dBm`,
-            origin: 'specification',
-            assumed: false,
-          },
-        ],
-      };
-    }
-  }
+  if (source.levelKind === 'available-power') return powerLevel(source.resistanceOhm, level, value);
+  const isPeak = source.levelKind === 'peak-emf';
+  return {
+    formula: isPeak ? 'E peak' : 'E peak = √2·E rms',
+    substituted: isPeak ? num(level, 'V') : `√2 · ${num(level, 'V')}`,
+    value,
+    unit: 'V',
+    data: specified(`largest level, ${isPeak ? 'peak' : 'rms'} EMF`, level, 'V'),
+  };
+}
+
+function powerLevel(resistanceOhm: number, levelDbm: number, value: number): PeakLevel {
+  return {
+    formula: 'E peak = √(8·Rs·P)',
+    substituted: `√(8 · ${num(resistanceOhm, 'Ω')} · ${num(1e-3 * 10 ** (levelDbm / 10), 'W')})`,
+    value,
+    unit: 'V',
+    data: [
+      {
+        label: 'largest level, available power',
+        value: `${num(levelDbm)} dBm`,
+        origin: 'specification',
+        assumed: false,
+      },
+    ],
+  };
 }
 
 /** Peak voltage at the amplifier's own output. */
@@ -100,139 +92,62 @@ export function outputLevelWorking(scope: StageScope): Draft {
 
 /** Peak swing that rails, device and offset leave. */
 export function swingAvailableWorking(scope: StageScope): Draft {
-  const { device, analysis } = scope.stage;
   const { supply } = scope.facts.input.specification;
-  const title = `Swing available in ${fullLabel(scope.stage)}`;
-  const available = analysis.swingAvailableV.value;
-  if (!device || device.kind === 'matched-block' || available === null) {
-    return { title, steps: [lastStep(scope, 'not known', '—', null)], data: [], source: COMMON_PRACTICE };
-  }
-  const positive = headroomPositiveFor(device);
-  const negative = headroomNegativeFor(device);
-  const up = supply.positiveV - (positive?.value ?? 0);
-  const down = supply.negativeV + (negative?.value ?? 0);
   return {
-    title,
-    steps: [
-      step('highest output', `${num(supply.positiveV, 'V')} − ${num(positive?.value ?? 0, 'V')}`, num(up, 'V')),
-      step('lowest output', `${num(supply.negativeV, 'V')} + ${num(negative?.value ?? 0, 'V')}`, num(down, 'V')),
-      step(
-        'DC taken off: how far the output rests from the middle',
-        'offset or bias point',
-        num((up - down) / 2 - available, 'V'),
-      ),
-      lastStep(
-        scope,
-        '(highest − lowest)/2 − DC',
-        `(${num(up, 'V')} − (${num(down, 'V')}))/2 − ${num((up - down) / 2 - available, 'V')}`,
-        available,
-      ),
-    ],
+    title: `Swing available in ${fullLabel(scope.stage)}`,
+    steps: swingSteps(scope),
     data: [
       ...specified('positive rail', supply.positiveV, 'V'),
       ...specified('negative rail', supply.negativeV, 'V'),
-      ...deviceDatum(scope.stage, 'distance from the positive rail', positive, 'V'),
-      ...deviceDatum(scope.stage, 'distance from the negative rail', negative, 'V'),
-      ...derivedDatum(
-        'output offset',
-        analysis.outputOffsetV.value === null ? analysis.outputOffsetV.reason : num(analysis.outputOffsetV.value, 'V'),
-      ),
+      ...swingData(scope),
     ],
+    assumptions: supply.negativeV === 0 ? ['On a single supply the output rests at half of it.'] : [],
     validity: [DATASHEET_CONDITIONS],
     source: COMMON_PRACTICE,
   };
 }
 
-/** Have ÷ need of a level. */
-export function ratioWorking(
-  scope: StageScope,
-  what: {
-    title: string;
-    formula: string;
-    have: number | null;
-    need: number | null;
-    unit: 'V' | 'A' | 'V/s';
-    target: string;
-  },
-): Draft {
-  const { have, need, unit } = what;
-  const both = have !== null && need !== null && need !== 0;
-  return {
-    title: `${what.title} of ${fullLabel(scope.stage)}`,
-    steps: [
-      lastStep(scope, what.formula, both ? `${num(have, unit)} / ${num(need, unit)}` : '—', both ? have / need : null),
-    ],
-    data: [
-      ...derivedDatum('have', have === null ? 'not known' : num(have, unit)),
-      ...derivedDatum('need', need === null ? 'not known' : num(need, unit)),
-      ...policyDatum('margin', what.target),
-    ],
-    validity: [DATASHEET_CONDITIONS],
-    source: COMMON_PRACTICE,
-  };
+function swingSteps(scope: StageScope): readonly WorkingStep[] {
+  const { device, analysis } = scope.stage;
+  const { supply } = scope.facts.input.specification;
+  if (!device || device.kind === 'matched-block' || analysis.swingAvailableV.value === null) {
+    return [lastStep(scope, 'smaller way to a rail − offset', '—', null)];
+  }
+  const above = headroomPositiveFor(device)?.value ?? 0;
+  const below = headroomNegativeFor(device)?.value ?? 0;
+  const restV = supply.negativeV === 0 ? supply.positiveV / 2 : 0;
+  const up = supply.positiveV - above - restV;
+  const down = restV - supply.negativeV - below;
+  const offset = analysis.outputOffsetV.value ?? 0;
+  const rest = num(restV, 'V');
+  return [
+    step('way up', `${num(supply.positiveV, 'V')} − ${num(above, 'V')} − ${rest}`, num(up, 'V')),
+    step('way down', `${rest} − (${num(supply.negativeV, 'V')}) − ${num(below, 'V')}`, num(down, 'V')),
+    lastStep(
+      scope,
+      'smaller way − offset',
+      `${num(Math.min(up, down), 'V')} − ${num(offset, 'V')}`,
+      Math.min(up, down) - offset,
+    ),
+  ];
 }
 
-/** Slew rate of a sine. */
-export function slewNeededWorking(scope: StageScope): Draft {
-  const { highHz } = scope.facts.input.specification.band;
-  const peak = scope.stage.analysis.outputPeakV.value;
-  return {
-    title: `Slew rate needed by ${fullLabel(scope.stage)} at ${setFrequency(highHz)}`,
-    steps: [
-      lastStep(
-        scope,
-        '2π·f·V peak',
-        peak === null ? '—' : `2π · ${num(highHz, 'Hz')} · ${num(peak, 'V')}`,
-        peak === null ? null : 2 * Math.PI * highHz * peak,
-      ),
-    ],
-    data: [...bandData(scope.facts), ...derivedDatum('output level', peak === null ? 'not known' : num(peak, 'V'))],
-    assumptions: ['A sine of the largest level at the top of the band, ideal gain.'],
-    source: SLEW_SOURCE,
-  };
-}
-
-/** The device's slew rate as judged. */
-export function slewAvailableWorking(scope: StageScope): Draft {
-  const used = scope.stage.analysis.slewAvailable;
-  const title = `Slew rate of ${fullLabel(scope.stage)}`;
-  if (!used) return { title, steps: [lastStep(scope, 'not known', '—', null)], data: [], source: SLEW_SOURCE };
-  const { formula, substituted } = usedFormula({ ...used, value: used.value / 1e6 }, 'slew rate');
-  return {
-    title,
-    steps: [lastStep(scope, formula, `${substituted} V/µs`, used.value)],
-    data: [
-      ...deviceDatum(scope.stage, 'slew rate', used, 'V/s'),
-      ...(used.basis === 'typ-derated' ? policyDatum('slew derating', num(scope.facts.policy.slewDerating)) : []),
-    ],
-    assumptions:
-      used.basis === 'typ-derated' ? ['The datasheet gives no minimum: typical × derating, common practice.'] : [],
-    validity: [DATASHEET_CONDITIONS],
-    source: COMMON_PRACTICE,
-  };
-}
-
-/** Highest frequency of a full sine at this level. */
-export function fullPowerWorking(scope: StageScope): Draft {
-  const have = slewAvailable(scope.stage).value;
-  const peak = scope.stage.analysis.outputPeakV.value;
-  const both = have !== null && peak !== null && peak !== 0;
-  return {
-    title: `Full-power bandwidth of ${fullLabel(scope.stage)}`,
-    steps: [
-      lastStep(
-        scope,
-        'SR / (2π·V peak)',
-        both ? `${num(have, 'V/s')} / (2π · ${num(peak, 'V')})` : '—',
-        both ? have / (2 * Math.PI * peak) : null,
-      ),
-    ],
-    data: [
-      ...deviceDatum(scope.stage, 'slew rate', scope.stage.analysis.slewAvailable, 'V/s'),
-      ...derivedDatum('output level', peak === null ? 'not known' : num(peak, 'V')),
-    ],
-    source: SLEW_SOURCE,
-  };
+function swingData(scope: StageScope): readonly WorkingDatum[] {
+  const { device, analysis } = scope.stage;
+  if (!device || device.kind === 'matched-block') return [];
+  const { outputOffsetV } = analysis;
+  return [
+    ...deviceDatum(scope.stage, 'distance from the positive rail', headroomPositiveFor(device), 'V'),
+    ...deviceDatum(scope.stage, 'distance from the negative rail', headroomNegativeFor(device), 'V'),
+    outputOffsetV.value === null
+      ? { label: 'output offset', value: '0 V', origin: outputOffsetV.reason, assumed: true }
+      : {
+          label: 'output offset',
+          value: num(outputOffsetV.value, 'V'),
+          origin: 'calculated; has its own working',
+          assumed: false,
+        },
+  ];
 }
 
 /** Peak current out of the amplifier. */

@@ -1,6 +1,7 @@
 import { worsePoint } from '../report/stage-figures';
 import { fullLabel } from '../report/facts';
 import { ratioToDb } from '../report/maybe';
+import type { WorkingStep } from '../report';
 import { basisText, setFrequency } from '../text/phrases';
 import { bandData, derivedDatum, deviceDatum, loopData, networkData, policyDatum } from './data';
 import { stageNodes } from './gain-workings';
@@ -127,30 +128,37 @@ function gbwRangeData(scope: StageScope): Draft['data'] {
 
 /** Phase margin at the worse end of the GBW range. */
 export function phaseMarginWorking(scope: StageScope): Draft {
-  const { stability } = scope.stage;
-  const point = worsePoint(scope.stage);
-  const margin = point?.phaseMarginDeg ?? null;
-  const at = point?.crossingHz ?? null;
-  const used = stability ? (stability.worse === 'maximum' ? stability.maximumGbw : stability.minimumGbw) : null;
-  const ends = stability ? `${stability.worse} GBW (${used ? basisText(used) : ''})` : '';
+  const margin = worsePoint(scope.stage)?.phaseMarginDeg ?? null;
+  const substituted = margin === null ? '—' : `180° + (${num(margin - 180)}°)`;
   return {
     title: `Phase margin of ${fullLabel(scope.stage)}`,
-    steps: [
-      ...(at === null || margin === null
-        ? []
-        : [step('|T(f)| = 1', `loaded loop, ${ends}`, `${num(at, 'Hz')}, ∠T = ${num(margin - 180)}°`)]),
-      lastStep(scope, '180° + ∠T, unwrapped from DC', margin === null ? '—' : `180° + (${num(margin - 180)}°)`, margin),
-    ],
+    steps: [...crossingSteps(scope), lastStep(scope, '180° + ∠T, unwrapped from DC', substituted, margin)],
     data: [...gbwRangeData(scope), ...loopData(scope.facts, scope.stage), ...networkData(scope.stage)],
-    assumptions: [
-      'Looked at with the smallest and the largest GBW; the worse counts in every case.',
-      'Of several crossings the smallest margin counts.',
-      ...(stability?.secondPoleText === null ? ['No second pole known: an upper bound.'] : []),
-      ...(stability?.outputResistanceKnown === false ? ['No output resistance known: taken as 0.'] : []),
-    ],
+    assumptions: phaseMarginAssumptions(scope),
     validity: [LINEAR_NETWORK],
     source: STABILITY_SOURCE,
   };
+}
+
+function crossingSteps(scope: StageScope): readonly WorkingStep[] {
+  const { stability } = scope.stage;
+  const point = worsePoint(scope.stage);
+  if (!stability || !point || point.crossingHz === null || point.phaseMarginDeg === null) return [];
+  const used = stability.worse === 'maximum' ? stability.maximumGbw : stability.minimumGbw;
+  const substituted = `loaded loop, ${stability.worse} GBW (${basisText(used)})`;
+  return [step('|T(f)| = 1', substituted, `${num(point.crossingHz, 'Hz')}, ∠T = ${num(point.phaseMarginDeg - 180)}°`)];
+}
+
+function phaseMarginAssumptions(scope: StageScope): readonly string[] {
+  const { stability } = scope.stage;
+  const always = [
+    'Looked at with the smallest and the largest GBW; the worse counts in every case.',
+    'Of several crossings the smallest margin counts.',
+  ];
+  if (!stability) return always;
+  if (stability.secondPoleText === null) always.push('No second pole known: an upper bound.');
+  if (!stability.outputResistanceKnown) always.push('No output resistance known: taken as 0.');
+  return always;
 }
 
 /** Peaking of the closed loop at the worse end of the GBW range. */

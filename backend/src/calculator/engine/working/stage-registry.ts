@@ -19,15 +19,12 @@ import {
 } from './gbw-workings';
 import {
   currentHave,
-  fullPowerWorking,
   outputCurrentWorking,
   outputLevelWorking,
   outputOffsetWorking,
-  ratioWorking,
-  slewAvailableWorking,
-  slewNeededWorking,
   swingAvailableWorking,
 } from './level-workings';
+import { fullPowerWorking, ratioWorking, slewAvailableWorking, slewNeededWorking } from './slew-workings';
 import {
   bandwidthRatioWorking,
   cornerWorking,
