@@ -26,6 +26,7 @@ export class NodalChain {
   private readonly whole: ChainCircuit;
   private readonly solver: Solver;
   private readonly signal: Solution;
+  private readonly ports = new Map<number, NodalPort>();
 
   constructor(input: ChainInput, gbwCase: GbwCase, frequencyHz: number) {
     this.context = chainContext(input, gbwCase, frequencyHz);
@@ -54,6 +55,12 @@ export class NodalChain {
 
   /** Open-circuit voltage, impedance and noise behind stage k with everything that follows cut off. */
   port(k: number): NodalPort {
+    const known = this.ports.get(k) ?? this.solvePort(k);
+    this.ports.set(k, known);
+    return known;
+  }
+
+  private solvePort(k: number): NodalPort {
     const cut = chainCircuit(this.context, { first: 0, last: k, withSource: true, withLoad: false });
     const solver = cut.circuit.solver();
     const out = cut.nodes[k + 1];
