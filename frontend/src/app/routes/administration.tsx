@@ -1,5 +1,17 @@
+import { EmptyState } from '../../components/empty-state';
 import { Page } from '../../components/page';
+import { useHasRole } from '../../components/session-context';
+import { PeoplePage } from '../../features/administration/components/people-page';
 
 export function Component() {
-  return <Page>{null}</Page>;
+  const administrates = useHasRole('admin');
+  return (
+    <Page>
+      {administrates ? (
+        <PeoplePage />
+      ) : (
+        <EmptyState title="Only administrators manage people">Ask one of them for an account or a role.</EmptyState>
+      )}
+    </Page>
+  );
 }
