@@ -60,13 +60,14 @@ function whereSpent(response: ChainResponse, k: number, limitHz: number, guessHz
   };
   let from = Math.log(guessHz);
   let atFrom = excess(from);
+  if (Math.abs(atFrom) < 1e-14) return guessHz;
   const step = atFrom > 0 ? -0.25 : 0.25;
   for (let count = 0; count < 200; count++) {
     // The product runs nearly with f: a step of its whole excess mostly lands beside the answer.
     const to = from + Math.sign(step) * Math.max(Math.abs(step), Math.abs(atFrom) * 1.02);
     const atTo = excess(to);
     if (!Number.isFinite(atTo)) return null;
-    if (atTo > 0 !== atFrom > 0) return Math.exp(findRoot(excess, from, atFrom, to, atTo, 1e-10));
+    if (atTo > 0 !== atFrom > 0) return Math.exp(findRoot(excess, from, atFrom, to, atTo, 1e-12));
     from = to;
     atFrom = atTo;
   }

@@ -10,6 +10,8 @@ export interface AmplifierNoise {
   readonly voltageCornerHz: number;
   readonly plusCurrentAPerRtHz: number | null;
   readonly minusCurrentAPerRtHz: number | null;
+  /** What the current noise of the − input is called in the device's data. */
+  readonly minusCurrentDatum: string;
   readonly currentCornerHz: number;
   readonly ambientK: number;
 }
@@ -104,21 +106,27 @@ export function feedbackNoise(
     ...networkSources(parts, atAmplifier, front, omega, fourKT, transfers),
     ...resistorSources(parts, fourKT, transfers),
   ];
-  const missing: string[] = [];
+  const missing = new Set<string>();
   const { inverting } = parts.values;
-  const device = (label: string, density: number | null, cornerHz: number, transfer: number): void => {
-    if (density === null) missing.push(label);
+  const device = (label: string, datum: string, density: number | null, cornerHz: number, transfer: number): void => {
+    if (density === null) missing.add(datum);
     else sources.push({ label, v2PerHzAtOutput: withCorner(density, cornerHz, omega) * transfer });
   };
-  device('voltage noise', noise.voltageVPerRtHz, noise.voltageCornerHz, magnitudeSquared(transfers.voltage));
+  device(
+    'voltage noise',
+    'voltage noise',
+    noise.voltageVPerRtHz,
+    noise.voltageCornerHz,
+    magnitudeSquared(transfers.voltage),
+  );
   if (!inverting) {
     const zp = complex(parts.zpRe, parts.zpIm);
     const plus = magnitudeSquared(multiply(zp, transfers.plusEmf));
-    device('current noise, + input', noise.plusCurrentAPerRtHz, noise.currentCornerHz, plus);
+    device('current noise, + input', 'current noise', noise.plusCurrentAPerRtHz, noise.currentCornerHz, plus);
   }
   const minus = magnitudeSquared(transfers.nodeCurrent);
-  device('current noise, − input', noise.minusCurrentAPerRtHz, noise.currentCornerHz, minus);
-  return { sources, missing };
+  device('current noise, − input', noise.minusCurrentDatum, noise.minusCurrentAPerRtHz, noise.currentCornerHz, minus);
+  return { sources, missing: [...missing] };
 }
 
 /** Rt and Rbias: EMFs at the network's output, which the amplifier amplifies like its signal. */

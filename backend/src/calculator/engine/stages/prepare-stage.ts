@@ -1,3 +1,4 @@
+import type { UsedValue } from '../analysis';
 import { DEFAULT_AMBIENT_K } from '../constants';
 import {
   invertingInputResistanceFor,
@@ -90,43 +91,56 @@ export function prepareStage(stage: Stage, device: Device | null, context: Prepa
   return { ...nothing, ...currentFeedback(stage, device as CurrentFeedbackDevice, context) };
 }
 
-function feedbackValues(stage: FeedbackStage, device: AmplifierDevice): FeedbackPartValues {
+/** The parts outside the amplifier; absent ones as 0 or null. */
+function surroundings(stage: FeedbackStage) {
+  const { feedbackF = 0, isolationOhm = 0, terminationOhm = null, couplingF = null, biasOhm = null } = stage;
   const inverting = isInverting(stage);
-  const gainOhm = stage.topology === 'transimpedance' || stage.topology === 'follower' ? null : stage.gainOhm;
-  const inputOhm = parasitic(device.inputResistanceOhm)?.value ?? 0;
-  const inputF = parasitic(device.commonModeCapacitanceF)?.value ?? 0;
   return {
     inverting,
     feedbackOhm: stage.feedbackOhm,
-    feedbackF: stage.feedbackF ?? 0,
-    seriesOhm: inverting ? (gainOhm ?? 0) : 0,
-    gainS: !inverting && gainOhm ? 1 / gainOhm : 0,
-    nodeF: inputF + (stage.strayF ?? 0),
-    inputS: inputOhm > 0 ? 1 / inputOhm : 0,
-    inputF,
-    outputOhm: outputResistanceFor(device).value,
-    isolationOhm: stage.isolationOhm ?? 0,
-    terminationOhm: stage.terminationOhm ?? null,
-    couplingF: stage.couplingF ?? null,
-    biasOhm: inverting ? null : (stage.biasOhm ?? null),
+    feedbackF,
+    isolationOhm,
+    terminationOhm,
+    couplingF,
+    biasOhm: inverting ? null : biasOhm,
   };
 }
 
-function amplifierNoise(device: AmplifierDevice, context: PrepareContext): AmplifierNoise {
-  const { corner } = context;
-  const plus = upperWorst(device.currentNoiseAPerRtHz, corner)?.value ?? null;
-  const minus =
-    device.kind === 'current-feedback'
-      ? (upperWorst(device.invertingCurrentNoiseAPerRtHz, corner)?.value ?? null)
-      : plus;
+function feedbackValues(stage: FeedbackStage, device: AmplifierDevice): FeedbackPartValues {
+  const { strayF = 0, gainOhm } = stage;
+  const inputOhm = valueOr(parasitic(device.inputResistanceOhm), Infinity);
+  const inputF = valueOr(parasitic(device.commonModeCapacitanceF), 0);
   return {
-    voltageVPerRtHz: upperWorst(device.voltageNoiseVPerRtHz, corner)?.value ?? null,
-    voltageCornerHz: device.voltageNoiseCornerHz ?? 0,
-    plusCurrentAPerRtHz: plus,
-    minusCurrentAPerRtHz: minus,
-    currentCornerHz: device.currentNoiseCornerHz ?? 0,
-    ambientK: context.ambientK ?? DEFAULT_AMBIENT_K,
+    ...surroundings(stage),
+    seriesOhm: stage.topology === 'inverting' ? (gainOhm ?? 0) : 0,
+    gainS: stage.topology === 'non-inverting' && gainOhm ? 1 / gainOhm : 0,
+    nodeF: inputF + strayF,
+    inputS: 1 / inputOhm,
+    inputF,
+    outputOhm: outputResistanceFor(device).value,
   };
+}
+
+function valueOr<T>(used: UsedValue | null, fallback: T): number | T {
+  return used ? used.value : fallback;
+}
+
+function amplifierNoise(device: AmplifierDevice, context: PrepareContext): AmplifierNoise {
+  const { corner, ambientK = DEFAULT_AMBIENT_K } = context;
+  const { voltageNoiseCornerHz = 0, currentNoiseCornerHz = 0 } = device;
+  const plus = valueOr(upperWorst(device.currentNoiseAPerRtHz, corner), null);
+  const common = {
+    voltageVPerRtHz: valueOr(upperWorst(device.voltageNoiseVPerRtHz, corner), null),
+    voltageCornerHz: voltageNoiseCornerHz,
+    plusCurrentAPerRtHz: plus,
+    currentCornerHz: currentNoiseCornerHz,
+    ambientK,
+  };
+  if (device.kind === 'voltage-feedback') {
+    return { ...common, minusCurrentAPerRtHz: plus, minusCurrentDatum: 'current noise' };
+  }
+  const minus = valueOr(upperWorst(device.invertingCurrentNoiseAPerRtHz, corner), null);
+  return { ...common, minusCurrentAPerRtHz: minus, minusCurrentDatum: 'current noise of the inverting input' };
 }
 
 function voltageFeedback(stage: FeedbackStage, device: VoltageFeedbackDevice, context: PrepareContext) {
