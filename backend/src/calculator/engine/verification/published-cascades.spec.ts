@@ -105,16 +105,16 @@ describe('published cases: transimpedance', () => {
       const expectedF = published.expected.feedbackPf * 1e-12;
       const bandwidth = naturalFrequency(transimpedance(gbw, ohm, totalF - expectedF, expectedF));
       // The capacitor for which Rf·Cf turns the feedback by 45° there.
-      const feedbackF = leadCapacitor((farad) => transimpedance(gbw, ohm, totalF - farad, farad), bandwidth);
+      const feedbackF = leadCapacitor((farad) => transimpedance(gbw, ohm, totalF - farad, farad), bandwidth, totalF);
       return { feedbackPf: feedbackF * 1e12, bandwidthMHz: bandwidth / 1e6 };
     });
   }
 
   /** Cf for which the noise gain's phase is 45° below that of a pure 1 + s·Rf·CT. */
-  function leadCapacitor(build: (farad: number) => ChainInput, hz: number): number {
+  function leadCapacitor(build: (farad: number) => ChainInput, hz: number, limitF: number): number {
     const phase = (farad: number): number => argument(probeChain(build(farad), 'minimum', hz).stages[0].noiseGain!);
     const without = phase(0);
-    let [low, high] = [1e-15, 1e-9];
+    let [low, high] = [1e-15, limitF];
     for (let i = 0; i < 100; i++) {
       const middle = Math.sqrt(low * high);
       if (without - phase(middle) < Math.PI / 4) low = middle;

@@ -55,6 +55,7 @@ export function randomChain(seed: number): ChainInput {
   for (let k = 0; k < count; k++) {
     const device = randomDevice(random, `d${k}`);
     const stage = randomStage(random, k, device);
+    if ('topology' in stage && stage.topology === 'transimpedance' && k > 0) stages.push(notFromZeroOhm(stages.pop()!));
     stages.push(stage);
     if ('deviceId' in stage) devices.push(device);
   }
@@ -65,6 +66,13 @@ export function randomChain(seed: number): ChainInput {
     gainBasis: source.kind === 'current' ? 'transimpedance' : 'voltage',
     ...(random.chance(0.5) ? { ambientK: random.between(233, 398) } : {}),
   });
+}
+
+/** The inverting node of a transimpedance stage cannot be fed from 0 Ω: a resistor behind what stands in front. */
+function notFromZeroOhm(front: Stage): Stage {
+  if (front.kind === 'matched-block') return front;
+  if (front.kind === 'rc-section') return { ...front, seriesOhm: front.seriesOhm ?? 100 };
+  return { ...front, isolationOhm: front.isolationOhm ?? 50 };
 }
 
 function randomSource(random: SeededRandom): Source {
@@ -179,7 +187,7 @@ function randomStage(random: SeededRandom, k: number, device: Device): Stage {
       kind: 'current-feedback' as const,
       deviceId: device.id,
       topology,
-      ...feedbackParts(random, k, topology),
+      ...feedbackParts(random, topology),
       feedbackF: random.maybe(0.2, () => random.logBetween(1e-14, 1e-12)),
     });
   }
@@ -189,12 +197,12 @@ function randomStage(random: SeededRandom, k: number, device: Device): Stage {
     kind: 'voltage-feedback' as const,
     deviceId: device.id,
     topology,
-    ...feedbackParts(random, k, topology),
+    ...feedbackParts(random, topology),
     feedbackF: random.maybe(0.4, () => random.logBetween(1e-14, 2e-11)),
   });
 }
 
-function feedbackParts(random: SeededRandom, k: number, topology: VoltageFeedbackStage['topology']) {
+function feedbackParts(random: SeededRandom, topology: VoltageFeedbackStage['topology']) {
   const noGainResistor = topology === 'follower' || topology === 'transimpedance';
   const feedbackOhm = topology === 'follower' && random.chance(0.5) ? 0 : random.logBetween(100, 1e5);
   return {
@@ -203,14 +211,13 @@ function feedbackParts(random: SeededRandom, k: number, topology: VoltageFeedbac
     strayF: random.maybe(0.5, () => random.logBetween(1e-13, 5e-12)),
     terminationOhm: random.maybe(0.3, () => random.logBetween(30, 1e4)),
     isolationOhm: random.maybe(0.5, () => random.logBetween(1, 200)),
-    ...inputCoupling(random, k, topology),
+    ...inputCoupling(random, topology),
   };
 }
 
-/** A transimpedance stage behind another is fed through a capacitor: its node must not be fed from 0 Ω. */
-function inputCoupling(random: SeededRandom, k: number, topology: VoltageFeedbackStage['topology']) {
+function inputCoupling(random: SeededRandom, topology: VoltageFeedbackStage['topology']) {
   const plusFed = topology === 'non-inverting' || topology === 'follower';
-  const coupled = random.chance(0.5) || (topology === 'transimpedance' && k > 0);
+  const coupled = random.chance(0.5);
   const biased = plusFed && (coupled || random.chance(0.3));
   return {
     couplingF: coupled ? random.logBetween(1e-11, 1e-6) : undefined,

@@ -9,7 +9,7 @@ import type { ChainInput } from '../types';
 /** Half of the last printed digit. */
 function expectPrinted(actual: number, printed: string): void {
   const decimals = printed.split('.')[1]?.length ?? 0;
-  expect(actual.toFixed(decimals).replace('-0.00', '0.00')).toBe(printed);
+  expect(actual.toFixed(decimals)).toBe(printed);
 }
 
 const OPTIONS: readonly ReceiverOption[] = ['Baseline', 'A', 'B', 'C'];
