@@ -1,4 +1,5 @@
 import { randomBytes } from 'node:crypto';
+import type { Server } from 'node:http';
 import type { LogLevel as NestLogLevel } from '@nestjs/common';
 import { NestFactory } from '@nestjs/core';
 import type { NestExpressApplication } from '@nestjs/platform-express';
@@ -7,10 +8,14 @@ import type { AppConfig, LogLevel } from './config/environment';
 import { Runtime } from './config/runtime';
 import { configureApp } from './configure-app';
 import { databaseFile, prepareDataFolder, sessionSecretOf } from './database/data-folder';
-import { settleDataKind } from './database/data-kind';
+import { seedDemo } from './database/demo/seed-demo';
+import { DEMO_SEEDED_KEY, settleDataKind } from './database/data-kind';
 import { migrateDatabase } from './database/migrator';
-import { acquireServerLock } from './database/server-lock';
-import { WriteQueue } from './database/write-queue';
+import { acquireServerLock, type ServerLock } from './database/server-lock';
+import { SettingsService } from './settings/settings.service';
+
+/** After this long a stop no longer waits for requests. */
+const REQUESTS_MAY_TAKE_MS = 1000;
 
 const NEST_LEVELS: Readonly<Record<LogLevel, NestLogLevel[]>> = {
   error: ['fatal', 'error'],
@@ -34,6 +39,15 @@ async function createRuntime(config: AppConfig): Promise<Runtime> {
   return new Runtime(config, sessionSecretOf(config.dataDir, config.sessionSecret), demo, setupToken);
 }
 
+/** Requests under way may end; a client that does not let go is cut off. Then the databases and the folder are free. */
+async function closeApp(app: NestExpressApplication, lock: ServerLock): Promise<void> {
+  const server = app.getHttpServer() as Server;
+  const cutOff = setTimeout(() => server.closeAllConnections(), REQUESTS_MAY_TAKE_MS);
+  await app.close();
+  clearTimeout(cutOff);
+  await lock.release();
+}
+
 /** Takes the data folder, brings its database up to date and builds the application, ready to listen. */
 export async function bootApp(config: AppConfig): Promise<BootedApp> {
   prepareDataFolder(config.dataDir);
@@ -43,17 +57,13 @@ export async function bootApp(config: AppConfig): Promise<BootedApp> {
     const app = await NestFactory.create<NestExpressApplication>(AppModule.register(runtime), {
       bodyParser: false,
       abortOnError: false,
-      forceCloseConnections: true,
       logger: NEST_LEVELS[config.logLevel],
     });
     configureApp(app);
     await app.init();
-    const close = async (): Promise<void> => {
-      await app.get(WriteQueue).idle();
-      await app.close();
-      await lock.release();
-    };
-    return { app, runtime, close };
+    if (runtime.demo && (await app.get(SettingsService, { strict: false }).find(DEMO_SEEDED_KEY)) === null)
+      await seedDemo(app);
+    return { app, runtime, close: () => closeApp(app, lock) };
   } catch (error) {
     await lock.release();
     throw error;

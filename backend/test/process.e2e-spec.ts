@@ -1,6 +1,7 @@
 import { type ChildProcess, spawn } from 'node:child_process';
 import { once } from 'node:events';
 import { existsSync, mkdtempSync, rmSync } from 'node:fs';
+import { type IncomingMessage, request as httpRequest } from 'node:http';
 import { createServer } from 'node:net';
 import type { AddressInfo } from 'node:net';
 import { tmpdir } from 'node:os';
@@ -75,6 +76,27 @@ describe('the server process', () => {
     expect(response.status).toBe(200);
     child.kill('SIGTERM');
     expect(await ended).toMatchObject({ code: 0, signal: null });
+  });
+
+  it('answers a request that is under way before it stops', async () => {
+    const { child, ready, ended } = start();
+    const url = `${await ready}/api/session`;
+    const headers = { 'Content-Type': 'application/json', 'X-Requested-With': 'bandledger', Expect: '100-continue' };
+    const request = httpRequest(url, { method: 'POST', headers });
+    const answered = once(request, 'response') as Promise<[IncomingMessage]>;
+    request.flushHeaders();
+    await once(request, 'continue');
+    child.kill('SIGTERM');
+    const stillListening = () =>
+      fetch(url).then(
+        () => true,
+        () => false,
+      );
+    while (await stillListening());
+    request.end('{}');
+    const [response] = await answered;
+    expect(response.resume().statusCode).toBe(422);
+    expect(await ended).toMatchObject({ code: 0, signal: null, stderr: '' });
   });
 
   it('prints the set-up token once for a team without people, and it opens the set-up', async () => {

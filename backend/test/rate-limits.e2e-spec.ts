@@ -26,6 +26,18 @@ describe('rate limits', () => {
     });
   });
 
+  it('count calculations in a bucket of their own', async () => {
+    const testApp = await TestApp.create({ RATE_CALCULATIONS_PER_MINUTE: '2' });
+    try {
+      const { agent } = await testApp.signedIn('designer');
+      const calculate = async () => (await agent.post('/api/calculations').send({})).status;
+      expect([await calculate(), await calculate(), await calculate()]).toEqual([422, 422, 429]);
+      await agent.get('/api/users').expect(200);
+    } finally {
+      await testApp.close();
+    }
+  });
+
   describe('wrong passwords', () => {
     let testApp: TestApp;
     let user: TestUser;

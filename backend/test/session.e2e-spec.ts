@@ -1,3 +1,4 @@
+import { Clock } from '../src/common/clock';
 import { CSRF_HEADER_VALUE } from '../src/common/csrf.guard';
 import { createUser } from './factories/users';
 import { TestApp } from './create-test-app';
@@ -122,6 +123,35 @@ describe('session', () => {
     it('does not mind when nobody is signed in', async () => {
       await testApp.anonymous().delete('/api/session').expect(204);
     });
+  });
+
+  it('is renewed while it is used, at most every five minutes', async () => {
+    const { agent } = await testApp.signedIn('buyer');
+    const at = (minutes: number) => {
+      const instant = new Date(Date.now() + minutes * 60_000);
+      jest.spyOn(testApp.app.get(Clock), 'now').mockReturnValue(instant);
+      return agent.get('/api/users').expect(200);
+    };
+    expect(sessionCookie(await at(4))).toBe('');
+    expect(sessionCookie(await at(6))).toMatch(/Expires=/);
+    expect(sessionCookie(await at(7))).toBe('');
+    jest.restoreAllMocks();
+  });
+
+  it('is over when it has not been used for its hours, although the store still has it', async () => {
+    const { agent, user } = await testApp.signedIn('buyer');
+    const clock = jest.spyOn(testApp.app.get(Clock), 'now');
+    clock.mockReturnValue(new Date(Date.now() + 13 * 3_600_000));
+    await agent.get('/api/users').expect(401);
+    jest.restoreAllMocks();
+    await testApp.signIn(user);
+  });
+
+  it('starts for many at the same moment', async () => {
+    const people = await Promise.all(Array.from({ length: 20 }, () => createUser(testApp.app)));
+    const agents = await Promise.all(people.map((person) => testApp.signIn(person)));
+    const answers = await Promise.all(agents.map((agent) => agent.get('/api/session')));
+    expect(answers.map(({ body }) => body.user.id as string)).toEqual(people.map(({ id }) => id));
   });
 
   it('refuses a cookie that was not signed here', async () => {

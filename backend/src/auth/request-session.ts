@@ -3,6 +3,7 @@ import type { Account } from '../users/account';
 
 /** A session is written back at most this often while it is being used. */
 const RENEW_AFTER_MS = 5 * 60_000;
+const HOUR_MS = 3_600_000;
 
 function regenerate(request: Request): Promise<void> {
   return new Promise((resolve, reject) => {
@@ -21,6 +22,11 @@ export function endSession(request: Request): Promise<void> {
   return new Promise((resolve, reject) => {
     request.session.destroy((error: unknown) => (error ? reject(error as Error) : resolve()));
   });
+}
+
+/** The store sweeps out what has run out only now and then. */
+export function hasExpired(request: Request, nowMs: number, idleHours: number): boolean {
+  return nowMs - (request.session.renewedAtMs ?? 0) > idleHours * HOUR_MS;
 }
 
 /** Moves the end of an active session onwards; the change makes the store write it and the cookie be sent again. */

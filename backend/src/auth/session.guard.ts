@@ -6,9 +6,10 @@ import { PUBLIC_KEY, ROLES_KEY } from '../common/decorators';
 import { ForbiddenError, UnauthenticatedError } from '../common/errors';
 import type { Role } from '../common/role';
 import type { SessionUser } from '../common/session-user';
+import { Runtime } from '../config/runtime';
 import { AccountsService } from '../users/accounts.service';
 import { toSessionUser } from '../users/account';
-import { renewSession } from './request-session';
+import { hasExpired, renewSession } from './request-session';
 
 type RequestWithUser = Request & { user?: SessionUser };
 
@@ -22,6 +23,7 @@ export class SessionGuard implements CanActivate {
     private readonly reflector: Reflector,
     private readonly accounts: AccountsService,
     private readonly clock: Clock,
+    private readonly runtime: Runtime,
   ) {}
 
   async canActivate(context: ExecutionContext): Promise<boolean> {
@@ -37,10 +39,12 @@ export class SessionGuard implements CanActivate {
 
   private async findUser(request: RequestWithUser): Promise<SessionUser | undefined> {
     const identity = request.session?.user;
-    if (identity === undefined) return undefined;
+    const nowMs = this.clock.now().getTime();
+    const { sessionIdleHours } = this.runtime.config;
+    if (identity === undefined || hasExpired(request, nowMs, sessionIdleHours)) return undefined;
     const row = await this.accounts.findActive(identity.id);
     if (row === null || row.sessionEpoch !== identity.epoch) return undefined;
-    renewSession(request, this.clock.now().getTime());
+    renewSession(request, nowMs);
     return toSessionUser(row);
   }
 

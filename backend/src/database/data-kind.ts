@@ -8,7 +8,7 @@ export type DataKind = 'demo' | 'team';
 
 const KEY = 'data_kind';
 
-/** Set when the demo's scenarios are all there. */
+/** Set in the same transaction as the demo's scenarios. */
 export const DEMO_SEEDED_KEY = 'demo_seeded';
 
 async function storedKind(sequelize: Sequelize): Promise<DataKind | null> {
@@ -53,26 +53,6 @@ export async function settleDataKind(file: string, config: AppConfig): Promise<D
       );
     }
     return kind;
-  } finally {
-    await sequelize.close();
-  }
-}
-
-/**
- * Whether seeding a demo was broken off (a power cut, Ctrl-C): the invented team is there and nobody else, but the mark
- * of the finished seed is missing.
- */
-export async function isHalfSeededDemo(file: string): Promise<boolean> {
-  const sequelize = new Sequelize(sqliteOptions(file));
-  try {
-    if ((await storedKind(sequelize)) !== 'demo') return false;
-    const [counts] = await sequelize.query<{ seeded: number; invented: number; real: number }>(
-      `SELECT (SELECT count(*) FROM settings WHERE key = $key) AS seeded,
-              (SELECT count(*) FROM users WHERE is_demo = 1) AS invented,
-              (SELECT count(*) FROM users WHERE is_demo = 0) AS real`,
-      { bind: { key: DEMO_SEEDED_KEY }, type: QueryTypes.SELECT },
-    );
-    return counts !== undefined && counts.seeded === 0 && counts.invented > 0 && counts.real === 0;
   } finally {
     await sequelize.close();
   }

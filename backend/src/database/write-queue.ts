@@ -28,11 +28,6 @@ export class WriteQueue {
     );
   }
 
-  /** Waits for the write under way, for a clean stop. */
-  async idle(): Promise<void> {
-    await this.mutex.runExclusive(() => Promise.resolve());
-  }
-
   /** A forgotten `{ transaction }` would pass with one user and fail with two: make it fail at once. */
   private refuseWritesOutside(): void {
     const original = this.sequelize.query.bind(this.sequelize) as (...args: unknown[]) => Promise<unknown>;
