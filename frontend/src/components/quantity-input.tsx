@@ -23,6 +23,8 @@ export interface QuantityInputProps extends QuantityLimits {
   /** Called with every readable value within the limits; null when the field is emptied and not required. */
   onChange: (value: number | null) => void;
   required?: boolean;
+  /** In dense places: needed, but not said in the label. */
+  quietRequired?: boolean;
   /** From the server, or from the form: shown when the field itself has nothing to complain about. */
   error?: string | null;
   hint?: ReactNode;
@@ -113,7 +115,7 @@ export function QuantityInput(props: QuantityInputProps) {
   );
   if (bare) return <BareControl message={message}>{control}</BareControl>;
   return (
-    <Field id={id} label={label} required={required} error={message} hint={understood ?? hint}>
+    <Field id={id} label={label} required={required && !props.quietRequired} error={message} hint={understood ?? hint}>
       {control}
     </Field>
   );

@@ -29,8 +29,7 @@ export function plotScales(
     .clamp(true);
   const y = scaleLinear()
     .domain(gainRange)
-    .range([box.height - box.bottom, box.top])
-    .clamp(true);
+    .range([box.height - box.bottom, box.top]);
   return { x: (f) => x(f), y: (g) => y(g), frequencyAt: (px) => x.invert(px) };
 }
 

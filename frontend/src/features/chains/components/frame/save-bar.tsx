@@ -25,6 +25,7 @@ export function SaveBar({ save }: { save: SaveControl }) {
       </span>
       <Button
         size="small"
+        type="text"
         icon={<UndoOutlined />}
         disabled={control.undoLabel === null}
         title={control.undoLabel ? `Undo: ${control.undoLabel} (Ctrl + Z)` : 'Nothing to undo'}
@@ -33,6 +34,7 @@ export function SaveBar({ save }: { save: SaveControl }) {
       />
       <Button
         size="small"
+        type="text"
         icon={<RedoOutlined />}
         disabled={control.redoLabel === null}
         title={control.redoLabel ? `Redo: ${control.redoLabel} (Ctrl + Shift + Z)` : 'Nothing to redo'}

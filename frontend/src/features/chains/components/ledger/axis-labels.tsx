@@ -25,6 +25,8 @@ export function AxisLabels({ axis, band }: { axis: FrequencyAxis; band: Band }) 
   );
 }
 
+/** Labels at the ends lean inwards. */
 function at(fraction: number) {
-  return { left: `${fraction * 100}%` };
+  const lean = fraction < 0.04 ? 0 : fraction > 0.96 ? -100 : -50;
+  return { left: `${fraction * 100}%`, transform: `translateX(${lean}%)` };
 }

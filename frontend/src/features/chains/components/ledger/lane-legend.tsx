@@ -1,4 +1,3 @@
-import { formatSignificant } from '../../../../lib/format-figure';
 import styles from './lane.module.css';
 
 /** What a lane says, in the same marks. */
@@ -9,8 +8,7 @@ export function LaneLegend({ headroomTarget, bandwidthTarget }: { headroomTarget
         <svg width="22" height="10" className={styles.clear} aria-hidden="true">
           <rect width="22" height="10" fill="currentColor" />
         </svg>
-        the team’s target is met (headroom ×{formatSignificant(headroomTarget, 2)}, without GBW bandwidth ×
-        {formatSignificant(bandwidthTarget, 2)})
+        the team’s target is met (headroom ×{headroomTarget}, without GBW bandwidth ×{bandwidthTarget})
       </li>
       <li>
         <svg width="22" height="10" className={styles.clear} aria-hidden="true">

@@ -1,4 +1,4 @@
-import { useState, type KeyboardEvent, type PointerEvent } from 'react';
+import { useState, type KeyboardEvent, type PointerEvent, type ReactNode } from 'react';
 
 import type { Curves } from '../../../../api/types';
 import {
@@ -84,8 +84,10 @@ export function ResponseChart(props: ResponseChartProps) {
           onBlur={() => setIndex(null)}
         >
           <ChartAxes box={box} scales={scales} frequencyRange={[from, to]} gainRange={range} />
-          <ChartMarks box={box} scales={scales} curves={curves} />
-          <ChartCurves {...props} scales={scales} box={box} />
+          <PlotArea box={box}>
+            <ChartMarks box={box} scales={scales} curves={curves} />
+            <ChartCurves {...props} scales={scales} />
+          </PlotArea>
           {index !== null && <Crosshair box={box} scales={scales} curves={curves} index={index} />}
         </svg>
       )}
@@ -94,16 +96,8 @@ export function ResponseChart(props: ResponseChartProps) {
   );
 }
 
-interface ChartCurvesProps extends ResponseChartProps {
-  scales: PlotScales;
-  box: PlotBox;
-}
-
-function ChartCurves({ curves, shownStages, scales, box }: ChartCurvesProps) {
-  const { gbwCase } = useWorkspace();
-  const report = useReport();
-  const { frequenciesHz, chain } = curves;
-  const cases = [chain.typical.gainDb, chain.minimum.gainDb, chain.minimumHot.gainDb];
+/** What runs out of the axes is cut off there. */
+function PlotArea({ box, children }: { box: PlotBox; children: ReactNode }) {
   return (
     <g clipPath="url(#plot-area)">
       <clipPath id="plot-area">
@@ -114,6 +108,18 @@ function ChartCurves({ curves, shownStages, scales, box }: ChartCurvesProps) {
           height={box.height - box.top - box.bottom}
         />
       </clipPath>
+      {children}
+    </g>
+  );
+}
+
+function ChartCurves({ curves, shownStages, scales }: ResponseChartProps & { scales: PlotScales }) {
+  const { gbwCase } = useWorkspace();
+  const report = useReport();
+  const { frequenciesHz, chain } = curves;
+  const cases = [chain.typical.gainDb, chain.minimum.gainDb, chain.minimumHot.gainDb];
+  return (
+    <g>
       <path className={styles.envelope} d={envelopePath(scales, frequenciesHz, cases)} />
       {curves.stages.map(
         (stage) =>

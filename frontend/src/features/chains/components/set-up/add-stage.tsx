@@ -18,7 +18,8 @@ import styles from './add-stage.module.css';
 export function AddStage({ onClose }: { onClose: () => void }) {
   const { edits, address } = useWorkspace();
   const [kind, setKind] = useState<StageKind>('voltage-feedback');
-  const [device, setDevice] = useState<DeviceDto | null>(null);
+  const [chosen, setChosen] = useState<DeviceDto | null>(null);
+  const device = useDeviceChoice(kind, chosen);
   const stage = newStage('', kind, device);
 
   const add = () => {
@@ -52,7 +53,7 @@ export function AddStage({ onClose }: { onClose: () => void }) {
           </Radio>
         ))}
       </Radio.Group>
-      {needsDevice(kind) && <DeviceChoice key={kind} kind={kind as DeviceKind} device={device} onChange={setDevice} />}
+      {needsDevice(kind) && <DeviceChoice key={kind} kind={kind as DeviceKind} device={device} onChange={setChosen} />}
       <p className="soft">
         {address.stageId === null ? 'It goes to the end of the chain.' : 'It goes behind the selected stage.'}
       </p>
@@ -60,10 +61,18 @@ export function AddStage({ onClose }: { onClose: () => void }) {
   );
 }
 
+/** The chosen device, or the cheapest to begin with. */
+function useDeviceChoice(kind: StageKind, chosen: DeviceDto | null): DeviceDto | null {
+  const deviceKind = kind === 'rc-section' ? 'voltage-feedback' : kind;
+  const { data } = useQuery(devicesOfKindQuery(deviceKind));
+  if (!needsDevice(kind)) return null;
+  return chosen?.kind === kind ? chosen : (data?.items.find((each) => each.kind === kind) ?? null);
+}
+
 interface DeviceChoiceProps {
   kind: DeviceKind;
   device: DeviceDto | null;
-  onChange: (device: DeviceDto | null) => void;
+  onChange: (device: DeviceDto) => void;
 }
 
 function DeviceChoice({ kind, device, onChange }: DeviceChoiceProps) {
@@ -83,11 +92,12 @@ function DeviceChoice({ kind, device, onChange }: DeviceChoiceProps) {
     <SelectField
       label="Device"
       hint="Every other device can be tried in place afterwards."
-      value={device?.kind === kind ? device.id : ''}
-      emptyLabel="Choose a device"
+      value={device?.id ?? ''}
       options={items.map((each) => ({ value: each.id, label: deviceLabel(each) }))}
-      onChange={(deviceId) => onChange(items.find((each) => each.id === deviceId) ?? null)}
-      onEmpty={() => onChange(null)}
+      onChange={(deviceId) => {
+        const found = items.find((each) => each.id === deviceId);
+        if (found) onChange(found);
+      }}
     />
   );
 }

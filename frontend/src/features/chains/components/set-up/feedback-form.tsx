@@ -6,7 +6,6 @@ import { SelectField } from '../../../../components/select-field';
 import { RESISTOR_SERIES, type ResistorSeries } from '../../lib/resistor-series';
 import { topologiesOf, withResistors, withTopology, withWantedGain, type Topology } from '../../lib/topology';
 import { GainField } from './gain-field';
-import { NameField } from './name-field';
 import { PartsFields } from './parts-fields';
 import { ResultLine } from './result-line';
 import styles from './set-up.module.css';
@@ -27,9 +26,6 @@ export function FeedbackForm({ stage }: { stage: FeedbackStage }) {
       <div className={styles.fields}>
         <TopologyField stage={stage} series={series} />
         <GainField stage={stage} series={series} />
-        <ResistorFields stage={stage} series={series} />
-        <PartsFields stage={stage} />
-        <NameField stage={stage} />
         <div>
           <div className={styles.label}>Resistors from</div>
           <Segmented<ResistorSeries>
@@ -42,6 +38,8 @@ export function FeedbackForm({ stage }: { stage: FeedbackStage }) {
             options={[...RESISTOR_SERIES]}
           />
         </div>
+        <ResistorFields stage={stage} series={series} />
+        <PartsFields stage={stage} />
       </div>
       <ResultLine stage={stage} />
     </>
@@ -74,6 +72,7 @@ function ResistorFields({ stage, series }: { stage: FeedbackStage; series: Resis
         unit="Ω"
         value={stage.feedbackOhm}
         required
+        quietRequired
         minimum={0}
         maximum={1e12}
         disabled={disabled}
@@ -89,6 +88,7 @@ function ResistorFields({ stage, series }: { stage: FeedbackStage; series: Resis
           unit="Ω"
           value={stage.gainOhm ?? null}
           required
+          quietRequired
           minimum={0}
           maximum={1e12}
           disabled={disabled}

@@ -1,25 +1,29 @@
 import Input from 'antd/es/input';
-import { useId } from 'react';
 
 import type { Stage } from '../../../../api/types';
-import { describedBy, Field } from '../../../../components/field';
+import { NAME_MAXIMUM } from '../frame/name-dialog';
+import styles from './set-up.module.css';
 import { useStageForm } from './use-stage-form';
 
-export function NameField({ stage }: { stage: Stage }) {
-  const id = useId();
+/** The stage's name, editable where it stands as the panel's title. */
+export function NameField({ stage, index }: { stage: Stage; index: number }) {
   const { error, set, disabled } = useStageForm(stage);
   const message = error('name') ?? (stage.name.trim() === '' ? 'Give a name.' : null);
   return (
-    <Field id={id} label="Name" error={message}>
+    <h3 className={styles.name}>
+      <span>S{index + 1}</span>
       <Input
-        id={id}
+        variant="borderless"
+        className={styles.nameInput}
+        aria-label="Name of the stage"
         value={stage.name}
         disabled={disabled}
-        maxLength={200}
+        maxLength={NAME_MAXIMUM}
         onChange={(event) => set('name', 'name', { name: event.target.value })}
         status={message ? 'error' : undefined}
-        aria-describedby={describedBy(id, message, null)}
+        title={message ?? 'Name of the stage'}
       />
-    </Field>
+      {message && <span className={styles.nameError}>{message}</span>}
+    </h3>
   );
 }

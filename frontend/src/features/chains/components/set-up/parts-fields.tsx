@@ -15,6 +15,14 @@ export function PartsFields({ stage }: { stage: FeedbackStage }) {
     <>
       <QuantityInput
         {...capacitor}
+        label="Cf across Rf"
+        unit="pF"
+        value={stage.feedbackF ?? null}
+        error={error('feedbackF')}
+        onChange={(value) => set('feedbackF', 'Cf', { feedbackF: value ?? undefined })}
+      />
+      <QuantityInput
+        {...capacitor}
         label="Input coupling"
         unit="nF"
         exclusiveMinimum
@@ -44,28 +52,20 @@ export function PartsFields({ stage }: { stage: FeedbackStage }) {
         onChange={(terminationOhm) => set('terminationOhm', 'termination', { terminationOhm })}
       />
       <QuantityInput
-        {...resistor}
-        label="Isolation at output"
-        minimum={0}
-        value={stage.isolationOhm ?? null}
-        error={error('isolationOhm')}
-        onChange={(value) => set('isolationOhm', 'isolation', { isolationOhm: value ?? undefined })}
-      />
-      <QuantityInput
-        {...capacitor}
-        label="Cf across Rf"
-        unit="pF"
-        value={stage.feedbackF ?? null}
-        error={error('feedbackF')}
-        onChange={(value) => set('feedbackF', 'Cf', { feedbackF: value ?? undefined })}
-      />
-      <QuantityInput
         {...capacitor}
         label="Stray at − pin"
         unit="pF"
         value={stage.strayF ?? null}
         error={error('strayF')}
         onChange={(value) => set('strayF', 'stray capacitance', { strayF: value ?? undefined })}
+      />
+      <QuantityInput
+        {...resistor}
+        label="Isolation at output"
+        minimum={0}
+        value={stage.isolationOhm ?? null}
+        error={error('isolationOhm')}
+        onChange={(value) => set('isolationOhm', 'isolation', { isolationOhm: value ?? undefined })}
       />
       <LoadText stageId={stage.id} />
     </>

@@ -1,7 +1,6 @@
 import type { RcSectionStage } from '../../../../api/types';
 import { QuantityInput } from '../../../../components/quantity-input';
 import { LoadText } from './load-text';
-import { NameField } from './name-field';
 import styles from './set-up.module.css';
 import { useStageForm } from './use-stage-form';
 
@@ -44,7 +43,6 @@ export function RcForm({ stage }: { stage: RcSectionStage }) {
         error={error('shuntF')}
         onChange={(value) => set('shuntF', 'shunt capacitor', { shuntF: value ?? undefined })}
       />
-      <NameField stage={stage} />
       <LoadText stageId={stage.id} />
     </div>
   );

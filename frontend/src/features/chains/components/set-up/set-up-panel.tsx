@@ -15,6 +15,7 @@ import { useWorkspace } from '../workspace-context';
 import { BlockForm } from './block-form';
 import { DevicePicker } from './device-picker';
 import { FeedbackForm } from './feedback-form';
+import { NameField } from './name-field';
 import { RcForm } from './rc-form';
 import styles from './set-up.module.css';
 import { StageFindings } from './stage-findings';
@@ -94,9 +95,7 @@ function PanelHead({ stage, onClose }: PanelProps) {
   };
   return (
     <div className={styles.head}>
-      <h3>
-        S{index + 1} {stage.name} · set-up
-      </h3>
+      <NameField stage={stage} index={index} />
       <div className={styles.headActions}>
         {editable && (
           <>
