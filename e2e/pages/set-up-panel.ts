@@ -1,13 +1,42 @@
 import type { Locator, Page } from '@playwright/test';
+import { SelectBox } from '../components/select-box';
 
+/** The set-up of the selected stage, with the devices tried in its place. */
 export class SetUpPanel {
   readonly panel: Locator;
+  readonly topology: SelectBox;
+  readonly wantedGain: Locator;
+  readonly feedbackResistor: Locator;
+  readonly needs: Locator;
+  readonly devices: Locator;
 
   constructor(page: Page) {
-    this.panel = page.getByRole('region', { name: /set-up/ });
+    this.panel = page.getByRole('region', { name: /^Set-up of / });
+    this.topology = new SelectBox(page, this.panel, 'Topology');
+    this.wantedGain = this.panel.getByLabel('Wanted gain');
+    this.feedbackResistor = this.panel.getByLabel('Feedback resistor Rf');
+    this.needs = this.panel.getByRole('region', { name: 'What passes here' });
+    this.devices = this.panel.getByRole('region', { name: /^Devices in / });
   }
 
-  field(label: string | RegExp): Locator {
-    return this.panel.getByLabel(label);
+  field(label: string): Locator {
+    return this.panel.getByLabel(label, { exact: true });
+  }
+
+  action(name: string): Locator {
+    return this.panel.getByRole('button', { name, exact: true });
+  }
+
+  /** The message under a field. */
+  message(text: string | RegExp): Locator {
+    return this.panel.getByRole('alert').filter({ hasText: text });
+  }
+
+  device(partNumber: string): Locator {
+    return this.devices.getByRole('row').filter({ has: this.deviceName(partNumber) });
+  }
+
+  deviceName(partNumber: string): Locator {
+    return this.devices.getByRole('button', { name: partNumber, exact: true });
   }
 }

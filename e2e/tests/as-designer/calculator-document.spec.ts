@@ -28,7 +28,7 @@ test('the commands of docs/calculator.md run as they are printed', async ({ empt
   await runCommand(commandIn('calculator.md', 'sign-in'), folder, env);
   const answer: unknown = JSON.parse(await runCommand(commandIn('calculator.md', 'calculation'), folder, env));
 
-  // By hand: noise gain 1 + 10 kΩ/(950 Ω + 50 Ω) = 11; 75 MHz / (11 · 7 MHz) = 0.974026, one pole and no parasitics.
+  // By hand: 10 kΩ/(950 Ω + 50 Ω) = 10, that is 20 dB from the EMF; noise gain 1 + 10 kΩ/(950 Ω + 50 Ω) = 11; 75 MHz / (11 · 7 MHz) = 0.974026, one pole and no parasitics.
   const { report } = answer as {
     report: {
       stages: { verdict: { verdict: string }; cases: Record<string, { figures: Record<string, { value: number }> }> }[];
@@ -36,7 +36,7 @@ test('the commands of docs/calculator.md run as they are printed', async ({ empt
   };
   const [stage] = report.stages;
   const figures = stage?.cases.minimum?.figures;
-  expect(figures?.signalGain?.value).toBeCloseTo(-10, 9);
+  expect(figures?.idealGain?.value).toBeCloseTo(20, 9);
   expect(figures?.noiseGain?.value).toBeCloseTo(11, 9);
   expect(figures?.headroom?.value).toBeCloseTo(75 / 77, 9);
   expect(stage?.verdict.verdict).toBe('over');

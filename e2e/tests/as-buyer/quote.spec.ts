@@ -1,0 +1,34 @@
+import { expect, test } from '../../fixtures/test';
+import { Api } from '../../fixtures/api';
+import { DevicesPage } from '../../pages/device-pages';
+import { LedgerPage } from '../../pages/ledger-page';
+import { demoChain } from '../../testdata/receiver';
+
+test('a quote that the buyer enters is what the ledger counts', async ({ browser, ownDemo, playwright }) => {
+  const request = await playwright.request.newContext({ baseURL: ownDemo.url });
+  const api = new Api(request);
+  await api.signInToDemo('buyer');
+  const chain = await demoChain(api);
+  const context = await browser.newContext({ baseURL: ownDemo.url, storageState: await request.storageState() });
+  const page = await context.newPage();
+
+  const ledger = await new LedgerPage(page).open(chain);
+  await expect(ledger.chainCost()).toHaveText('8.12');
+  await expect(ledger.draft.save).toHaveCount(0);
+
+  const device = await (await new DevicesPage(page).open()).openDevice('MRWG-V300');
+  await expect(device.edit, 'a buyer does not edit electrical values').toHaveCount(0);
+  await device.openQuote();
+  await device.fillBreak(1, '1', '1.8O');
+  await device.saveQuote();
+  await expect(page.getByRole('alert').first()).toBeVisible();
+  await device.fillBreak(1, '1', '1.8025');
+  await device.saveQuote();
+  await expect(device.quote).toContainText('1.8025');
+
+  // By hand: 4.10 + 0.62 + 1.8025 + 1.95 = 8.4725; each line is rounded to cents before the sum: 1.80, so 8.47.
+  await new LedgerPage(page).open(chain);
+  await expect(ledger.chainCost()).toHaveText('8.47');
+  await context.close();
+  await request.dispose();
+});
