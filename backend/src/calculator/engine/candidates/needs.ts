@@ -53,7 +53,12 @@ function stableGainNeed(stage: StageFacts): StageNeed | null {
   const atCrossing = stage.stability?.atMaximum.noiseGainAtCrossing ?? noiseGain;
   const most = Math.min(noiseGain, atCrossing);
   const rounded = roundAway(most, Math.floor);
-  return need('minimum-stable-gain', `minimum stable gain at most ${noiseGainText(rounded)}`, rounded, 'ratio');
+  return {
+    id: 'minimum-stable-gain',
+    text: `minimum stable gain at most ${noiseGainText(rounded)}`,
+    figure: figure(rounded, 'ratio', { plainGain: true }),
+    money: null,
+  };
 }
 
 function slewNeed(facts: ChainFacts, stage: StageFacts): StageNeed | null {

@@ -3,7 +3,7 @@ import { isFeedbackStage, partName } from '../report/facts';
 import type { ChainFacts, StageFacts } from '../report/facts';
 import { limitFigure } from '../report/figures';
 import { stageFigure } from '../report/stage-figures';
-import { cannotBeTold, capitalised, setFrequency, targetText, valueText } from '../text/phrases';
+import { cannotBeJudged, capitalised, setFrequency, targetText, valueText } from '../text/phrases';
 import { isAbove, isBelow } from '../text/deciding-digits';
 import { makeCheck, unknownCheck } from './make-check';
 
@@ -37,7 +37,7 @@ export function bandwidthCheck(facts: ChainFacts, stage: StageFacts): Check | nu
 function bandwidthWithoutCorner(stage: StageFacts, reason: string, actual: Figure): Check | null {
   const { gainOperatingDb, operatingBeyondCorner, cornerLowerHz } = stage.analysis;
   if (gainOperatingDb.value === null)
-    return unknownCheck('bandwidth', TITLE, cannotBeTold('the corner', reason), actual);
+    return unknownCheck('bandwidth', TITLE, cannotBeJudged('the corner', reason), actual);
   if (!operatingBeyondCorner || cornerLowerHz.value !== null) return null;
   const sentence = `${capitalised(partName(stage))} never comes to half the power of its ideal gain here.`;
   return makeCheck('bandwidth', TITLE, 'over', sentence, { actual });

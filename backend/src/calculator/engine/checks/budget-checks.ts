@@ -6,7 +6,7 @@ import type { ChainFacts, StageFacts } from '../report/facts';
 import { limitFigure } from '../report/figures';
 import { noiseUnit } from '../report/stage-figures';
 import { decimalAmount, typed } from '../text/si-format';
-import { cannotBeTold, capitalised, decibelText, valueText } from '../text/phrases';
+import { cannotBeJudged, capitalised, decibelText, valueText } from '../text/phrases';
 import { makeCheck, unknownCheck, verdictAtMost } from './make-check';
 
 /** A quantity that has to stay under a limit and tight within a share of it. */
@@ -23,7 +23,7 @@ interface Budget {
 
 function budgetCheck(facts: ChainFacts, budget: Budget): Check {
   const { id, title, value, limit, unit, actual } = budget;
-  if (value.value === null) return unknownCheck(id, title, cannotBeTold(`the ${title}`, value.reason), actual);
+  if (value.value === null) return unknownCheck(id, title, cannotBeJudged(`the ${title}`, value.reason), actual);
   const size = Math.abs(value.value);
   const verdict = verdictAtMost(size, limit, limit * (1 - facts.policy.budgetMargin));
   const sentence = `${capitalised(title)} is ${valueText(size, unit, [limit])} of ${typed(limit, unit)}.`;
@@ -75,7 +75,7 @@ export function noiseFigureCheck(facts: ChainFacts): Check | null {
   const value = facts.chain.noiseFigureDb;
   const actual = chainFigure(facts, 'noiseFigure');
   if (value.value === null) {
-    return unknownCheck('noise-figure', 'noise figure', cannotBeTold('the noise figure', value.reason), actual);
+    return unknownCheck('noise-figure', 'noise figure', cannotBeJudged('the noise figure', value.reason), actual);
   }
   const verdict = verdictAtMost(value.value, limit, limit - facts.policy.noiseMarginDb);
   const sentence = `Noise figure is ${decibelText(value.value, [limit])}; the limit is ${decibelText(limit)}.`;
@@ -135,7 +135,7 @@ export function costCheck(facts: ChainFacts): Check | null {
   if (limitMicros === undefined) return null;
   const { total, stages } = facts.cost;
   if (total.amountMicros === null) {
-    return unknownCheck('cost', 'cost', cannotBeTold('the cost', total.reason ?? 'a price is missing'));
+    return unknownCheck('cost', 'cost', cannotBeJudged('the cost', total.reason ?? 'a price is missing'));
   }
   const verdict = verdictAtMost(total.amountMicros, limitMicros, limitMicros * (1 - facts.policy.budgetMargin));
   const side = total.amountMicros > limitMicros ? 'over' : 'under';

@@ -3,7 +3,7 @@ import { partName } from '../report/facts';
 import type { ChainFacts, StageFacts } from '../report/facts';
 import { figure, limitFigure } from '../report/figures';
 import type { MatchedBlockDevice } from '../types';
-import { cannotBeTold, decibelText, valueText } from '../text/phrases';
+import { cannotBeJudged, decibelText, valueText } from '../text/phrases';
 import { typicalValue } from './current-feedback-check';
 import { makeCheck, unknownCheck } from './make-check';
 
@@ -22,7 +22,7 @@ export function compressionCheck(facts: ChainFacts, stage: StageFacts): Check | 
   if (limitDbm === null) return null;
   const peak = stage.analysis.outputPeakV;
   if (peak.value === null) {
-    return unknownCheck('compression', 'compression', cannotBeTold('the output level', peak.reason));
+    return unknownCheck('compression', 'compression', cannotBeJudged('the output level', peak.reason));
   }
   if (peak.value === 0) return makeCheck('compression', 'compression', 'clear', 'No signal: no compression.');
   const marginDb = limitDbm - dbmOf(peak.value, device.impedanceOhm);
@@ -52,7 +52,7 @@ export function supplyVoltageCheck(facts: ChainFacts, stage: StageFacts): Check 
   const totalV = supply.positiveV - supply.negativeV;
   if (min === undefined && max === undefined) {
     if (device.kind === 'matched-block') return null;
-    const sentence = cannotBeTold('the supply', `Supply range of ${device.partNumber} is not entered.`);
+    const sentence = cannotBeJudged('the supply voltage', `Supply range of ${device.partNumber} is not entered.`);
     return unknownCheck('supply-voltage', 'supply voltage', sentence, figure(totalV, 'V'));
   }
   const broken = brokenBound(totalV, min, max);

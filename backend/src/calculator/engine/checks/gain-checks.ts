@@ -4,7 +4,7 @@ import type { ChainFacts } from '../report/facts';
 import { limitFigure } from '../report/figures';
 import { ratioToDb } from '../report/maybe';
 import { isAbove, isBelow } from '../text/deciding-digits';
-import { because, cannotBeTold, decibelText, setFrequency, targetText, valueText } from '../text/phrases';
+import { because, cannotBeJudged, decibelText, setFrequency, targetText, valueText } from '../text/phrases';
 import { flatnessContributions, gainContributions, largestContributionText } from './contributions';
 import { makeCheck, unknownCheck, verdictAtMost } from './make-check';
 
@@ -14,7 +14,7 @@ export function gainCheck(facts: ChainFacts): Check | null {
   if (gainDb === undefined && minimumGainDb === undefined && maximumGainDb === undefined) return null;
   const gain = facts.chain.gainOperatingDb;
   const actual = chainFigure(facts, 'gainOperating');
-  if (gain.value === null) return unknownCheck('gain', 'chain gain', cannotBeTold('the gain', gain.reason), actual);
+  if (gain.value === null) return unknownCheck('gain', 'chain gain', cannotBeJudged('the gain', gain.reason), actual);
   const bounds = gainBounds(facts);
   const { verdict, limit } = judgeBounds(gain.value, bounds);
   const sentence = gainSentence(facts, gain.value, verdict, limit);
@@ -101,7 +101,7 @@ export function flatnessCheck(facts: ChainFacts): Check | null {
   const { flatnessDb } = facts.chain;
   const actual = chainFigure(facts, 'flatness');
   if (flatnessDb.value === null) {
-    return unknownCheck('flatness', 'flatness', cannotBeTold('the flatness', flatnessDb.reason), actual);
+    return unknownCheck('flatness', 'flatness', cannotBeJudged('the flatness', flatnessDb.reason), actual);
   }
   const verdict = verdictAtMost(flatnessDb.value, required, required * (1 - facts.policy.toleranceMargin));
   const { lowHz, highHz } = facts.input.specification.band;
@@ -154,7 +154,7 @@ function cornerWithoutValue(
     return makeCheck(id, title, 'over', 'The chain never comes to half the power of its ideal gain.', { actual });
   }
   if (facts.chain.gainOperatingDb.value === null) {
-    return unknownCheck(id, title, cannotBeTold(`the ${title}`, reason), actual);
+    return unknownCheck(id, title, cannotBeJudged(`the ${title}`, reason), actual);
   }
   return makeCheck(id, title, 'clear', `The ${title} is no limit: ${because(reason)}.`, { actual });
 }

@@ -5,7 +5,7 @@ import { partName } from '../report/facts';
 import { limitFigure } from '../report/figures';
 import { stageFigure } from '../report/stage-figures';
 import {
-  cannotBeTold,
+  cannotBeJudged,
   deviceHas,
   noiseGainText,
   ratioText,
@@ -26,7 +26,7 @@ export function gbwCheck(facts: ChainFacts, stage: StageFacts): Check | null {
   const { headroom, atHz } = worstHeadroom(facts, stage);
   const actual = stageFigure(facts, stage, 'headroom');
   if (headroom.value === null) {
-    return unknownCheck('gbw', TITLE, cannotBeTold('the headroom', headroom.reason), actual);
+    return unknownCheck('gbw', TITLE, cannotBeJudged('the headroom', headroom.reason), actual);
   }
   const target = facts.policy.headroomTarget;
   const verdict = verdictAtLeast(headroom.value, 1, target);

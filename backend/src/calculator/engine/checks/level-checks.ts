@@ -6,14 +6,22 @@ import type { ChainFacts, StageFacts } from '../report/facts';
 import { limitFigure } from '../report/figures';
 import { dbToRatio, ratioToDb } from '../report/maybe';
 import { stageFigure } from '../report/stage-figures';
-import { cannotBeTold, decibelText, deviceHas, ratioText, setFrequency, targetText, valueText } from '../text/phrases';
+import {
+  cannotBeJudged,
+  decibelText,
+  deviceHas,
+  ratioText,
+  setFrequency,
+  targetText,
+  valueText,
+} from '../text/phrases';
 import { makeCheck, unknownCheck, verdictAtLeast } from './make-check';
 
 /** Level or device value missing: unknown, naming what. */
 function missingInput(id: CheckId, title: string, inputs: readonly Maybe[], actual: Figure): Check | null {
   const missing = inputs.find((input) => input.value === null);
   if (!missing || missing.value !== null) return null;
-  return unknownCheck(id, title, cannotBeTold(`the ${title}`, missing.reason), actual);
+  return unknownCheck(id, title, cannotBeJudged(`the ${title}`, missing.reason), actual);
 }
 
 /** "MRWG-G072 guarantees 40.0 V/µs (minimum, p. 4)", or that it is not known. */
@@ -118,7 +126,7 @@ export function loopGainCheck(facts: ChainFacts, stage: StageFacts): Check | nul
   const { loopGain } = stage.analysis;
   const actual = stageFigure(facts, stage, 'loopGain');
   if (loopGain.value === null) {
-    return unknownCheck('loop-gain', 'loop gain', cannotBeTold('the loop gain', loopGain.reason), actual);
+    return unknownCheck('loop-gain', 'loop gain', cannotBeJudged('the loop gain', loopGain.reason), actual);
   }
   const decibels = ratioToDb(loopGain.value);
   const at = setFrequency(facts.input.specification.band.operatingHz);

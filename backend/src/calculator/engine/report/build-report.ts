@@ -1,9 +1,10 @@
 import { analyzeChain } from '../chain/analyze-chain';
 import { judge } from '../checks/judge';
 import { findRemedies } from '../checks/remedies/find-remedies';
+import type { ChecksWithRemedies } from '../checks/remedies/find-remedies';
 import { chainLane, stageLane } from '../lanes/lane';
 import { frequencyAxis } from '../lanes/axis';
-import type { ChainCaseReport, ChainReport, Check, HeadlineItem, StageCaseReport, StageReport } from '../report';
+import type { ChainCaseReport, ChainReport, HeadlineItem, StageCaseReport, StageReport } from '../report';
 import { basisText, because } from '../text/phrases';
 import { GBW_CASES } from '../types';
 import type { ChainInput, GbwCase, GainBasis } from '../types';
@@ -13,7 +14,6 @@ import { gbwMaybe, worstHeadroom, worstHeadroomStage } from './derived';
 import { factsOf } from './facts';
 import type { ChainFacts, StageFacts } from './facts';
 import { headline } from './headline';
-import type { HeadlineChecks } from './headline';
 import { stageMarks } from './marks';
 import { stageFigures } from './stage-figures';
 import { chainVerdictReport, stageVerdictReport } from './verdict-report';
@@ -42,9 +42,7 @@ export function buildReport(input: ChainInput): ChainReport {
   const facts = byCase((gbwCase) => factsOf(input, analysis, gbwCase));
   const judgement = judge(facts[input.policy.gbwCase]);
   const checks = findRemedies(judgement);
-  const stages = input.stages.map((_, index) =>
-    stageReport(facts, checks.stageChecks[index], index, input.policy.gbwCase),
-  );
+  const stages = input.stages.map((_, index) => stageReport(facts, checks, index, input.policy.gbwCase));
   const cases = byCase((gbwCase) => chainCaseReport(facts[gbwCase], facts.typical));
   const { band, gainBasis } = input.specification;
   const lanes = GBW_CASES.flatMap((gbwCase) => [
@@ -58,7 +56,7 @@ export function buildReport(input: ChainInput): ChainReport {
     checks: checks.chainChecks,
     stages,
     cases,
-    headline: byCase<readonly HeadlineItem[]>((gbwCase) => headline(facts[gbwCase], headlineChecks(checks))),
+    headline: byCase<readonly HeadlineItem[]>((gbwCase) => headline(facts[gbwCase], checks)),
     axis: frequencyAxis(lanes, band.lowHz, band.highHz),
     polarity: judgement.facts.chain.inverted ? 'inverted' : 'in-phase',
     cost: judgement.facts.cost.total,
@@ -66,16 +64,8 @@ export function buildReport(input: ChainInput): ChainReport {
   };
 }
 
-function headlineChecks(checks: HeadlineChecks): HeadlineChecks {
-  return { stageChecks: checks.stageChecks, chainChecks: checks.chainChecks };
-}
-
-function stageReport(
-  facts: ByCase<ChainFacts>,
-  checks: readonly Check[],
-  index: number,
-  gbwCase: GbwCase,
-): StageReport {
+function stageReport(facts: ByCase<ChainFacts>, all: ChecksWithRemedies, index: number, gbwCase: GbwCase): StageReport {
+  const checks = all.stageChecks[index];
   const own = facts[gbwCase];
   const stage = own.stages[index];
   return {
@@ -89,7 +79,7 @@ function stageReport(
     grade: stage.device?.grade ?? null,
     hasGbw: stage.stage.kind === 'voltage-feedback',
     operatingHz: own.input.specification.band.operatingHz,
-    verdict: stageVerdictReport(stage.label, stage.stage.id, checks),
+    verdict: stageVerdictReport(stage.label, stage.stage.id, checks, all.briefs),
     checks,
     marks: stageMarks(own, stage),
     unitCost: stage.cost.money,

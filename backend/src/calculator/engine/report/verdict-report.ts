@@ -1,9 +1,12 @@
 import type { Check, CheckId, Verdict, VerdictReport } from '../report';
 import type { Judgement } from '../checks/judge';
 import { isWorse, worstCheck } from '../checks/verdict-order';
+import { listText } from '../text/phrases';
 
 /** How many remedies a verdict names; all of them stand beside the check. */
 const REMEDIES_NAMED = 3;
+
+const ON_DEVICE_PAGE = ' Enter it on the device page.';
 
 type Lead = (label: string) => string;
 
@@ -44,22 +47,40 @@ const TIGHT_LEADS: Partial<Readonly<Record<CheckId, Lead>>> = {
 function lead(check: Check, label: string): string {
   if (check.verdict === 'over') return OVER_LEADS[check.id](label);
   const subject = label === '' ? 'The chain' : label;
-  if (check.verdict === 'unknown') return `${subject} cannot be judged: ${check.title}.`;
   const tight = TIGHT_LEADS[check.id];
   return tight ? tight(label) : `${subject} is tight: ${check.title}.`;
 }
 
-function textOf(check: Check): string {
-  return [check.sentence, ...check.remedies.slice(0, REMEDIES_NAMED).map((remedy) => remedy.sentence)].join(' ');
+type Briefs = ReadonlyMap<Check, readonly string[]>;
+
+function textOf(check: Check, briefs: Briefs | undefined): string {
+  return [check.sentence, ...(briefs?.get(check) ?? []).slice(0, REMEDIES_NAMED)].join(' ');
+}
+
+/** Everything that is missing in a stage or chain, said at once: nobody wants to be told one field after the other. */
+function unknownReport(subject: string, stageId: string | null, checks: readonly Check[]): VerdictReport {
+  const unknowns = checks.filter((check) => check.verdict === 'unknown');
+  const where = unknowns.map((check) => check.sentence).find((sentence) => sentence.endsWith(ON_DEVICE_PAGE));
+  const sentences = unknowns.map((check) => check.sentence.replace(ON_DEVICE_PAGE, '').trim());
+  const text = [...new Set(sentences), ...(where ? [ON_DEVICE_PAGE.trim()] : [])].join(' ');
+  const titles = listText([...new Set(unknowns.map((check) => check.title))]);
+  const lead = `${subject} cannot be judged: ${titles}.`;
+  return { verdict: 'unknown', lead, text, checkId: unknowns[0]?.id ?? null, stageId };
 }
 
 /** Verdict of one stage: its worst check in words. */
-export function stageVerdictReport(label: string, stageId: string, checks: readonly Check[]): VerdictReport {
+export function stageVerdictReport(
+  label: string,
+  stageId: string,
+  checks: readonly Check[],
+  briefs?: Briefs,
+): VerdictReport {
   const worst = worstCheck(checks);
   if (!worst || worst.verdict === 'clear') {
     return { verdict: 'clear', lead: '', text: clearStageText(checks), checkId: null, stageId };
   }
-  return { verdict: worst.verdict, lead: lead(worst, label), text: textOf(worst), checkId: worst.id, stageId };
+  if (worst.verdict === 'unknown') return unknownReport(label, stageId, checks);
+  return { verdict: worst.verdict, lead: lead(worst, label), text: textOf(worst, briefs), checkId: worst.id, stageId };
 }
 
 function clearStageText(checks: readonly Check[]): string {
@@ -71,6 +92,7 @@ function clearStageText(checks: readonly Check[]): string {
 export interface JudgedChecks {
   readonly stageChecks: readonly (readonly Check[])[];
   readonly chainChecks: readonly Check[];
+  readonly briefs?: Briefs;
 }
 
 /** Verdict of the chain: the cause before the symptom, so a stage's check goes before an equally bad requirement. */
@@ -96,13 +118,14 @@ export function chainVerdictReport(judgement: Judgement, checks: JudgedChecks): 
   }
   if (worstStage.check?.verdict === verdict) {
     const stage = judgement.facts.stages[worstStage.index];
-    const report = stageVerdictReport(stage.label, stage.stage.id, checks.stageChecks[worstStage.index]);
+    const report = stageVerdictReport(stage.label, stage.stage.id, checks.stageChecks[worstStage.index], checks.briefs);
     return { ...report, verdict };
   }
-  return chainRequirementReport(requirement, verdict);
+  if (verdict === 'unknown') return unknownReport('The chain', null, checks.chainChecks);
+  return chainRequirementReport(requirement, verdict, checks.briefs);
 }
 
-function chainRequirementReport(check: Check | null, verdict: Verdict): VerdictReport {
+function chainRequirementReport(check: Check | null, verdict: Verdict, briefs: Briefs | undefined): VerdictReport {
   if (!check) return { verdict, lead: '', text: '', checkId: null, stageId: null };
-  return { verdict, lead: lead(check, ''), text: textOf(check), checkId: check.id, stageId: null };
+  return { verdict, lead: lead(check, ''), text: textOf(check, briefs), checkId: check.id, stageId: null };
 }

@@ -123,6 +123,6 @@ export function whereToEnter(reason: string): string {
 }
 
 /** "The slew rate cannot be judged: slew rate of MRWG-G072 is not entered. Enter it on the device page." */
-export function cannotBeTold(what: string, reason: string): string {
-  return `${capitalised(what)} cannot be told: ${because(reason)}.${whereToEnter(reason)}`;
+export function cannotBeJudged(what: string, reason: string): string {
+  return `${capitalised(what)} cannot be judged: ${because(reason)}.${whereToEnter(reason)}`;
 }

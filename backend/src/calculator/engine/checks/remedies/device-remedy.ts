@@ -1,11 +1,11 @@
 import { unitPrice } from '../../cost/unit-price';
-import type { CheckId, Remedy } from '../../report';
+import type { CheckId } from '../../report';
 import { bandwidthRatio, gbwUsed, slewHeadroom, worstHeadroom } from '../../report/derived';
 import type { StageFacts } from '../../report/facts';
 import { gainText, ratioText } from '../../text/phrases';
 import type { ChainInput, Device, Policy, Stage } from '../../types';
-import { consequenceText, priceDifferenceText, trialStages, trialVerdict } from './trials';
-import type { Trial, Trials } from './trials';
+import { priceDifferenceText, proposal, trialCheckVerdict, trialStages, trialVerdict } from './trials';
+import type { FoundRemedy, Trial, Trials } from './trials';
 
 /** Devices tried in a stage before the search for a cheaper one is given up. */
 const MOST_DEVICES = 6;
@@ -59,22 +59,30 @@ export function devicesByPrice(trials: Trials, stage: StageFacts): readonly Devi
     .map(({ device }) => device);
 }
 
-/** The cheapest of the given devices that is clear in this very stage, the whole chain re-evaluated. */
-export function deviceRemedy(trials: Trials, stage: StageFacts, checkId: CheckId): Remedy | null {
+/**
+ * The cheapest of the given devices with which this very stage is clear, the whole chain evaluated again. Where data of the
+ * devices is missing, the cheapest that is clear in the check that decides now and over in none.
+ */
+export function deviceRemedy(trials: Trials, stage: StageFacts, checkId: CheckId): FoundRemedy | null {
   const promising = devicesByPrice(trials, stage).filter((device) => mayPass(trials, stage, device));
+  let second: FoundRemedy | null = null;
   for (const device of promising.slice(0, MOST_DEVICES)) {
     const replacement = withDevice(stage.stage, device);
     const trial = replacement && trials.replace(stage.index, [replacement]);
-    if (trial && trialVerdict(trial) === 'clear') return remedyOf(trial, device, checkId);
+    if (!trial) continue;
+    const verdict = trialVerdict(trial);
+    if (verdict === 'clear') return found(trial, device, checkId);
+    const isClearHere = verdict === 'unknown' && trialCheckVerdict(trial, checkId) === 'clear';
+    if (isClearHere) second ??= found(trial, device, checkId);
   }
-  return null;
+  return second;
 }
 
-function remedyOf(trial: Trial, device: Device, checkId: CheckId): Remedy {
+function found(trial: Trial, device: Device, checkId: CheckId): FoundRemedy {
   const { signalGain } = trialStages(trial)[0].analysis;
   const at = device.kind === 'matched-block' ? 'in its place' : `at ${gainText(signalGain)}`;
-  const sentence = `${device.partNumber} ${at} would ${benefit(trial, checkId)}${priceDifferenceText(trial)}.${consequenceText(trial)}`;
-  return { sentence, verdict: trialVerdict(trial), action: `Use ${device.partNumber}`, stages: trial.stages };
+  const brief = `${device.partNumber} ${at} would ${benefit(trial, checkId)}${priceDifferenceText(trial)}.`;
+  return proposal(trial, brief, `Use ${device.partNumber}`);
 }
 
 /** What the device gives there, in the figure of the check that fails now. */

@@ -1,4 +1,4 @@
-import type { Check, CheckId, Remedy } from '../../report';
+import type { Check, CheckId } from '../../report';
 import type { StageFacts } from '../../report/facts';
 import { flatnessContributions, gainContributions } from '../contributions';
 import type { Judgement } from '../judge';
@@ -14,12 +14,12 @@ import {
   swingRemedies,
 } from './other-remedies';
 import { createTrials } from './trials';
-import type { Trials } from './trials';
+import type { FoundRemedy, Trials } from './trials';
 
 /** Evaluations of modified chains that one report may spend on remedies; the worst stages are served first. */
 const MOST_EVALUATIONS = 24;
 
-type Finder = (trials: Trials, stage: StageFacts) => readonly Remedy[];
+type Finder = (trials: Trials, stage: StageFacts) => readonly FoundRemedy[];
 
 const FINDERS: Partial<Readonly<Record<CheckId, Finder>>> = {
   gbw: gbwRemedies,
@@ -47,6 +47,8 @@ const DEVICE_CAN_HELP: ReadonlySet<CheckId> = new Set<CheckId>([
 export interface ChecksWithRemedies {
   readonly stageChecks: readonly (readonly Check[])[];
   readonly chainChecks: readonly Check[];
+  /** By check (with remedies): the sentences that its verdict quotes. */
+  readonly briefs: ReadonlyMap<Check, readonly string[]>;
 }
 
 /**
@@ -57,17 +59,27 @@ export interface ChecksWithRemedies {
  */
 export function findRemedies(judgement: Judgement): ChecksWithRemedies {
   const trials = createTrials(judgement, MOST_EVALUATIONS);
-  const found = new Map<Check, readonly Remedy[]>();
+  const found = new Map<Check, readonly FoundRemedy[]>();
   const order = judgement.facts.stages
     .map((stage) => ({ stage, check: worstCheck(judgement.stageChecks[stage.index]) }))
     .filter((each): each is { stage: StageFacts; check: Check } => each.check !== null && canHelp(each.check))
     .sort((a, b) => badness(b.check.verdict) - badness(a.check.verdict));
   for (const { stage, check } of order) found.set(check, stageRemedies(trials, stage, check));
   for (const check of judgement.chainChecks) found.set(check, chainRemedies(trials, check));
-  const withRemedies = (check: Check): Check => ({ ...check, remedies: found.get(check) ?? check.remedies });
+  const briefs = new Map<Check, readonly string[]>();
+  const withRemedies = (check: Check): Check => {
+    const own = found.get(check) ?? [];
+    const complete = { ...check, remedies: own.map(({ remedy }) => remedy) };
+    briefs.set(
+      complete,
+      own.map(({ brief }) => brief),
+    );
+    return complete;
+  };
   return {
     stageChecks: judgement.stageChecks.map((checks) => checks.map(withRemedies)),
     chainChecks: judgement.chainChecks.map(withRemedies),
+    briefs,
   };
 }
 
@@ -75,13 +87,13 @@ function canHelp(check: Check): boolean {
   return check.verdict === 'over' || check.verdict === 'tight';
 }
 
-function stageRemedies(trials: Trials, stage: StageFacts, check: Check): readonly Remedy[] {
+function stageRemedies(trials: Trials, stage: StageFacts, check: Check): readonly FoundRemedy[] {
   const own = FINDERS[check.id]?.(trials, stage) ?? [];
   const device = DEVICE_CAN_HELP.has(check.id) ? deviceRemedy(trials, stage, check.id) : null;
   return device ? [...own.slice(0, 1), device, ...own.slice(1)] : own;
 }
 
-function chainRemedies(trials: Trials, check: Check): readonly Remedy[] {
+function chainRemedies(trials: Trials, check: Check): readonly FoundRemedy[] {
   if (!canHelp(check) || trials.before.stageVerdicts.includes('over')) return [];
   const { facts } = trials.before;
   const contributions =

@@ -1,23 +1,22 @@
-import type { Remedy } from '../../report';
 import { gbwUsed, worstHeadroom, worstNoiseGain } from '../../report/derived';
 import { partName } from '../../report/facts';
 import type { ChainFacts, StageFacts } from '../../report/facts';
 import { atLeastText, gainText, ratioText, roundAway, targetText, valueText } from '../../text/phrases';
 import { asNonInverting, isRatioStage, resistorGain, splitInTwo, withGain } from './replacement-stages';
-import { consequenceText, priceDifferenceText, trialStages, trialVerdict } from './trials';
-import type { Trial, Trials } from './trials';
+import { hint, priceDifferenceText, proposal, trialCheckVerdict, trialStages } from './trials';
+import type { FoundRemedy, Trial, Trials } from './trials';
 
 const MOST_GAIN_STEPS = 4;
 
 /** Remedies for a stage that spends too much GBW, each evaluated by the full model. */
-export function gbwRemedies(trials: Trials, stage: StageFacts): readonly Remedy[] {
+export function gbwRemedies(trials: Trials, stage: StageFacts): readonly FoundRemedy[] {
   return [needRemedy, nonInvertingRemedy, splitRemedy, lessGainRemedy]
     .map((find) => find(trials, stage))
     .filter((remedy) => remedy !== null);
 }
 
 /** GBW that this noise gain takes at this frequency for the target, and just to be not over. */
-function needRemedy(trials: Trials, stage: StageFacts): Remedy | null {
+function needRemedy(trials: Trials, stage: StageFacts): FoundRemedy | null {
   const { facts } = trials.before;
   const used = gbwUsed(facts, stage, 'worst').value;
   const headroom = worstHeadroom(facts, stage).headroom.value;
@@ -25,7 +24,8 @@ function needRemedy(trials: Trials, stage: StageFacts): Remedy | null {
   const target = facts.policy.headroomTarget;
   const bare = headroom < 1 ? ` (${atLeastText(used, 'Hz')} for ×1)` : '';
   const sentence = `It needs a GBW of at least ${atLeastText(used * target, 'Hz')} for the headroom target ${targetText(target)}${bare}.`;
-  return { sentence, verdict: 'clear' };
+  const brief = `It needs ${atLeastText(used * target, 'Hz')} for the target ${targetText(target)}.`;
+  return hint(sentence, brief);
 }
 
 /** "uses 70.0 MHz (×1.07, tight)" of the replaced stage that is worst off. */
@@ -34,38 +34,38 @@ function spendingText(trial: Trial): string {
   const worst = trialStages(trial).reduce((a, b) => (headroomOf(trial, b) < headroomOf(trial, a) ? b : a));
   const used = gbwUsed(facts, worst, 'worst').value ?? 0;
   const headroom = ratioText(headroomOf(trial, worst), [1, facts.policy.headroomTarget]);
-  return `${valueText(used, 'Hz')} (${headroom}, ${trialVerdict(trial)})`;
+  return `${valueText(used, 'Hz')} (${headroom}, ${trialCheckVerdict(trial, 'gbw')})`;
 }
 
 function headroomOf(trial: Trial, stage: StageFacts): number {
   return worstHeadroom(trial.after.facts, stage).headroom.value ?? 0;
 }
 
-function nonInvertingRemedy(trials: Trials, stage: StageFacts): Remedy | null {
+function nonInvertingRemedy(trials: Trials, stage: StageFacts): FoundRemedy | null {
   if (!isRatioStage(stage.stage)) return null;
   const replacement = asNonInverting(stage.stage);
   const trial = replacement && trials.replace(stage.index, [replacement]);
   if (!replacement || !trial) return null;
   const gain = gainText(Math.abs(resistorGain(stage.stage)));
-  const sentence = `As non-inverting ${gain} it would use ${spendingText(trial)}.${consequenceText(trial)}`;
-  return { sentence, verdict: trialVerdict(trial), action: `Make it non-inverting ${gain}`, stages: [replacement] };
+  const brief = `As non-inverting ${gain} it would use ${spendingText(trial)}.`;
+  return proposal(trial, brief, `Make it non-inverting ${gain}`);
 }
 
-function splitRemedy(trials: Trials, stage: StageFacts): Remedy | null {
+function splitRemedy(trials: Trials, stage: StageFacts): FoundRemedy | null {
   if (!isRatioStage(stage.stage)) return null;
   const pair = splitInTwo(stage.stage, trials.before.facts.input.stages);
   const trial = pair && trials.replace(stage.index, pair);
   if (!pair || !trial) return null;
   const sign = stage.stage.topology === 'inverting' ? -1 : 1;
   const gain = gainText(sign * Math.sqrt(Math.abs(resistorGain(stage.stage))));
-  const sentence =
+  const brief =
     `Split into two stages of ${gain} with the same device, each would use at most ${spendingText(trial)}` +
-    `${priceDifferenceText(trial)}.${consequenceText(trial)}`;
-  return { sentence, verdict: trialVerdict(trial), action: 'Split in two', stages: pair };
+    `${priceDifferenceText(trial)}.`;
+  return proposal(trial, brief, 'Split in two');
 }
 
 /** The largest gain with which this device still meets the headroom target here: scaled, evaluated, corrected. */
-function lessGainRemedy(trials: Trials, stage: StageFacts): Remedy | null {
+function lessGainRemedy(trials: Trials, stage: StageFacts): FoundRemedy | null {
   if (!isRatioStage(stage.stage)) return null;
   const target = trials.before.facts.policy.headroomTarget;
   let feedbackOhm: number = stage.stage.feedbackOhm;
@@ -97,13 +97,13 @@ function spentBy(facts: ChainFacts, stage: StageFacts): Spent {
   };
 }
 
-function lessGain(trial: Trial, magnitude: number, stage: StageFacts): Remedy | null {
+function lessGain(trial: Trial, magnitude: number, stage: StageFacts): FoundRemedy | null {
   if (!isRatioStage(stage.stage)) return null;
   const gain = gainText(stage.stage.topology === 'inverting' ? -magnitude : magnitude);
   const missing = Math.abs(resistorGain(stage.stage)) / magnitude;
   const target = targetText(trial.before.facts.policy.headroomTarget);
-  const sentence =
+  const brief =
     `With ${partName(stage)} the gain here can be at most ${gain} for ${target}; ` +
     `the other ${valueText(missing, 'ratio')} has to come from elsewhere.`;
-  return { sentence, verdict: trialVerdict(trial), action: `Set ${gain}`, stages: trial.stages };
+  return proposal(trial, brief, `Set ${gain}`);
 }

@@ -1,4 +1,3 @@
-import type { Remedy } from '../../report';
 import { bandwidthRatio, slewAvailable, swingHeadroom } from '../../report/derived';
 import { isFeedbackStage, partName } from '../../report/facts';
 import type { StageFacts } from '../../report/facts';
@@ -7,13 +6,13 @@ import { worsePoint } from '../../report/stage-figures';
 import { atLeastText, atMostText, noiseGainText, setFrequency, targetText, valueText } from '../../text/phrases';
 import { typed } from '../../text/si-format';
 import { nearestPreferred } from '../../preferred-values';
-import { consequenceText, trialStages, trialVerdict } from './trials';
-import type { Trial, Trials } from './trials';
+import { hint, proposal, trialStages, trialVerdict } from './trials';
+import type { FoundRemedy, Trial, Trials } from './trials';
 
 const ISOLATION_OHM: readonly number[] = [10, 22, 47, 100];
 
 /** Slew: what the stage needs, the level that this device can follow, and that splitting is no way out. */
-export function slewRemedies(trials: Trials, stage: StageFacts): readonly Remedy[] {
+export function slewRemedies(trials: Trials, stage: StageFacts): readonly FoundRemedy[] {
   const { facts } = trials.before;
   const needed = stage.analysis.slewNeededVPerS.value;
   const have = slewAvailable(stage).value;
@@ -22,41 +21,40 @@ export function slewRemedies(trials: Trials, stage: StageFacts): readonly Remedy
   const bare = have < needed ? ` (${atLeastText(needed, 'V/s')} for ×1)` : '';
   const peak = (stage.analysis.outputPeakV.value ?? 0) * (have / (needed * target));
   const { highHz } = facts.input.specification.band;
+  const least = atLeastText(needed * target, 'V/s');
+  const noSplit = 'Splitting the gain cannot help: the output has to swing as far.';
   return [
-    {
-      sentence:
-        `It needs at least ${atLeastText(needed * target, 'V/s')} for the target ${targetText(target)}${bare}. ` +
-        'Splitting the gain cannot help: the output has to swing as far.',
-      verdict: 'clear',
-    },
-    {
-      sentence: `${partName(stage)} follows at most ${atMostText(peak, 'V')} peak at ${setFrequency(highHz)} with ${targetText(target)}.`,
-      verdict: 'clear',
-    },
+    hint(
+      `It needs at least ${least} for the target ${targetText(target)}${bare}. ${noSplit}`,
+      `It needs ${least} for the target ${targetText(target)}. ${noSplit}`,
+    ),
+    hint(
+      `${partName(stage)} follows at most ${atMostText(peak, 'V')} peak at ${setFrequency(highHz)} with ${targetText(target)}.`,
+    ),
   ];
 }
 
 /** Swing: how much the level has to come down. */
-export function swingRemedies(trials: Trials, stage: StageFacts): readonly Remedy[] {
+export function swingRemedies(trials: Trials, stage: StageFacts): readonly FoundRemedy[] {
   const headroom = swingHeadroom(stage).value;
   if (headroom === null || headroom <= 0) return [];
   const missing = trials.before.facts.policy.levelMarginDb - ratioToDb(headroom);
   const sentence = `The level here has to come down by ${valueText(missing, 'dB')}, or the supply has to go up.`;
-  return [{ sentence, verdict: 'clear' }];
+  return [hint(sentence)];
 }
 
 /** Stability: the noise gain that the device asks for, or a resistor that separates a capacitive load. */
-export function stabilityRemedies(trials: Trials, stage: StageFacts): readonly Remedy[] {
+export function stabilityRemedies(trials: Trials, stage: StageFacts): readonly FoundRemedy[] {
   const least = stage.device?.kind === 'voltage-feedback' ? stage.device.minimumStableGain : undefined;
   if (least !== undefined && (stage.analysis.noiseGain ?? least) < least) {
     const sentence = `${partName(stage)} needs a noise gain of at least ${noiseGainText(least)}; a unity-gain stable device has no such limit.`;
-    return [{ sentence, verdict: 'clear' }];
+    return [hint(sentence)];
   }
   const isolation = isolationRemedy(trials, stage);
   return isolation ? [isolation] : [];
 }
 
-function isolationRemedy(trials: Trials, stage: StageFacts): Remedy | null {
+function isolationRemedy(trials: Trials, stage: StageFacts): FoundRemedy | null {
   const set = stage.stage;
   if (!isFeedbackStage(set) || stage.stability?.loadCapacitive !== true || (set.isolationOhm ?? 0) > 0) return null;
   for (const isolationOhm of ISOLATION_OHM) {
@@ -67,16 +65,16 @@ function isolationRemedy(trials: Trials, stage: StageFacts): Remedy | null {
   return null;
 }
 
-function isolationResult(trial: Trial, isolationOhm: number): Remedy | null {
+function isolationResult(trial: Trial, isolationOhm: number): FoundRemedy | null {
   const margin = worsePoint(trialStages(trial)[0])?.phaseMarginDeg ?? null;
   if (trialVerdict(trial) !== 'clear' || margin === null) return null;
   const value = typed(isolationOhm, 'Ω');
-  const sentence = `${value} in series with its output would bring the phase margin to ${valueText(margin, 'deg')}.${consequenceText(trial)}`;
-  return { sentence, verdict: 'clear', action: `Add ${value} isolation`, stages: trial.stages };
+  const brief = `${value} in series with its output would bring the phase margin to ${valueText(margin, 'deg')}.`;
+  return proposal(trial, brief, `Add ${value} isolation`);
 }
 
 /** A larger coupling capacitor, the next of E6 that meets the target. */
-export function couplingRemedies(trials: Trials, stage: StageFacts): readonly Remedy[] {
+export function couplingRemedies(trials: Trials, stage: StageFacts): readonly FoundRemedy[] {
   const { facts } = trials.before;
   const set = stage.stage;
   const corner = stage.analysis.cornerLowerHz.value;
@@ -87,12 +85,12 @@ export function couplingRemedies(trials: Trials, stage: StageFacts): readonly Re
   const trial = trials.replace(stage.index, [{ ...set, couplingF }]);
   const after = trial && trialStages(trial)[0].analysis.cornerLowerHz.value;
   if (!trial || after === null) return [];
-  const sentence = `A coupling of ${typed(couplingF, 'F')} would put the corner at ${valueText(after, 'Hz')}.${consequenceText(trial)}`;
-  return [{ sentence, verdict: trialVerdict(trial), action: `Use ${typed(couplingF, 'F')}`, stages: trial.stages }];
+  const brief = `A coupling of ${typed(couplingF, 'F')} would put the corner at ${valueText(after, 'Hz')}.`;
+  return [proposal(trial, brief, `Use ${typed(couplingF, 'F')}`)];
 }
 
 /** Rf of the reference circuit for a current-feedback stage whose Rf is too small, the gain kept. */
-export function feedbackResistorRemedies(trials: Trials, stage: StageFacts): readonly Remedy[] {
+export function feedbackResistorRemedies(trials: Trials, stage: StageFacts): readonly FoundRemedy[] {
   const set = stage.stage;
   const { device } = stage;
   if (set.kind !== 'current-feedback' || device?.kind !== 'current-feedback') return [];
@@ -103,6 +101,6 @@ export function feedbackResistorRemedies(trials: Trials, stage: StageFacts): rea
   const ratio = bandwidthRatio(trial.after.facts, trialStages(trial)[0]).value;
   const reach = ratio === null ? '' : ` The corner would be ${valueText(ratio, 'ratio')} the top of the band.`;
   const value = typed(device.referenceFeedbackOhm, 'Ω');
-  const sentence = `With ${value} for Rf, as in the datasheet's reference circuit, it is as its maker measured it.${reach}${consequenceText(trial)}`;
-  return [{ sentence, verdict: trialVerdict(trial), action: `Use ${value}`, stages: trial.stages }];
+  const brief = `With ${value} for Rf, as in the datasheet's reference circuit, it is as its maker measured it.${reach}`;
+  return [proposal(trial, brief, `Use ${value}`)];
 }

@@ -1,9 +1,9 @@
-import type { Check, Remedy } from '../../report';
+import type { Check, CheckId, Remedy, Verdict } from '../../report';
 import { tryEvaluate } from '../../report/evaluate';
 import type { StageFacts } from '../../report/facts';
 import { decimalAmount, formatFigure } from '../../text/si-format';
 import { listText } from '../../text/phrases';
-import type { Stage } from '../../types';
+import type { Device, Stage } from '../../types';
 import type { Judgement } from '../judge';
 import { worstVerdict } from '../verdict-order';
 
@@ -33,10 +33,39 @@ export function createTrials(before: Judgement, mostEvaluations: number): Trials
       left -= 1;
       const { input } = before.facts;
       const all = [...input.stages.slice(0, stageIndex), ...stages, ...input.stages.slice(stageIndex + 1)];
-      const after = tryEvaluate({ ...input, stages: all });
+      const after = tryEvaluate({ ...input, stages: all, devices: devicesOf(all, input.devices) });
       return after ? { before, after, firstIndex: stageIndex, stages } : null;
     },
   };
+}
+
+/** Only the devices that are used: the others need not be validated again for every trial. */
+function devicesOf(stages: readonly Stage[], devices: readonly Device[]): readonly Device[] {
+  const used = new Set(stages.flatMap((stage) => ('deviceId' in stage ? [stage.deviceId] : [])));
+  return devices.filter((device) => used.has(device.id));
+}
+
+/** A remedy, and the part of its sentence that a verdict quotes: without the consequences for the chain. */
+export interface FoundRemedy {
+  readonly remedy: Remedy;
+  readonly brief: string;
+}
+
+/** A remedy that only tells what is needed. */
+export function hint(sentence: string, brief = sentence): FoundRemedy {
+  return { brief, remedy: { sentence, verdict: 'clear' } };
+}
+
+/** A remedy that can be applied, with what else it changes. */
+export function proposal(trial: Trial, brief: string, action: string): FoundRemedy {
+  const sentence = brief + consequenceText(trial);
+  return { brief, remedy: { sentence, verdict: trialVerdict(trial), action, stages: trial.stages } };
+}
+
+/** Verdict of one check of the replaced stages: the worst of them. */
+export function trialCheckVerdict(trial: Trial, checkId: CheckId): Verdict {
+  const own = trial.after.stageChecks.slice(trial.firstIndex, trial.firstIndex + trial.stages.length).flat();
+  return worstVerdict(own.filter((check) => check.id === checkId).map((check) => check.verdict));
 }
 
 /** The replaced stages as they are afterwards. */
@@ -51,7 +80,7 @@ export function trialVerdict(trial: Trial): Remedy['verdict'] {
 }
 
 /** What else changes: polarity, price, requirements that fail afterwards. Empty, or starting with a space. */
-export function consequenceText(trial: Trial): string {
+function consequenceText(trial: Trial): string {
   const sentences = [polarityText(trial), failureText(trial)].filter((text) => text !== '');
   return sentences.map((text) => ` ${text}`).join('');
 }
