@@ -1,5 +1,7 @@
 import { request as httpRequest } from 'node:http';
 import type { AddressInfo } from 'node:net';
+import { Logger } from '@nestjs/common';
+import { UsersService } from '../src/users/users.service';
 import { type SignedIn, TestApp } from './create-test-app';
 
 /** Sends bytes as they are, past every client library's own ideas of JSON. */
@@ -105,6 +107,17 @@ describe('requests that cannot be served', () => {
       message: expect.any(String),
       requestId: response.headers['x-request-id'],
     });
+  });
+
+  it('keeps what went wrong inside to itself, and to the log with the id of the request', async () => {
+    jest.spyOn(testApp.app.get(UsersService), 'findAll').mockRejectedValueOnce(new Error('a detail of the inside'));
+    const log = jest.spyOn(Logger.prototype, 'error').mockImplementation(() => undefined);
+    const { body, status } = await admin.agent.get('/api/users');
+    expect({ status, code: body.code }).toEqual({ status: 500, code: 'internal' });
+    expect(JSON.stringify(body)).not.toContain('detail');
+    expect(log).toHaveBeenCalledWith(expect.stringContaining('a detail of the inside'));
+    expect(log).toHaveBeenCalledWith(expect.stringContaining(body.requestId as string));
+    jest.restoreAllMocks();
   });
 
   it('gives every request an id of its own, whatever the client sent', async () => {

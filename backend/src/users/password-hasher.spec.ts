@@ -1,4 +1,4 @@
-import { scryptSync } from 'node:crypto';
+import crypto, { scryptSync } from 'node:crypto';
 import { readEnvironment } from '../config/environment';
 import { Runtime } from '../config/runtime';
 import { PasswordHasher } from './password-hasher';
@@ -43,6 +43,37 @@ describe('PasswordHasher', () => {
 
   it('says no without a stored hash, whatever the password', async () => {
     expect(await hasher.verify('anything', null)).toBe(false);
+  });
+
+  it('works as long for an account that is not there as for one that is', async () => {
+    const stored = await hasher.hash('x');
+    await hasher.verify('warm up', null);
+    const scrypt = jest.spyOn(crypto, 'scrypt');
+    await hasher.verify('guess', stored);
+    const known = scrypt.mock.calls.map(([, , keyLength, options]) => [keyLength, options]);
+    scrypt.mockClear();
+    await hasher.verify('guess', null);
+    const unknown = scrypt.mock.calls.map(([, , keyLength, options]) => [keyLength, options]);
+    scrypt.mockRestore();
+    expect(known).toHaveLength(1);
+    expect(unknown).toEqual(known);
+  });
+
+  it('hashes at most two at once, however many ask', async () => {
+    const original = crypto.scrypt;
+    let running = 0;
+    let most = 0;
+    const scrypt = jest.spyOn(crypto, 'scrypt').mockImplementation((password, salt, length, options, callback) => {
+      running += 1;
+      most = Math.max(most, running);
+      original(password, salt, length, options, (error, key) => {
+        running -= 1;
+        callback(error, key);
+      });
+    });
+    await Promise.all(Array.from({ length: 8 }, (_, n) => hasher.hash(`password ${n}`)));
+    scrypt.mockRestore();
+    expect(most).toBe(2);
   });
 
   it('reports a damaged hash instead of letting anybody in', async () => {
