@@ -1,7 +1,7 @@
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vitest/config';
 
-const backendUrl = process.env['BACKEND_URL'] ?? 'http://127.0.0.1:4310';
+const backendUrl = process.env['BACKEND_URL'] ?? 'http://127.0.0.1:4180';
 
 export default defineConfig({
   plugins: [react()],

@@ -34,8 +34,8 @@ export function DataMarks({ marks }: { marks: readonly DataMark[] }) {
 export function GradeMark({ grade }: { grade: 'general-purpose' | 'rf' | null }) {
   if (grade !== 'rf') return null;
   return (
-    <abbr className={styles.grade} title="RF grade">
-      RF
-    </abbr>
+    <span className={styles.grade} title="RF grade">
+      RF<span className="visually-hidden"> grade</span>
+    </span>
   );
 }

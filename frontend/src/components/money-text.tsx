@@ -15,7 +15,7 @@ export interface MoneyTextProps {
 export function MoneyText({ money, name, hideCurrency, strong, onOpen }: MoneyTextProps) {
   const known = money.amountMicros !== null;
   const amount = money.amountMicros === null ? '–' : formatMicros(money.amountMicros, money.currency);
-  const text = known && !hideCurrency ? `${amount}\u202f${money.currency}` : amount;
+  const text = known && !hideCurrency ? `${amount}\u00a0${money.currency}` : amount;
   const classes = `${styles.figure} ${strong ? styles.strong : ''} ${known ? '' : styles.missing}`;
   const content = (
     <>

@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import type { Unit } from '../api/types';
 import { formatFigure, otherNotation } from './format-figure';
 
-const plain = (text: string | null): string | null => text?.replace(/\u202f/g, ' ').replace(/\u2212/g, '-') ?? null;
+const plain = (text: string | null): string | null => text?.replace(/\u00a0/g, ' ').replace(/\u2212/g, '-') ?? null;
 const print = (value: number | null, unit: Unit, digits: number): string | null =>
   plain(formatFigure({ value, unit, digits, reason: 'none' }).text);
 

@@ -1,7 +1,7 @@
 import type { Figure, Unit } from '../api/types';
 
-/** Narrow no-break space between number and unit. */
-const GAP = '\u202f';
+/** No-break space between number and unit. */
+const GAP = '\u00a0';
 const MINUS = '\u2212';
 
 const PREFIXES: readonly (readonly [exponent: number, symbol: string])[] = [

@@ -34,7 +34,7 @@ export function formatMicros(amountMicros: number, currency: string): string {
 export function formatMoney(money: Money): string {
   return money.amountMicros === null
     ? '–'
-    : `${formatMicros(money.amountMicros, money.currency)}\u202f${money.currency}`;
+    : `${formatMicros(money.amountMicros, money.currency)}\u00a0${money.currency}`;
 }
 
 export type ParsedPrice =

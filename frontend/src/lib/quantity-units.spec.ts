@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 
 import { describeQuantity, limitMessage, parseInUnit, toFieldText, type QuantityUnit } from './quantity-units';
 
-const plain = (text: string | null): string | null => text?.replace(/\u202f/g, ' ').replace(/\u2212/g, '-') ?? null;
+const plain = (text: string | null): string | null => text?.replace(/\u00a0/g, ' ').replace(/\u2212/g, '-') ?? null;
 
 describe('toFieldText(value, unit)', () => {
   it.each<[number | null, QuantityUnit, string]>([

@@ -85,6 +85,8 @@ export function antdThemeFor(appearance: Appearance): ThemeConfig {
       colorTextTertiary: palette.inkSoft,
       colorTextDescription: palette.inkSoft,
       colorTextPlaceholder: palette.inkSoft,
+      colorTextDisabled: palette.inkSoft,
+      colorBgContainerDisabled: palette.raised,
       colorBgBase: palette.paper,
       colorBgLayout: palette.paper,
       colorBgContainer: palette.field,

@@ -46,6 +46,7 @@ export function SheetRow({ field, sheet = EMPTY_SHEET, problems, onChange }: She
       ))}
       <TextCell
         label={`${field.label}, condition`}
+        className={styles.condition}
         placeholder="condition"
         maxLength={120}
         value={sheet.condition}
@@ -54,6 +55,7 @@ export function SheetRow({ field, sheet = EMPTY_SHEET, problems, onChange }: She
       />
       <TextCell
         label={`${field.label}, datasheet page`}
+        className={styles.cell}
         placeholder="page"
         maxLength={24}
         value={sheet.page}
@@ -111,6 +113,7 @@ function RowLabel({ field, filled, error }: { field: DeviceField; filled: boolea
 
 interface TextCellProps {
   label: string;
+  className?: string;
   placeholder: string;
   maxLength: number;
   value: string;
@@ -118,10 +121,10 @@ interface TextCellProps {
   onChange: (value: string) => void;
 }
 
-function TextCell({ label, placeholder, maxLength, value, error, onChange }: TextCellProps) {
+function TextCell({ label, className, placeholder, maxLength, value, error, onChange }: TextCellProps) {
   const id = useId();
   return (
-    <div className={styles.cell}>
+    <div className={className}>
       <Input
         value={value}
         placeholder={placeholder}

@@ -82,7 +82,7 @@ function ValueRow({ device, field }: { device: DeviceDto; field: DeviceField }) 
     return (
       <tr>
         {name}
-        <td className="number" colSpan={3}>
+        <td className={styles.single} colSpan={3}>
           {typeof single === 'number' ? describeQuantity(single, field.unit) : ''}
         </td>
         <td />

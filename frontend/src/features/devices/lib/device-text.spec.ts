@@ -12,7 +12,7 @@ const quote: Quote = {
     { quantity: 1000, unitPriceMicros: 550_000 },
   ],
 };
-const plain = (text: string | null): string | null => text?.replace(/\u202f/g, ' ') ?? null;
+const plain = (text: string | null): string | null => text?.replace(/\u00a0/g, ' ') ?? null;
 
 describe('unitPriceAt(quote, quantity)', () => {
   it.each([

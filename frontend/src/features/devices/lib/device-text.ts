@@ -26,6 +26,6 @@ export function unitPriceAt(quote: Quote, quantity: number): number | null {
 export function lowestPriceText(quote: Quote | undefined): string | null {
   if (!quote || quote.breaks.length === 0) return null;
   const lowest = quote.breaks.reduce((best, step) => (step.unitPriceMicros < best.unitPriceMicros ? step : best));
-  const price = `${formatMicros(lowest.unitPriceMicros, quote.currency)}\u202f${quote.currency}`;
+  const price = `${formatMicros(lowest.unitPriceMicros, quote.currency)}\u00a0${quote.currency}`;
   return lowest.quantity > 1 ? `${price} at ${lowest.quantity}` : price;
 }

@@ -47,6 +47,7 @@ export function PolicyFields({ policy, onChange, problems, disabled }: PolicyFie
                 minimum={field.minimum}
                 maximum={field.maximum}
                 required
+                quietRequired
                 disabled={disabled}
                 value={round(policy[field.key] * field.factor)}
                 error={problems[`policy.${field.key}`]}
