@@ -43,6 +43,12 @@ function codeOf(error: ValidationError, constraint: string, message: string): st
   return CODE_BY_CONSTRAINT[constraint] ?? 'invalid';
 }
 
+function messageOf(error: ValidationError, constraint: string, message: string): string {
+  if (constraint === 'whitelistValidation') return 'is no field of this request';
+  const isAbsent = error.value === undefined || error.value === null;
+  return isAbsent && error.contexts?.[constraint] === undefined ? 'is required' : message;
+}
+
 /** The reason that explains most comes first: "required" and "not a number" before "out of range". */
 const WEIGHT = ['unknown_field', 'required', 'not_a_number', 'not_an_integer', 'not_text', 'not_an_object'];
 
@@ -55,7 +61,7 @@ function ownError(error: ValidationError, path: string): FieldError[] {
   const candidates = Object.entries(error.constraints ?? {}).map(([constraint, message]) => ({
     path,
     code: codeOf(error, constraint, message),
-    message,
+    message: messageOf(error, constraint, message),
   }));
   candidates.sort((a, b) => weightOf(a.code) - weightOf(b.code));
   return candidates.slice(0, 1);

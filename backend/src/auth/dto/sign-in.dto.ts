@@ -8,15 +8,15 @@ import { NewPasswordField, PASSWORD_MAX_LENGTH } from '../../users/dto/password-
 export class SignInDto {
   /** Not checked for being a mail address: what is none simply has no account. */
   @ApiProperty({ maxLength: 254 })
-  @IsString()
-  @MinLength(1)
-  @MaxLength(254)
+  @IsString({ message: 'must be text' })
+  @MinLength(1, { message: 'is required' })
+  @MaxLength(254, { message: 'must be at most 254 characters long' })
   email: string;
 
   @ApiProperty({ maxLength: PASSWORD_MAX_LENGTH })
-  @IsString()
-  @MinLength(1)
-  @MaxLength(PASSWORD_MAX_LENGTH)
+  @IsString({ message: 'must be text' })
+  @MinLength(1, { message: 'is required' })
+  @MaxLength(PASSWORD_MAX_LENGTH, { message: `must be at most ${PASSWORD_MAX_LENGTH} characters long` })
   password: string;
 }
 
@@ -27,9 +27,9 @@ export class DemoSignInDto {
 
 export class SetupDto {
   @ApiProperty({ description: 'SETUP_TOKEN, or the token that the server printed at its start' })
-  @IsString()
-  @MinLength(1)
-  @MaxLength(500)
+  @IsString({ message: 'must be text' })
+  @MinLength(1, { message: 'is required' })
+  @MaxLength(500, { message: 'must be at most 500 characters long' })
   token: string;
 
   @Text({ maximum: TEXT_LIMITS.name })

@@ -8,7 +8,7 @@ export function EmailField(): PropertyDecorator {
   return applyDecorators(
     ApiProperty({ format: 'email', maxLength: 254 }),
     Transform(({ value }: { value: unknown }) => (typeof value === 'string' ? value.trim().toLowerCase() : value)),
-    IsEmail(),
-    MaxLength(254),
+    IsEmail({}, { message: 'must be a mail address' }),
+    MaxLength(254, { message: 'must be at most 254 characters long' }),
   );
 }

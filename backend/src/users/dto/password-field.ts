@@ -9,8 +9,8 @@ export const PASSWORD_MAX_LENGTH = 200;
 export function NewPasswordField(): PropertyDecorator {
   return applyDecorators(
     ApiProperty({ minLength: PASSWORD_MIN_LENGTH, maxLength: PASSWORD_MAX_LENGTH }),
-    IsString(),
-    MinLength(PASSWORD_MIN_LENGTH),
-    MaxLength(PASSWORD_MAX_LENGTH),
+    IsString({ message: 'must be text' }),
+    MinLength(PASSWORD_MIN_LENGTH, { message: `must be at least ${PASSWORD_MIN_LENGTH} characters long` }),
+    MaxLength(PASSWORD_MAX_LENGTH, { message: `must be at most ${PASSWORD_MAX_LENGTH} characters long` }),
   );
 }

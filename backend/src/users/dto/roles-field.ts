@@ -4,5 +4,10 @@ import { ROLES } from '../../common/role';
 
 /** At least one role, none twice. */
 export function RolesField(): PropertyDecorator {
-  return applyDecorators(IsArray(), ArrayMinSize(1), ArrayUnique(), IsIn(ROLES, { each: true }));
+  return applyDecorators(
+    IsArray({ message: 'must be a list of roles' }),
+    ArrayMinSize(1, { message: 'needs at least one role' }),
+    ArrayUnique({ message: 'names a role twice' }),
+    IsIn(ROLES, { each: true, message: `must be of: ${ROLES.join(', ')}` }),
+  );
 }
