@@ -18,7 +18,7 @@ function targetFactor(facts: ChainFacts, stage: StageFacts): number {
 /** The exact, loaded −3 dB corner against the top of the band. */
 export function bandwidthCheck(facts: ChainFacts, stage: StageFacts): Check | null {
   const corner = stage.analysis.cornerUpperHz;
-  const actual = stageFigure(facts, stage, 'cornerUpper');
+  const actual = (): Figure => stageFigure(facts, stage, 'cornerUpper');
   if (corner.value === null) {
     return bandwidthWithoutCorner(stage, corner.reason, actual);
   }
@@ -29,18 +29,23 @@ export function bandwidthCheck(facts: ChainFacts, stage: StageFacts): Check | nu
     : isBelow(corner.value, highHz * factor)
       ? 'tight'
       : 'clear';
-  const limit = limitFigure(verdict === 'over' ? highHz : highHz * factor, 'Hz');
-  return makeCheck('bandwidth', TITLE, verdict, upperSentence(facts, stage, corner.value, verdict), { actual, limit });
+  const { value } = corner;
+  const sentence = (): string => upperSentence(facts, stage, value, verdict);
+  return makeCheck('bandwidth', TITLE, verdict, sentence, () => ({
+    actual: actual(),
+    limit: limitFigure(verdict === 'over' ? highHz : highHz * factor, 'Hz'),
+  }));
 }
 
 /** A corner beyond the search range is no limit; a gain that never comes up is over; what cannot be computed is unknown. */
-function bandwidthWithoutCorner(stage: StageFacts, reason: string, actual: Figure): Check | null {
+function bandwidthWithoutCorner(stage: StageFacts, reason: string, actual: () => Figure): Check | null {
   const { gainOperatingDb, operatingBeyondCorner, cornerLowerHz } = stage.analysis;
   if (gainOperatingDb.value === null)
-    return unknownCheck('bandwidth', TITLE, cannotBeJudged('the corner', reason), actual);
+    return unknownCheck('bandwidth', TITLE, () => cannotBeJudged('the corner', reason), actual);
   if (!operatingBeyondCorner || cornerLowerHz.value !== null) return null;
-  const sentence = `${capitalised(partName(stage))} never comes to half the power of its ideal gain here.`;
-  return makeCheck('bandwidth', TITLE, 'over', sentence, { actual });
+  const sentence = (): string =>
+    `${capitalised(partName(stage))} never comes to half the power of its ideal gain here.`;
+  return makeCheck('bandwidth', TITLE, 'over', sentence, () => ({ actual: actual() }));
 }
 
 function upperSentence(facts: ChainFacts, stage: StageFacts, corner: number, verdict: Verdict): string {
@@ -67,20 +72,28 @@ export function lowerCornerCheck(facts: ChainFacts, stage: StageFacts): Check | 
     : isAbove(corner.value * factor, lowHz)
       ? 'tight'
       : 'clear';
-  const limit = limitFigure(verdict === 'over' ? lowHz : lowHz / factor, 'Hz');
-  const value = valueText(corner.value, 'Hz', [lowHz, lowHz / factor]);
+  const { value } = corner;
+  return makeCheck(
+    'lower-corner',
+    LOWER_TITLE,
+    verdict,
+    () => lowerSentence(facts, stage, value, verdict),
+    () => ({
+      actual: stageFigure(facts, stage, 'cornerLower'),
+      limit: limitFigure(verdict === 'over' ? lowHz : lowHz / factor, 'Hz'),
+    }),
+  );
+}
+
+function lowerSentence(facts: ChainFacts, stage: StageFacts, corner: number, verdict: Verdict): string {
+  const { lowHz } = facts.input.specification.band;
+  const factor = targetFactor(facts, stage);
   const cause = isFeedbackStage(stage.stage)
     ? 'Its coupling puts the lower −3 dB corner at'
     : 'Its lower −3 dB corner is at';
-  const ratio = valueText(lowHz / corner.value, 'ratio', [1, factor]);
-  const tail = {
-    over: `the band starts at ${setFrequency(lowHz)}`,
-    tight: `${ratio} below the bottom of the band, target ${targetText(factor)}`,
-    clear: `${ratio} below the bottom of the band`,
-    unknown: '',
-  }[verdict];
-  return makeCheck('lower-corner', LOWER_TITLE, verdict, `${cause} ${value}: ${tail}.`, {
-    actual: stageFigure(facts, stage, 'cornerLower'),
-    limit,
-  });
+  const is = `${cause} ${valueText(corner, 'Hz', [lowHz, lowHz / factor])}`;
+  if (verdict === 'over') return `${is}: the band starts at ${setFrequency(lowHz)}.`;
+  const ratio = valueText(lowHz / corner, 'ratio', [1, factor]);
+  const target = verdict === 'tight' ? `, target ${targetText(factor)}` : '';
+  return `${is}: ${ratio} below the bottom of the band${target}.`;
 }

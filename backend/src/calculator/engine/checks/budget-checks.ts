@@ -1,5 +1,5 @@
 import type { Maybe } from '../analysis';
-import type { Check, CheckId, Figure, Unit } from '../report';
+import type { Check, CheckId, Figure, Unit, Verdict } from '../report';
 import { chainFigure } from '../report/chain-figures';
 import { noiseShare } from '../report/derived';
 import type { ChainFacts, StageFacts } from '../report/facts';
@@ -16,19 +16,24 @@ interface Budget {
   readonly value: Maybe;
   readonly limit: number;
   readonly unit: Unit;
-  readonly actual: Figure;
+  readonly actual: () => Figure;
   /** Which stage takes most, as a sentence. */
-  readonly largest: string;
+  readonly largest: () => string;
 }
 
 function budgetCheck(facts: ChainFacts, budget: Budget): Check {
   const { id, title, value, limit, unit, actual } = budget;
-  if (value.value === null) return unknownCheck(id, title, cannotBeJudged(`the ${title}`, value.reason), actual);
+  if (value.value === null) {
+    const { reason } = value;
+    return unknownCheck(id, title, () => cannotBeJudged(`the ${title}`, reason), actual);
+  }
   const size = Math.abs(value.value);
   const verdict = verdictAtMost(size, limit, limit * (1 - facts.policy.budgetMargin));
-  const sentence = `${capitalised(title)} is ${valueText(size, unit, [limit])} of ${typed(limit, unit)}.`;
-  const tail = verdict === 'clear' || budget.largest === '' ? '' : ` ${budget.largest}`;
-  return makeCheck(id, title, verdict, sentence + tail, { actual, limit: limitFigure(limit, unit) });
+  const sentence = (): string => {
+    const is = `${capitalised(title)} is ${valueText(size, unit, [limit])} of ${typed(limit, unit)}.`;
+    return verdict === 'clear' ? is : `${is} ${budget.largest()}`.trim();
+  };
+  return makeCheck(id, title, verdict, sentence, () => ({ actual: actual(), limit: limitFigure(limit, unit) }));
 }
 
 function largestStage(
@@ -48,7 +53,7 @@ function largestText(facts: ChainFacts, unit: Unit, of: (stage: StageFacts) => M
   return largest ? `${largest.stage.label} ${verb} ${valueText(Math.abs(largest.value), unit)}.` : '';
 }
 
-function noiseiest(facts: ChainFacts): string {
+function noisiest(facts: ChainFacts): string {
   const largest = largestStage(facts, (stage) => noiseShare(facts, stage));
   return largest ? `${largest.stage.label} adds ${valueText(largest.value, 'fraction')} of the noise power.` : '';
 }
@@ -63,8 +68,8 @@ export function inputNoiseCheck(facts: ChainFacts): Check | null {
     value: facts.chain.inputNoise,
     limit,
     unit: noiseUnit(facts),
-    actual: chainFigure(facts, 'inputNoise'),
-    largest: noiseiest(facts),
+    actual: () => chainFigure(facts, 'inputNoise'),
+    largest: () => noisiest(facts),
   });
 }
 
@@ -73,17 +78,21 @@ export function noiseFigureCheck(facts: ChainFacts): Check | null {
   const limit = facts.input.specification.requirements.noiseFigureDb;
   if (limit === undefined) return null;
   const value = facts.chain.noiseFigureDb;
-  const actual = chainFigure(facts, 'noiseFigure');
+  const actual = (): Figure => chainFigure(facts, 'noiseFigure');
   if (value.value === null) {
-    return unknownCheck('noise-figure', 'noise figure', cannotBeJudged('the noise figure', value.reason), actual);
+    const { reason } = value;
+    return unknownCheck('noise-figure', 'noise figure', () => cannotBeJudged('the noise figure', reason), actual);
   }
-  const verdict = verdictAtMost(value.value, limit, limit - facts.policy.noiseMarginDb);
-  const sentence = `Noise figure is ${decibelText(value.value, [limit])}; the limit is ${decibelText(limit)}.`;
-  const tail = verdict === 'clear' ? '' : ` ${noiseiest(facts)}`;
-  return makeCheck('noise-figure', 'noise figure', verdict, (sentence + tail).trim(), {
-    actual,
+  const noiseFigure = value.value;
+  const verdict = verdictAtMost(noiseFigure, limit, limit - facts.policy.noiseMarginDb);
+  const sentence = (): string => {
+    const is = `Noise figure is ${decibelText(noiseFigure, [limit])}; the limit is ${decibelText(limit)}.`;
+    return verdict === 'clear' ? is : `${is} ${noisiest(facts)}`.trim();
+  };
+  return makeCheck('noise-figure', 'noise figure', verdict, sentence, () => ({
+    actual: actual(),
     limit: limitFigure(limit, 'dB'),
-  });
+  }));
 }
 
 /** Output offset, supply current and supply power. */
@@ -96,8 +105,8 @@ export function outputOffsetCheck(facts: ChainFacts): Check | null {
     value: facts.chain.outputOffsetV,
     limit,
     unit: 'V',
-    actual: chainFigure(facts, 'outputOffset'),
-    largest: '',
+    actual: () => chainFigure(facts, 'outputOffset'),
+    largest: () => '',
   });
 }
 
@@ -110,8 +119,8 @@ export function supplyCurrentCheck(facts: ChainFacts): Check | null {
     value: facts.chain.supplyCurrentA,
     limit,
     unit: 'A',
-    actual: chainFigure(facts, 'supplyCurrent'),
-    largest: largestText(facts, 'A', (stage) => stage.analysis.supplyCurrentA, 'takes'),
+    actual: () => chainFigure(facts, 'supplyCurrent'),
+    largest: () => largestText(facts, 'A', (stage) => stage.analysis.supplyCurrentA, 'takes'),
   });
 }
 
@@ -124,8 +133,8 @@ export function supplyPowerCheck(facts: ChainFacts): Check | null {
     value: facts.chain.supplyPowerW,
     limit,
     unit: 'W',
-    actual: chainFigure(facts, 'supplyPower'),
-    largest: largestText(facts, 'W', (stage) => stage.analysis.supplyPowerW, 'takes'),
+    actual: () => chainFigure(facts, 'supplyPower'),
+    largest: () => largestText(facts, 'W', (stage) => stage.analysis.supplyPowerW, 'takes'),
   });
 }
 
@@ -133,18 +142,22 @@ export function supplyPowerCheck(facts: ChainFacts): Check | null {
 export function costCheck(facts: ChainFacts): Check | null {
   const limitMicros = facts.input.specification.requirements.costMicros;
   if (limitMicros === undefined) return null;
-  const { total, stages } = facts.cost;
-  if (total.amountMicros === null) {
-    return unknownCheck('cost', 'cost', cannotBeJudged('the cost', total.reason ?? 'a price is missing'));
+  const { amountMicros, reason } = facts.cost.total;
+  if (amountMicros === null) {
+    return unknownCheck('cost', 'cost', () => cannotBeJudged('the cost', reason ?? 'a price is missing'));
   }
-  const verdict = verdictAtMost(total.amountMicros, limitMicros, limitMicros * (1 - facts.policy.budgetMargin));
-  const side = total.amountMicros > limitMicros ? 'over' : 'under';
-  const left = decimalAmount(Math.abs(limitMicros - total.amountMicros));
-  const sentence = `Cost is ${decimalAmount(total.amountMicros)} ${total.currency}, ${left} ${side} ${decimalAmount(limitMicros)}.`;
+  const verdict = verdictAtMost(amountMicros, limitMicros, limitMicros * (1 - facts.policy.budgetMargin));
+  return makeCheck('cost', 'cost', verdict, () => costSentence(facts, amountMicros, limitMicros, verdict));
+}
+
+function costSentence(facts: ChainFacts, amountMicros: number, limitMicros: number, verdict: Verdict): string {
+  const { total, stages } = facts.cost;
+  const side = amountMicros > limitMicros ? 'over' : 'under';
+  const left = decimalAmount(Math.abs(limitMicros - amountMicros));
+  const is = `Cost is ${decimalAmount(amountMicros)} ${total.currency}, ${left} ${side} ${decimalAmount(limitMicros)}.`;
   const dearest = [...stages].sort((a, b) => (b.money.amountMicros ?? 0) - (a.money.amountMicros ?? 0))[0];
-  const tail =
-    verdict === 'clear' || !dearest ? '' : ` ${dearest.label} takes ${decimalAmount(dearest.money.amountMicros ?? 0)}.`;
-  return makeCheck('cost', 'cost', verdict, sentence + tail);
+  if (verdict === 'clear' || !dearest) return is;
+  return `${is} ${dearest.label} takes ${decimalAmount(dearest.money.amountMicros ?? 0)}.`;
 }
 
 /** Polarity of the whole chain where one is required. */
@@ -152,11 +165,16 @@ export function polarityCheck(facts: ChainFacts): Check | null {
   const required = facts.input.specification.requirements.polarity;
   if (required === undefined) return null;
   const actual = facts.chain.inverted ? 'inverted' : 'in-phase';
-  const words = { inverted: 'inverted', 'in-phase': 'in phase' };
   const isMet = actual === required;
+  return makeCheck('polarity', 'polarity', isMet ? 'clear' : 'over', () => polaritySentence(facts, actual, required));
+}
+
+type Polarity = 'in-phase' | 'inverted';
+
+function polaritySentence(facts: ChainFacts, actual: Polarity, required: Polarity): string {
+  const words = { inverted: 'inverted', 'in-phase': 'in phase' };
+  if (actual === required) return `The output is ${words[actual]}, as required.`;
   const count = facts.stages.filter((stage) => stage.analysis.signalGain < 0).length;
-  const sentence = isMet
-    ? `The output is ${words[actual]}, as required.`
-    : `The output is ${words[actual]} (${count} inverting ${count === 1 ? 'stage' : 'stages'}); required is ${words[required]}.`;
-  return makeCheck('polarity', 'polarity', isMet ? 'clear' : 'over', sentence);
+  const inverting = `${count} inverting ${count === 1 ? 'stage' : 'stages'}`;
+  return `The output is ${words[actual]} (${inverting}); required is ${words[required]}.`;
 }

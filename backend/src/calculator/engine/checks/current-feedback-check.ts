@@ -1,8 +1,7 @@
 import type { Check } from '../report';
-import { partName } from '../report/facts';
 import type { ChainFacts, StageFacts } from '../report/facts';
 import { figure, limitFigure } from '../report/figures';
-import type { CurrentFeedbackDevice, DatasheetValue } from '../types';
+import type { CurrentFeedbackDevice, CurrentFeedbackStage, DatasheetValue } from '../types';
 import { isBelow } from '../text/deciding-digits';
 import { atLeastText, valueText } from '../text/phrases';
 import { typed } from '../text/si-format';
@@ -37,16 +36,24 @@ export function feedbackResistorShare(stage: StageFacts): number | null {
 export function feedbackResistorCheck(_facts: ChainFacts, stage: StageFacts): Check | null {
   const share = feedbackResistorShare(stage);
   const { device } = stage;
-  if (share === null || device?.kind !== 'current-feedback' || stage.stage.kind !== 'current-feedback') return null;
+  const set = stage.stage;
+  if (share === null || device?.kind !== 'current-feedback' || set.kind !== 'current-feedback') return null;
   const isLow = isBelow(share, LOWEST_FEEDBACK_SHARE);
-  const buffer = typicalValue(device.invertingInputResistanceOhm) ?? 0;
-  const least = LOWEST_FEEDBACK_SHARE * referenceOhm(device) - (stage.analysis.noiseGain ?? 1) * buffer;
-  const low =
-    `Its feedback resistor of ${typed(stage.stage.feedbackOhm, 'Ω')} is small for ${partName(stage)}: the response peaks. ` +
-    `At least ${atLeastText(Math.max(least, 1), 'Ω')} here.`;
-  const fine = `Rf + NG·Rb is ${valueText(share, 'fraction', [LOWEST_FEEDBACK_SHARE])} of the reference circuit's.`;
-  return makeCheck('feedback-resistor', 'feedback resistor', isLow ? 'tight' : 'clear', isLow ? low : fine, {
+  const sentence = (): string =>
+    isLow
+      ? smallResistorSentence(stage, set, device)
+      : `Rf + NG·Rb is ${valueText(share, 'fraction', [LOWEST_FEEDBACK_SHARE])} of the reference circuit's.`;
+  return makeCheck('feedback-resistor', 'feedback resistor', isLow ? 'tight' : 'clear', sentence, () => ({
     actual: figure(share, 'fraction', { limits: [LOWEST_FEEDBACK_SHARE] }),
     limit: limitFigure(LOWEST_FEEDBACK_SHARE, 'fraction'),
-  });
+  }));
+}
+
+function smallResistorSentence(stage: StageFacts, set: CurrentFeedbackStage, device: CurrentFeedbackDevice): string {
+  const buffer = typicalValue(device.invertingInputResistanceOhm) ?? 0;
+  const least = LOWEST_FEEDBACK_SHARE * referenceOhm(device) - (stage.analysis.noiseGain ?? 1) * buffer;
+  return (
+    `Its feedback resistor of ${typed(set.feedbackOhm, 'Ω')} is small for ${device.partNumber}: the response peaks. ` +
+    `At least ${atLeastText(Math.max(least, 1), 'Ω')} here.`
+  );
 }

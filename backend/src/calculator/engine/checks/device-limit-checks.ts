@@ -22,16 +22,24 @@ export function compressionCheck(facts: ChainFacts, stage: StageFacts): Check | 
   if (limitDbm === null) return null;
   const peak = stage.analysis.outputPeakV;
   if (peak.value === null) {
-    return unknownCheck('compression', 'compression', cannotBeJudged('the output level', peak.reason));
+    const { reason } = peak;
+    return unknownCheck('compression', 'compression', () => cannotBeJudged('the output level', reason));
   }
-  if (peak.value === 0) return makeCheck('compression', 'compression', 'clear', 'No signal: no compression.');
-  const marginDb = limitDbm - dbmOf(peak.value, device.impedanceOhm);
+  if (peak.value === 0) return makeCheck('compression', 'compression', 'clear', () => 'No signal: no compression.');
+  const { value } = peak;
+  const marginDb = limitDbm - dbmOf(value, device.impedanceOhm);
   const { levelMarginDb } = facts.policy;
   const verdict: Verdict = marginDb < 0 ? 'over' : marginDb < levelMarginDb ? 'tight' : 'clear';
-  return makeCheck('compression', 'compression', verdict, compressionSentence(stage, device, peak.value, limitDbm), {
-    actual: figure(marginDb, 'dB', { limits: [0, levelMarginDb] }),
-    limit: limitFigure(levelMarginDb, 'dB'),
-  });
+  return makeCheck(
+    'compression',
+    'compression',
+    verdict,
+    () => compressionSentence(stage, device, value, limitDbm),
+    () => ({
+      actual: figure(marginDb, 'dB', { limits: [0, levelMarginDb] }),
+      limit: limitFigure(levelMarginDb, 'dB'),
+    }),
+  );
 }
 
 function compressionSentence(stage: StageFacts, device: MatchedBlockDevice, peakV: number, limitDbm: number): string {
@@ -52,15 +60,17 @@ export function supplyVoltageCheck(facts: ChainFacts, stage: StageFacts): Check 
   const totalV = supply.positiveV - supply.negativeV;
   if (min === undefined && max === undefined) {
     if (device.kind === 'matched-block') return null;
-    const sentence = cannotBeJudged('the supply voltage', `Supply range of ${device.partNumber} is not entered.`);
-    return unknownCheck('supply-voltage', 'supply voltage', sentence, figure(totalV, 'V'));
+    const sentence = (): string =>
+      cannotBeJudged('the supply voltage', `Supply range of ${device.partNumber} is not entered.`);
+    return unknownCheck('supply-voltage', 'supply voltage', sentence, () => figure(totalV, 'V'));
   }
   const broken = brokenBound(totalV, min, max);
-  const sentence = `The supply is ${valueText(totalV, 'V')} in all; ${device.partNumber} takes ${rangeText(min, max)}.`;
-  return makeCheck('supply-voltage', 'supply voltage', broken === null ? 'clear' : 'over', sentence, {
+  const sentence = (): string =>
+    `The supply is ${valueText(totalV, 'V')} in all; ${device.partNumber} takes ${rangeText(min, max)}.`;
+  return makeCheck('supply-voltage', 'supply voltage', broken === null ? 'clear' : 'over', sentence, () => ({
     actual: figure(totalV, 'V', { limits: [min, max] }),
     limit: limitFigure([broken, max, min].find((bound) => typeof bound === 'number') ?? totalV, 'V'),
-  });
+  }));
 }
 
 function brokenBound(totalV: number, least: number | undefined, most: number | undefined): number | null {

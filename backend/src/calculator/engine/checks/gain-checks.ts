@@ -1,27 +1,32 @@
-import type { Check, Figure, Verdict } from '../report';
+import type { Check, CheckId, Figure, Verdict } from '../report';
 import { chainFigure, chainGainUnit } from '../report/chain-figures';
 import type { ChainFacts } from '../report/facts';
 import { limitFigure } from '../report/figures';
 import { ratioToDb } from '../report/maybe';
 import { isAbove, isBelow } from '../text/deciding-digits';
-import { because, cannotBeJudged, decibelText, setFrequency, targetText, valueText } from '../text/phrases';
+import { because, cannotBeJudged, decibelText, setFrequency, valueText } from '../text/phrases';
 import { flatnessContributions, gainContributions, largestContributionText } from './contributions';
-import { makeCheck, unknownCheck, verdictAtMost } from './make-check';
+import { makeCheck, unknownCheck, verdictAtLeast, verdictAtMost } from './make-check';
+import type { CheckFigures } from './make-check';
 
 /** Gain at the operating frequency against the window, the least and the most that are required. */
 export function gainCheck(facts: ChainFacts): Check | null {
   const { gainDb, minimumGainDb, maximumGainDb } = facts.input.specification.requirements;
   if (gainDb === undefined && minimumGainDb === undefined && maximumGainDb === undefined) return null;
   const gain = facts.chain.gainOperatingDb;
-  const actual = chainFigure(facts, 'gainOperating');
-  if (gain.value === null) return unknownCheck('gain', 'chain gain', cannotBeJudged('the gain', gain.reason), actual);
-  const bounds = gainBounds(facts);
-  const { verdict, limit } = judgeBounds(gain.value, bounds);
-  const sentence = gainSentence(facts, gain.value, verdict, limit);
-  return makeCheck('gain', 'chain gain', verdict, sentence, {
-    actual,
+  const actual = (): Figure => chainFigure(facts, 'gainOperating');
+  if (gain.value === null) return unknownRequirement('gain', 'chain gain', gain.reason, actual);
+  const { value } = gain;
+  const { verdict, limit } = judgeBounds(value, gainBounds(facts));
+  const sentence = (): string => gainSentence(facts, value, verdict, limit);
+  return makeCheck('gain', 'chain gain', verdict, sentence, () => ({
+    actual: actual(),
     limit: limitFigure(limit, chainGainUnit(facts)),
-  });
+  }));
+}
+
+function unknownRequirement(id: CheckId, title: string, reason: string, actual: () => Figure): Check {
+  return unknownCheck(id, title, () => cannotBeJudged(`the ${title}`, reason), actual);
 }
 
 /** A side of the allowed gain and how close to it is tight, in dB. */
@@ -99,16 +104,23 @@ export function flatnessCheck(facts: ChainFacts): Check | null {
   const required = facts.input.specification.requirements.flatnessDb;
   if (required === undefined) return null;
   const { flatnessDb } = facts.chain;
-  const actual = chainFigure(facts, 'flatness');
-  if (flatnessDb.value === null) {
-    return unknownCheck('flatness', 'flatness', cannotBeJudged('the flatness', flatnessDb.reason), actual);
-  }
-  const verdict = verdictAtMost(flatnessDb.value, required, required * (1 - facts.policy.toleranceMargin));
+  const actual = (): Figure => chainFigure(facts, 'flatness');
+  if (flatnessDb.value === null) return unknownRequirement('flatness', 'flatness', flatnessDb.reason, actual);
+  const { value } = flatnessDb;
+  const verdict = verdictAtMost(value, required, required * (1 - facts.policy.toleranceMargin));
+  const sentence = (): string => flatnessSentence(facts, value, required, verdict);
+  return makeCheck('flatness', 'flatness', verdict, sentence, () => ({
+    actual: actual(),
+    limit: limitFigure(required, 'dB'),
+  }));
+}
+
+function flatnessSentence(facts: ChainFacts, flatness: number, required: number, verdict: Verdict): string {
   const { lowHz, highHz } = facts.input.specification.band;
-  const value = decibelText(flatnessDb.value, [required, required * (1 - facts.policy.toleranceMargin)]);
-  const is = `From ${setFrequency(lowHz)} to ${setFrequency(highHz)} the gain changes by ${value}; the limit is ${decibelText(required)}.`;
-  const cause = verdict === 'clear' ? '' : largestContributionText(flatnessContributions(facts), flatnessDb.value);
-  return makeCheck('flatness', 'flatness', verdict, is + cause, { actual, limit: limitFigure(required, 'dB') });
+  const value = decibelText(flatness, [required, required * (1 - facts.policy.toleranceMargin)]);
+  const band = `From ${setFrequency(lowHz)} to ${setFrequency(highHz)}`;
+  const cause = verdict === 'clear' ? '' : largestContributionText(flatnessContributions(facts), flatness);
+  return `${band} the gain changes by ${value}; the limit is ${decibelText(required)}.${cause}`;
 }
 
 /** The chain's exact upper −3 dB corner. */
@@ -116,13 +128,17 @@ export function upperCornerCheck(facts: ChainFacts): Check | null {
   const required = facts.input.specification.requirements.upperCornerHz;
   if (required === undefined) return null;
   const corner = facts.chain.cornerUpperHz;
-  const actual = chainFigure(facts, 'cornerUpper');
+  const actual = (): Figure => chainFigure(facts, 'cornerUpper');
   if (corner.value === null) return cornerWithoutValue(facts, 'upper-corner', 'upper corner', corner.reason, actual);
-  const target = required * (1 + facts.policy.toleranceMargin);
-  const verdict: Verdict = isBelow(corner.value, required) ? 'over' : isBelow(corner.value, target) ? 'tight' : 'clear';
+  const { value } = corner;
   const beyond = facts.chain.operatingBeyondCorner ? ' The operating frequency is beyond the corner.' : '';
-  const sentence = `The chain is at −3 dB at ${valueText(corner.value, 'Hz', [required])}; required is ${setFrequency(required)}.${beyond}`;
-  return makeCheck('upper-corner', 'upper corner', verdict, sentence, { actual, limit: limitFigure(required, 'Hz') });
+  const sentence = (): string =>
+    `The chain is at −3 dB at ${valueText(value, 'Hz', [required])}; required is ${setFrequency(required)}.${beyond}`;
+  const verdict = verdictAtLeast(value, required, required * (1 + facts.policy.toleranceMargin));
+  return makeCheck('upper-corner', 'upper corner', verdict, sentence, () => ({
+    actual: actual(),
+    limit: limitFigure(required, 'Hz'),
+  }));
 }
 
 /** The chain's lower −3 dB corner. */
@@ -130,16 +146,18 @@ export function chainLowerCornerCheck(facts: ChainFacts): Check | null {
   const required = facts.input.specification.requirements.lowerCornerHz;
   if (required === undefined) return null;
   const corner = facts.chain.cornerLowerHz;
-  const actual = chainFigure(facts, 'cornerLower');
-  if (corner.value === null)
+  const actual = (): Figure => chainFigure(facts, 'cornerLower');
+  if (corner.value === null) {
     return cornerWithoutValue(facts, 'chain-lower-corner', 'lower corner', corner.reason, actual);
-  const verdict = verdictAtMost(corner.value, required, required * (1 - facts.policy.toleranceMargin));
-  const ratio = verdict === 'over' ? '' : ` (${targetText(Number((required / corner.value).toPrecision(3)))} below it)`;
-  const sentence = `The chain's lower −3 dB corner is ${valueText(corner.value, 'Hz', [required])}; required is ${setFrequency(required)}${ratio}.`;
-  return makeCheck('chain-lower-corner', 'lower corner', verdict, sentence, {
-    actual,
+  }
+  const { value } = corner;
+  const sentence = (): string =>
+    `The chain's lower −3 dB corner is ${valueText(value, 'Hz', [required])}; at most ${setFrequency(required)} is required.`;
+  const verdict = verdictAtMost(value, required, required * (1 - facts.policy.toleranceMargin));
+  return makeCheck('chain-lower-corner', 'lower corner', verdict, sentence, () => ({
+    actual: actual(),
     limit: limitFigure(required, 'Hz'),
-  });
+  }));
 }
 
 /** No corner: flat on that side when the gain is known, else unknown. */
@@ -148,13 +166,12 @@ function cornerWithoutValue(
   id: 'upper-corner' | 'chain-lower-corner',
   title: string,
   reason: string,
-  actual: Figure,
+  actual: () => Figure,
 ): Check {
+  const figures = (): CheckFigures => ({ actual: actual() });
+  if (facts.chain.gainOperatingDb.value === null) return unknownRequirement(id, title, reason, actual);
   if (facts.chain.operatingBeyondCorner) {
-    return makeCheck(id, title, 'over', 'The chain never comes to half the power of its ideal gain.', { actual });
+    return makeCheck(id, title, 'over', () => 'The chain never comes to half the power of its ideal gain.', figures);
   }
-  if (facts.chain.gainOperatingDb.value === null) {
-    return unknownCheck(id, title, cannotBeJudged(`the ${title}`, reason), actual);
-  }
-  return makeCheck(id, title, 'clear', `The ${title} is no limit: ${because(reason)}.`, { actual });
+  return makeCheck(id, title, 'clear', () => `The ${title} is no limit: ${because(reason)}.`, figures);
 }

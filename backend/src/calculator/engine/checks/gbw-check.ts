@@ -1,4 +1,4 @@
-import type { Check } from '../report';
+import type { Check, Figure } from '../report';
 import { gbwUsed, worstHeadroom, worstNoiseGain } from '../report/derived';
 import type { ChainFacts, StageFacts } from '../report/facts';
 import { partName } from '../report/facts';
@@ -14,6 +14,7 @@ import {
   valueText,
 } from '../text/phrases';
 import { makeCheck, unknownCheck, verdictAtLeast } from './make-check';
+import type { CheckFigures } from './make-check';
 
 const TITLE = 'GBW limit';
 
@@ -24,14 +25,19 @@ const TITLE = 'GBW limit';
 export function gbwCheck(facts: ChainFacts, stage: StageFacts): Check | null {
   if (stage.stage.kind !== 'voltage-feedback') return null;
   const { headroom, atHz } = worstHeadroom(facts, stage);
-  const actual = stageFigure(facts, stage, 'headroom');
+  const actual = (): Figure => stageFigure(facts, stage, 'headroom');
   if (headroom.value === null) {
-    return unknownCheck('gbw', TITLE, cannotBeJudged('the headroom', headroom.reason), actual);
+    const { reason } = headroom;
+    return unknownCheck('gbw', TITLE, () => cannotBeJudged('the headroom', reason), actual);
   }
   const target = facts.policy.headroomTarget;
   const verdict = verdictAtLeast(headroom.value, 1, target);
-  const limit = limitFigure(verdict === 'over' ? 1 : target, 'ratio');
-  return makeCheck('gbw', TITLE, verdict, gbwSentence(facts, stage, headroom.value, atHz), { actual, limit });
+  const { value } = headroom;
+  const figures = (): CheckFigures => ({
+    actual: actual(),
+    limit: limitFigure(verdict === 'over' ? 1 : target, 'ratio'),
+  });
+  return makeCheck('gbw', TITLE, verdict, () => gbwSentence(facts, stage, value, atHz), figures);
 }
 
 function gbwSentence(facts: ChainFacts, stage: StageFacts, headroom: number, atHz: number): string {

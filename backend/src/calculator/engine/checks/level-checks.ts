@@ -18,10 +18,11 @@ import {
 import { makeCheck, unknownCheck, verdictAtLeast } from './make-check';
 
 /** Level or device value missing: unknown, naming what. */
-function missingInput(id: CheckId, title: string, inputs: readonly Maybe[], actual: Figure): Check | null {
+function missingInput(id: CheckId, title: string, inputs: readonly Maybe[], actual: () => Figure): Check | null {
   const missing = inputs.find((input) => input.value === null);
   if (!missing || missing.value !== null) return null;
-  return unknownCheck(id, title, cannotBeJudged(`the ${title}`, missing.reason), actual);
+  const { reason } = missing;
+  return unknownCheck(id, title, () => cannotBeJudged(`the ${title}`, reason), actual);
 }
 
 /** "MRWG-G072 guarantees 40.0 V/µs (minimum, p. 4)", or that it is not known. */
@@ -32,18 +33,27 @@ function availableText(stage: StageFacts, available: UsedValue | null, unit: Uni
 /** Slew rate that the largest signal needs at the top of the band, with ideal gain, against what the device has. */
 export function slewCheck(facts: ChainFacts, stage: StageFacts): Check | null {
   if (!isFeedbackStage(stage.stage)) return null;
-  const actual = stageFigure(facts, stage, 'slewHeadroom');
+  const actual = (): Figure => stageFigure(facts, stage, 'slewHeadroom');
   const needed = stage.analysis.slewNeededVPerS;
   const missing = missingInput('slew', 'slew rate', [needed, slewAvailable(stage)], actual);
   if (missing) return missing;
   const headroom = slewHeadroom(stage).value;
-  if (headroom === null) return makeCheck('slew', 'slew rate', 'clear', 'No signal: no slew needed.', { actual });
+  if (headroom === null)
+    return makeCheck(
+      'slew',
+      'slew rate',
+      'clear',
+      () => 'No signal: no slew needed.',
+      () => ({ actual: actual() }),
+    );
   const { slewTarget } = facts.policy;
   const verdict = verdictAtLeast(headroom, 1, slewTarget);
   const target = verdict === 'tight' ? `, target ${targetText(slewTarget)}` : '';
-  const sentence = `${slewSentence(facts, stage)}: ${ratioText(headroom, [1, slewTarget])}${target}.`;
-  const limit = limitFigure(verdict === 'over' ? 1 : slewTarget, 'ratio');
-  return makeCheck('slew', 'slew rate', verdict, sentence, { actual, limit });
+  const sentence = (): string => `${slewSentence(facts, stage)}: ${ratioText(headroom, [1, slewTarget])}${target}.`;
+  return makeCheck('slew', 'slew rate', verdict, sentence, () => ({
+    actual: actual(),
+    limit: limitFigure(verdict === 'over' ? 1 : slewTarget, 'ratio'),
+  }));
 }
 
 function slewSentence(facts: ChainFacts, stage: StageFacts): string {
@@ -59,18 +69,29 @@ function slewSentence(facts: ChainFacts, stage: StageFacts): string {
 export function swingCheck(facts: ChainFacts, stage: StageFacts): Check | null {
   if (!isFeedbackStage(stage.stage)) return null;
   const { swingAvailableV, outputPeakV } = stage.analysis;
-  const actual = stageFigure(facts, stage, 'swingHeadroom');
+  const actual = (): Figure => stageFigure(facts, stage, 'swingHeadroom');
   const missing = missingInput('swing', 'output swing', [outputPeakV, swingAvailableV], actual);
   if (missing) return missing;
   const available = swingAvailableV.value ?? 0;
   if (available <= 0) {
-    const sentence = 'Its output sits on a rail: nothing is left to swing.';
-    return makeCheck('swing', 'output swing', 'over', sentence, { actual, limit: limitFigure(1, 'ratio') });
+    const sentence = (): string => 'Its output sits on a rail: nothing is left to swing.';
+    return makeCheck('swing', 'output swing', 'over', sentence, () => ({
+      actual: actual(),
+      limit: limitFigure(1, 'ratio'),
+    }));
   }
   const headroom = swingHeadroom(stage).value;
-  if (headroom === null) return makeCheck('swing', 'output swing', 'clear', 'No signal: nothing to swing.', { actual });
+  if (headroom === null) {
+    return makeCheck(
+      'swing',
+      'output swing',
+      'clear',
+      () => 'No signal: nothing to swing.',
+      () => ({ actual: actual() }),
+    );
+  }
   const peak = outputPeakV.value ?? 0;
-  const sides =
+  const sides = (): string =>
     `Its output has to swing ${valueText(peak, 'V', [available])} peak; ` +
     `${valueText(available, 'V', [peak])} peak is left between the rails`;
   return levelCheck(facts, { id: 'swing', title: 'output swing', headroom, sides, actual });
@@ -79,17 +100,23 @@ export function swingCheck(facts: ChainFacts, stage: StageFacts): Check | null {
 /** Peak output current into load and feedback against what the device gives. */
 export function outputCurrentCheck(facts: ChainFacts, stage: StageFacts): Check | null {
   if (!isFeedbackStage(stage.stage)) return null;
-  const actual = stageFigure(facts, stage, 'outputCurrentHeadroom');
+  const actual = (): Figure => stageFigure(facts, stage, 'outputCurrentHeadroom');
   const needed = stage.analysis.outputCurrentPeakA;
   if (needed.value === 0) {
-    return makeCheck('output-current', 'output current', 'clear', 'No signal: no current.', { actual });
+    return makeCheck(
+      'output-current',
+      'output current',
+      'clear',
+      () => 'No signal: no current.',
+      () => ({ actual: actual() }),
+    );
   }
   const all = outputCurrentHeadroom(stage);
   const missing = missingInput('output-current', 'output current', [needed, all], actual);
   if (missing) return missing;
   const available = stage.analysis.outputCurrentAvailable;
   const need = needed.value ?? 0;
-  const sides =
+  const sides = (): string =>
     `Load and feedback take ${valueText(need, 'A', [available?.value ?? 0])} peak; ` +
     availableText(stage, available, 'A', need);
   return levelCheck(facts, {
@@ -106,8 +133,8 @@ interface LevelJudgement {
   readonly title: string;
   readonly headroom: number;
   /** Need and have, without the full stop. */
-  readonly sides: string;
-  readonly actual: Figure;
+  readonly sides: () => string;
+  readonly actual: () => Figure;
 }
 
 /** A level that must not exceed its limit and is tight within the policy's margin in dB. */
@@ -115,8 +142,11 @@ function levelCheck(facts: ChainFacts, level: LevelJudgement): Check {
   const tightRatio = dbToRatio(facts.policy.levelMarginDb);
   const verdict = verdictAtLeast(level.headroom, 1, tightRatio);
   const close = verdict === 'tight' ? `, within ${facts.policy.levelMarginDb} dB of the limit` : '';
-  const sentence = `${level.sides}: ${ratioText(level.headroom, [1, tightRatio])}${close}.`;
-  return makeCheck(level.id, level.title, verdict, sentence, { actual: level.actual, limit: limitFigure(1, 'ratio') });
+  const sentence = (): string => `${level.sides()}: ${ratioText(level.headroom, [1, tightRatio])}${close}.`;
+  return makeCheck(level.id, level.title, verdict, sentence, () => ({
+    actual: level.actual(),
+    limit: limitFigure(1, 'ratio'),
+  }));
 }
 
 /** Loop gain at the operating frequency (accuracy, distortion): only where the team requires one. */
@@ -124,15 +154,17 @@ export function loopGainCheck(facts: ChainFacts, stage: StageFacts): Check | nul
   const required = facts.input.specification.requirements.loopGainDb;
   if (required === undefined || !isFeedbackStage(stage.stage)) return null;
   const { loopGain } = stage.analysis;
-  const actual = stageFigure(facts, stage, 'loopGain');
+  const actual = (): Figure => stageFigure(facts, stage, 'loopGain');
   if (loopGain.value === null) {
-    return unknownCheck('loop-gain', 'loop gain', cannotBeJudged('the loop gain', loopGain.reason), actual);
+    const { reason } = loopGain;
+    return unknownCheck('loop-gain', 'loop gain', () => cannotBeJudged('the loop gain', reason), actual);
   }
   const decibels = ratioToDb(loopGain.value);
   const at = setFrequency(facts.input.specification.band.operatingHz);
-  const sentence = `Its loop gain at ${at} is ${decibelText(decibels, [required])}; required is ${required} dB.`;
-  return makeCheck('loop-gain', 'loop gain', verdictAtLeast(decibels, required, required), sentence, {
-    actual,
+  const sentence = (): string =>
+    `Its loop gain at ${at} is ${decibelText(decibels, [required])}; required is ${required} dB.`;
+  return makeCheck('loop-gain', 'loop gain', verdictAtLeast(decibels, required, required), sentence, () => ({
+    actual: actual(),
     limit: limitFigure(required, 'dB'),
-  });
+  }));
 }

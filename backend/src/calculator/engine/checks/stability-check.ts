@@ -1,5 +1,5 @@
 import type { StabilityAnalysis, StabilityPoint, UsedValue } from '../analysis';
-import type { Check, Verdict } from '../report';
+import type { Check, Figure, Verdict } from '../report';
 import { partName } from '../report/facts';
 import type { ChainFacts, StageFacts } from '../report/facts';
 import { limitFigure } from '../report/figures';
@@ -7,6 +7,7 @@ import { stageFigure, worsePoint } from '../report/stage-figures';
 import { isBelow } from '../text/deciding-digits';
 import { basisText, noiseGainText, setFrequency, valueText } from '../text/phrases';
 import { makeCheck, unknownCheck } from './make-check';
+import type { CheckFigures } from './make-check';
 import { feedbackResistorShare, LOWEST_FEEDBACK_SHARE } from './current-feedback-check';
 
 const TITLE = 'stability';
@@ -59,13 +60,13 @@ function noiseGainTooLow(each: Case): Check | null {
   const least = minimumStableGain(each);
   const noiseGain = lowestNoiseGain(each);
   if (least === null || noiseGain === null || !isBelow(noiseGain, least)) return null;
-  const sentence =
+  const sentence = (): string =>
     `Its noise gain of ${noiseGainText(noiseGain)} is below ${noiseGainText(least)}, ` +
     `the smallest at which ${partName(each.stage)} is stable.`;
-  return makeCheck('stability', TITLE, 'over', sentence, {
+  return makeCheck('stability', TITLE, 'over', sentence, () => ({
     actual: stageFigure(each.facts, each.stage, 'noiseGain'),
     limit: limitFigure(least, 'ratio'),
-  });
+  }));
 }
 
 function marginTooSmall(each: Case): Check | null {
@@ -76,7 +77,7 @@ function marginTooSmall(each: Case): Check | null {
   if (!isOver && isOutputResistanceMissing(each)) return null;
   const verdict: Verdict = isOver ? 'over' : 'tight';
   const limit = isOver ? phaseMarginOverDeg : phaseMarginTightDeg;
-  return makeCheck('stability', TITLE, verdict, marginSentence(each, margin, limit), figures(each, limit));
+  return makeCheck('stability', TITLE, verdict, () => marginSentence(each, margin, limit), figures(each, limit));
 }
 
 function marginSentence(each: Case, margin: number, limit: number): string {
@@ -89,11 +90,12 @@ function marginSentence(each: Case, margin: number, limit: number): string {
   return `Its phase margin${where} is ${size}, ${whichEnd(each, each.stability.worse)}; the limit is ${limit}°.${oscillates}`;
 }
 
-function figures(
-  each: Case,
-  limit: number,
-): { actual: ReturnType<typeof stageFigure>; limit: ReturnType<typeof limitFigure> } {
-  return { actual: stageFigure(each.facts, each.stage, 'phaseMargin'), limit: limitFigure(limit, 'deg') };
+function figures(each: Case, limit: number): () => CheckFigures {
+  return () => ({ actual: phaseMarginFigure(each)(), limit: limitFigure(limit, 'deg') });
+}
+
+function phaseMarginFigure(each: Case): () => Figure {
+  return () => stageFigure(each.facts, each.stage, 'phaseMargin');
 }
 
 function isOutputResistanceMissing(each: Case): boolean {
@@ -102,10 +104,10 @@ function isOutputResistanceMissing(each: Case): boolean {
 
 function outputResistanceMissing(each: Case): Check | null {
   if (!isOutputResistanceMissing(each)) return null;
-  const sentence =
+  const sentence = (): string =>
     `The load is capacitive and ${partName(each.stage)} has no output resistance entered: ` +
     'stability cannot be told. Enter it on its device page.';
-  return unknownCheck('stability', TITLE, sentence, stageFigure(each.facts, each.stage, 'phaseMargin'));
+  return unknownCheck('stability', TITLE, sentence, phaseMarginFigure(each));
 }
 
 /** No second pole and no phase margin: the one-pole margin is only an upper bound. */
@@ -118,12 +120,12 @@ function silentVoltageFeedback(each: Case): Check {
   const least = minimumStableGain(each);
   const noiseGain = lowestNoiseGain(each);
   if (least === null || noiseGain === null) {
-    const sentence =
+    const sentence = (): string =>
       `${partName(each.stage)} has neither a phase margin, a second pole nor a minimum stable gain entered: ` +
       'stability cannot be told. Enter one on its device page.';
-    return unknownCheck('stability', TITLE, sentence, stageFigure(each.facts, each.stage, 'phaseMargin'));
+    return unknownCheck('stability', TITLE, sentence, phaseMarginFigure(each));
   }
-  const sentence =
+  const sentence = (): string =>
     `Judged by the minimum stable gain only: its noise gain of ${noiseGainText(noiseGain)} where the loop gain crosses 1 ` +
     `reaches ${noiseGainText(least)}. ${partName(each.stage)} has no phase margin entered.`;
   return makeCheck('stability', TITLE, 'clear', sentence, figures(each, each.facts.policy.phaseMarginTightDeg));
@@ -136,10 +138,11 @@ function silentCurrentFeedback(each: Case): Check {
   const hasCapacitor = stage.kind === 'current-feedback' && (stage.feedbackF ?? 0) > 0;
   if (share === null || share < LOWEST_FEEDBACK_SHARE || hasCapacitor) {
     const why = hasCapacitor ? 'and there is a capacitor across Rf' : 'and Rf is smaller than in the reference circuit';
-    const sentence = `${partName(each.stage)} has no second pole entered ${why}: stability cannot be told. Enter it on its device page.`;
-    return unknownCheck('stability', TITLE, sentence, stageFigure(each.facts, each.stage, 'phaseMargin'));
+    const sentence = (): string =>
+      `${partName(each.stage)} has no second pole entered ${why}: stability cannot be told. Enter it on its device page.`;
+    return unknownCheck('stability', TITLE, sentence, phaseMarginFigure(each));
   }
-  const sentence =
+  const sentence = (): string =>
     "Judged by the datasheet's reference circuit only: the loop here is no faster. " +
     `${partName(each.stage)} has no second pole entered.`;
   return makeCheck('stability', TITLE, 'clear', sentence, figures(each, each.facts.policy.phaseMarginTightDeg));
@@ -149,13 +152,14 @@ function judged(each: Case): Check {
   const limit = each.facts.policy.phaseMarginTightDeg;
   const margin = each.point.phaseMarginDeg;
   if (each.point.noCrossing) {
-    return makeCheck('stability', TITLE, 'clear', 'Its loop gain never crosses 1.', figures(each, limit));
+    return makeCheck('stability', TITLE, 'clear', () => 'Its loop gain never crosses 1.', figures(each, limit));
   }
   if (margin === null) {
-    return unknownCheck('stability', TITLE, 'The phase margin cannot be told.', figures(each, limit).actual);
+    return unknownCheck('stability', TITLE, () => 'The phase margin cannot be told.', phaseMarginFigure(each));
   }
   const where =
     each.point.crossingHz === null ? '' : ` at ${setFrequency(Number(each.point.crossingHz.toPrecision(3)))}`;
-  const sentence = `Its phase margin${where} is ${valueText(margin, 'deg', [limit])}, ${whichEnd(each, each.stability.worse)}.`;
+  const sentence = (): string =>
+    `Its phase margin${where} is ${valueText(margin, 'deg', [limit])}, ${whichEnd(each, each.stability.worse)}.`;
   return makeCheck('stability', TITLE, 'clear', sentence, figures(each, limit));
 }

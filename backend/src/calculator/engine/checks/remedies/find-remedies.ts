@@ -2,6 +2,7 @@ import type { Check, CheckId } from '../../report';
 import type { StageFacts } from '../../report/facts';
 import { flatnessContributions, gainContributions } from '../contributions';
 import type { Judgement } from '../judge';
+import { plainCheck } from '../make-check';
 import { badness, worstCheck } from '../verdict-order';
 import { chainDeviceRemedy } from './chain-remedy';
 import { deviceRemedy } from './device-remedy';
@@ -69,7 +70,10 @@ export function findRemedies(judgement: Judgement): ChecksWithRemedies {
   const briefs = new Map<Check, readonly string[]>();
   const withRemedies = (check: Check): Check => {
     const own = found.get(check) ?? [];
-    const complete = { ...check, remedies: own.map(({ remedy }) => remedy) };
+    const complete = plainCheck(
+      check,
+      own.map(({ remedy }) => remedy),
+    );
     briefs.set(
       complete,
       own.map(({ brief }) => brief),
