@@ -20,8 +20,10 @@ function hertz(value: number): string {
   return `${number(value / scale)} ${prefix}Hz`;
 }
 
+/** One unit for both edges where that reads well. */
 function range(low: number, high: number): string {
   const { scale, prefix } = scaled(high);
+  if (prefix !== scaled(low).prefix) return `${hertz(low)}–${hertz(high)}`;
   return `${number(low / scale)}–${number(high / scale)} ${prefix}Hz`;
 }
 
