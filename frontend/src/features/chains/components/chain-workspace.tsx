@@ -79,7 +79,7 @@ export function ChainWorkspace({ chain, option }: ChainWorkspaceProps) {
         <KeptNotice />
         <ErrorNotice error={save.error} title="The changes could not be saved." onRetry={() => void save.save()} />
         <WorkspaceBody />
-        <SetUpPanel />
+        {address.section === 'ledger' && <SetUpPanel />}
       </div>
       <ChainWorking open={working} onClose={() => setWorking(null)} />
       <SpecificationDrawer open={specifying} onClose={() => setSpecifying(false)} />

@@ -5,7 +5,10 @@ import { isSection, readAddress, writeAddress, type Section, type WorkspaceAddre
 
 export interface WorkspaceAddressControl extends WorkspaceAddress {
   readonly section: Section;
-  /** Replaces the history entry: walking through rows is no journey that Back should retrace. */
+  /**
+   * Replaces the history entry: walking through rows is no journey that Back should retrace. Takes effect at once, so
+   * that what is typed next goes to the stage that was chosen.
+   */
   readonly change: (change: Partial<WorkspaceAddress>) => void;
   /** The same option, case and stage in another section. */
   readonly linkTo: (section: Section) => string;
@@ -17,7 +20,8 @@ export function useWorkspaceAddress(): WorkspaceAddressControl {
   const [search, setSearch] = useSearchParams();
   const address = useMemo(() => readAddress(search), [search]);
   const change = useCallback(
-    (next: Partial<WorkspaceAddress>) => setSearch((present) => writeAddress(present, next), { replace: true }),
+    (next: Partial<WorkspaceAddress>) =>
+      setSearch((present) => writeAddress(present, next), { replace: true, flushSync: true }),
     [setSearch],
   );
   const text = search.toString();

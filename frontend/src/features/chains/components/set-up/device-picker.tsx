@@ -1,8 +1,10 @@
 import { useQuery } from '@tanstack/react-query';
 import Skeleton from 'antd/es/skeleton';
+import { useState } from 'react';
 import { Link } from 'react-router-dom';
 
-import type { Stage } from '../../../../api/types';
+import { isApiError } from '../../../../api/api-error';
+import type { CandidatesReport, Stage } from '../../../../api/types';
 import { ErrorNotice } from '../../../../components/error-notice';
 import { candidatesQuery } from '../../queries';
 import { useWorkspace } from '../workspace-context';
@@ -17,14 +19,16 @@ type DeviceStage = Exclude<Stage, { kind: 'rc-section' }>;
 export function DevicePicker({ stage }: { stage: DeviceStage }) {
   const { preview, edits, chain } = useWorkspace();
   const { specification, policy, stages, currency, buildQuantity } = preview.request;
-  // A stage that was added a moment ago is not in the question yet.
-  const known = stages.some((each) => each.id === stage.id);
+  // A stage that was added a moment ago is not in the question yet; refused input would be refused here as well.
+  const askable = stages.some((each) => each.id === stage.id) && !isApiError(preview.error, 422);
   const query = useQuery({
     ...candidatesQuery({ specification, policy, stages, currency, buildQuantity, stageId: stage.id }),
-    enabled: known,
+    enabled: askable,
   });
+  const [lastGood, setLastGood] = useState<CandidatesReport | null>(null);
+  if (query.data && query.data !== lastGood) setLastGood(query.data);
+  const data = query.data ?? lastGood;
   const report = preview.report?.stages.find((each) => each.stageId === stage.id) ?? null;
-  const { data } = query;
   return (
     <>
       <section className={styles.column} aria-label="What passes here">
@@ -34,7 +38,11 @@ export function DevicePicker({ stage }: { stage: DeviceStage }) {
         {report && <StageFindings report={report} />}
       </section>
       <section className={`${styles.column} ${styles.deviceColumn}`} aria-label={`Devices in ${chain.name}`}>
-        <ErrorNotice error={query.error} title="The devices could not be tried." onRetry={() => void query.refetch()} />
+        <ErrorNotice
+          error={askable ? query.error : null}
+          title="The devices could not be tried."
+          onRetry={() => void query.refetch()}
+        />
         {data ? (
           <DeviceTable
             candidates={data.candidates}

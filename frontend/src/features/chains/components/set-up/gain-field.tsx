@@ -18,6 +18,10 @@ function decibelText(gain: number | null): string {
   return gain === null || gain === 0 ? '' : formatValue(20 * Math.log10(Math.abs(gain)), 'dB', 3);
 }
 
+function rounded(gain: number | null): number | null {
+  return gain === null ? null : Number(gain.toPrecision(6));
+}
+
 /**
  * The wanted gain; the resistors follow it. The sign belongs to the topology, so a typed 10 or 20 dB of an inverting
  * stage means −10; the text is left as it was typed.
@@ -26,7 +30,8 @@ export function GainField({ stage, series }: { stage: FeedbackStage; series: Res
   const { replace, error, disabled } = useStageForm(stage);
   const [entry, setEntry] = useState<Entry | null>(null);
   const wanted = stage.wantedGain ?? null;
-  const shown = entry && Object.is(entry.wanted, wanted) ? entry.typed : wanted;
+  // What was typed stays as it was; a gain from elsewhere (20 dB stored as a ratio) is shown without its rounding noise.
+  const shown = entry && Object.is(entry.wanted, wanted) ? entry.typed : rounded(wanted);
   const problem = shown === null ? null : gainProblem(stage.topology, shown);
   const transimpedance = stage.topology === 'transimpedance';
   const actual = gainOfResistors(stage.topology, stage.feedbackOhm, stage.gainOhm);
