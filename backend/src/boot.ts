@@ -9,10 +9,10 @@ import { Runtime } from './config/runtime';
 import { configureApp } from './configure-app';
 import { databaseFile, prepareDataFolder, sessionSecretOf } from './database/data-folder';
 import { seedDemo } from './database/demo/seed-demo';
-import { DEMO_SEEDED_KEY, settleDataKind } from './database/data-kind';
+import { settleDataKind } from './database/data-kind';
 import { migrateDatabase } from './database/migrator';
 import { acquireServerLock, type ServerLock } from './database/server-lock';
-import { SettingsService } from './settings/settings.service';
+import { AccountsService } from './users/accounts.service';
 
 /** After this long a stop no longer waits for requests. */
 const REQUESTS_MAY_TAKE_MS = 1000;
@@ -61,8 +61,7 @@ export async function bootApp(config: AppConfig): Promise<BootedApp> {
     });
     configureApp(app);
     await app.init();
-    if (runtime.demo && (await app.get(SettingsService, { strict: false }).find(DEMO_SEEDED_KEY)) === null)
-      await seedDemo(app);
+    if (runtime.demo && !(await app.get(AccountsService, { strict: false }).exist())) await seedDemo(app);
     return { app, runtime, close: () => closeApp(app, lock) };
   } catch (error) {
     await lock.release();

@@ -66,6 +66,14 @@ describe('a data folder', () => {
       await expect(boot({ DEMO: 'on' })).rejects.toThrow('belongs to a real team');
     });
 
+    it('and a demo is filled once, not at every start', async () => {
+      const rows = (testApp: TestApp) =>
+        testApp.rows('SELECT id FROM devices UNION ALL SELECT id FROM users ORDER BY id');
+      const first = await startOn({ DEMO: 'auto' }, rows);
+      expect(first.length).toBeGreaterThan(10);
+      expect(await startOn({ DEMO: 'auto' }, rows)).toEqual(first);
+    });
+
     it('and a demo is not opened as a team’s, nor to the outside, saying why', async () => {
       await startOn({ DEMO: 'auto' }, () => undefined);
       await expect(boot({ DEMO: 'off' })).rejects.toThrow('holds the demo');

@@ -1,5 +1,5 @@
 import { randomBytes } from 'node:crypto';
-import { accessSync, chmodSync, constants, existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { accessSync, chmodSync, constants, existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { StartError } from './start-error';
 
@@ -29,11 +29,6 @@ export function prepareDataFolder(dataDir: string): void {
     const file = path.join(dataDir, name);
     if (existsSync(file)) assertWritable(file);
   }
-}
-
-/** Removes a database with everything that SQLite keeps beside it. */
-export function removeDatabase(file: string): void {
-  for (const suffix of ['', '-wal', '-shm', '-journal']) rmSync(`${file}${suffix}`, { force: true });
 }
 
 /** The given secret, else the data folder's own: random, made once, readable by its owner only. */

@@ -8,9 +8,6 @@ export type DataKind = 'demo' | 'team';
 
 const KEY = 'data_kind';
 
-/** Set in the same transaction as the demo's scenarios. */
-export const DEMO_SEEDED_KEY = 'demo_seeded';
-
 async function storedKind(sequelize: Sequelize): Promise<DataKind | null> {
   const [row] = await sequelize.query<{ demo: number }>(
     `SELECT value = json_quote('demo') AS demo FROM settings WHERE key = $key`,
