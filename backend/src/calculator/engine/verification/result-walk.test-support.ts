@@ -14,10 +14,7 @@ function walk(value: unknown, path: string, faults: string[]): void {
     if (/\b(NaN|Infinity|undefined|null)\b|\[object/.test(value)) faults.push(`${path} says "${value}"`);
     return;
   }
-  if (value === undefined) {
-    // Absent is fine for what may be absent; JSON drops it.
-    return;
-  }
+  // Absent is fine for what may be absent: JSON drops it.
   if (typeof value !== 'object' || value === null) return;
   if (value instanceof Map) {
     for (const [key, entry] of value) walk(entry, `${path}.${String(key)}`, faults);
