@@ -5,6 +5,7 @@ import { decidingDigits, digitsForDecimals, digitsWithoutTrailingZeros } from '.
 
 const MOST_DIGITS_OF_A_GAIN = 4;
 const USUAL_DIGITS = 3;
+const ROUNDING_NOISE = 1e-9;
 
 /** How a figure is to be printed. */
 export interface FigureOptions {
@@ -26,10 +27,16 @@ export function figureOf(maybe: Maybe, unit: Unit, options: FigureOptions = {}):
   if (!Number.isFinite(maybe.value)) {
     return { value: null, unit, digits: USUAL_DIGITS, reason: 'The result is not a finite number.' };
   }
-  const value = Object.is(maybe.value, -0) ? 0 : maybe.value;
+  const value = withoutNoise(maybe.value, unit);
   const limits = (options.limits ?? []).filter((limit): limit is number => limit !== undefined);
   const digits = decidingDigits(value, usualDigits(value, unit, options.plainGain === true), limits);
   return maybe.assumed === true ? { value, unit, digits, assumed: true } : { value, unit, digits };
+}
+
+/** Decibels and angles that are only rounding noise are 0; no figure is −0. */
+function withoutNoise(value: number, unit: Unit): number {
+  const isLevel = unit === 'dB' || unit === 'dBΩ' || unit === 'deg';
+  return (isLevel && Math.abs(value) < ROUNDING_NOISE) || value === 0 ? 0 : value;
 }
 
 function usualDigits(value: number, unit: Unit, plainGain: boolean): number {

@@ -7,6 +7,7 @@ import { bandData, derivedDatum, loopData, networkData, terminalData } from './d
 import { complexText, lastStep, magnitude, num, probeAt, step } from './scope';
 import type { Draft, StageScope } from './scope';
 import { CLOSED_LOOP_SOURCE, LINEAR_NETWORK, NETWORK_SOURCE, SMALL_SIGNAL } from './sources';
+import type { ChainProbe } from '../chain/probe';
 import type { Complex } from '../complex';
 
 /** Gain of the resistors around the amplifier, or of a block or section. */
@@ -78,6 +79,20 @@ function reference(scope: StageScope): string {
     : "From the source's EMF to the node behind the stage.";
 }
 
+/** True when the stage feeds a virtual ground: a transimpedance stage or an inverting one without Rg. */
+function feedsVirtualGround(scope: StageScope, index: number): boolean {
+  const next = scope.facts.input.stages[index + 1];
+  if (!next || !isFeedbackStage(next)) return false;
+  const isInverting = next.topology === 'inverting' || next.topology === 'transimpedance';
+  return isInverting && (next.topology === 'transimpedance' || !next.gainOhm);
+}
+
+/** Voltage that stands for the node behind a stage: in front of a virtual ground the open-circuit voltage. */
+function nodeBehind(scope: StageScope, probe: ChainProbe, index: number): Complex {
+  const { node, openCircuit } = probe.stages[index];
+  return feedsVirtualGround(scope, index) ? openCircuit : node;
+}
+
 /** Node behind and node in front of the stage at one frequency, per unit EMF (a current source: its current). */
 export function stageNodes(
   scope: StageScope,
@@ -85,9 +100,9 @@ export function stageNodes(
 ): { behind: Complex; front: number; frontPhase: number } {
   const probe = probeAt(scope, frequencyHz);
   const { index } = scope.stage;
-  const behind = probe.stages[index].node;
+  const behind = nodeBehind(scope, probe, index);
   if (index > 0) {
-    const front = probe.stages[index - 1].node;
+    const front = nodeBehind(scope, probe, index - 1);
     return { behind, front: magnitude(front), frontPhase: Math.atan2(front.im, front.re) };
   }
   const isCurrent = scope.facts.input.specification.source.kind === 'current';
@@ -157,7 +172,7 @@ export function runningGainWorking(scope: StageScope): Draft {
   const { operatingHz } = scope.facts.input.specification.band;
   const probe = probeAt(scope, operatingHz);
   const isCurrent = scope.facts.input.specification.source.kind === 'current';
-  const size = magnitude(probe.stages[scope.stage.index].node);
+  const size = magnitude(nodeBehind(scope, probe, scope.stage.index));
   const sourceOhm = magnitude(probe.sourceImpedance);
   const formula = isCurrent ? '20·lg(|V behind / E| · |Z source|)' : '20·lg|V behind / E|';
   const substituted = isCurrent ? `20·lg(${num(size)} · ${num(sourceOhm, 'Ω')})` : `20·lg ${num(size)}`;

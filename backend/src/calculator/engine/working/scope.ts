@@ -3,8 +3,10 @@ import type { ChainProbe } from '../chain/probe';
 import type { Complex } from '../complex';
 import type { ChainFacts, StageFacts } from '../report/facts';
 import type { Figure, Unit, Working, WorkingDatum, WorkingStep } from '../report';
-import { formatFigure, quantity, significant } from '../text/si-format';
-import { digitsWithoutTrailingZeros } from '../text/deciding-digits';
+import { formatFigure, quantity, trimmed } from '../text/si-format';
+
+const SUBSTITUTION_DIGITS = 5;
+const ROUNDING_NOISE = 1e-9;
 
 /** What a working is written from. */
 export interface ChainScope {
@@ -34,8 +36,7 @@ export function probeAt(scope: ChainScope, frequencyHz: number): ChainProbe {
 
 /** A number inside a substitution: five digits, no trailing zeros. */
 export function num(value: number, unit: Unit | null = null): string {
-  const digits = digitsWithoutTrailingZeros(value, 5);
-  return unit === null ? significant(value, digits) : quantity(value, unit, digits);
+  return unit === null ? trimmed(value, SUBSTITUTION_DIGITS) : quantity(value, unit, SUBSTITUTION_DIGITS, 'trimmed');
 }
 
 /** A complex number inside a substitution: "3.2 − j 0.41". */
@@ -63,7 +64,9 @@ export function lastStep(
 ): WorkingStep {
   const { figure } = scope;
   const result =
-    figure.value === null || computed === null ? formatFigure(figure) : formatFigure({ ...figure, value: computed });
+    figure.value === null || computed === null
+      ? formatFigure(figure)
+      : formatFigure({ ...figure, value: figure.value === 0 && Math.abs(computed) < ROUNDING_NOISE ? 0 : computed });
   return { formula, substituted, result };
 }
 
