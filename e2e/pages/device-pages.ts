@@ -31,8 +31,8 @@ export class DeviceFormPage {
     this.heading = page.getByRole('heading', { name: 'Enter a device' });
   }
 
-  field(label: string): Locator {
-    return this.page.getByLabel(label, { exact: true });
+  field(name: string): Locator {
+    return this.page.getByRole('textbox', { name, exact: true });
   }
 
   row(label: string | RegExp): Locator {
@@ -66,9 +66,22 @@ export class DevicePage {
     await this.quote.getByRole('button', { name: /^(Enter a|Edit the) quote$/ }).click();
   }
 
+  price(line: number): Locator {
+    return this.page.getByLabel(`Line ${line}, price of one`);
+  }
+
   async fillBreak(line: number, pieces: string, price: string): Promise<void> {
     await this.page.getByLabel(`Line ${line}, from pieces`).fill(pieces);
-    await this.page.getByLabel(`Line ${line}, price of one`).fill(price);
+    await this.price(line).fill(price);
+  }
+
+  /** Which line of the quote's form stands for this quantity. */
+  async lineOf(pieces: string): Promise<number> {
+    const fields = this.page.getByLabel(/^Line \d+, from pieces$/);
+    for (let line = 1; line <= (await fields.count()); line += 1) {
+      if ((await fields.nth(line - 1).inputValue()) === pieces) return line;
+    }
+    throw new Error(`no line for ${pieces} pieces`);
   }
 
   async saveQuote(): Promise<void> {

@@ -1,18 +1,17 @@
 import type { Locator, Page } from '@playwright/test';
-import { SelectBox } from '../components/select-box';
 
 /** The set-up of the selected stage, with the devices tried in its place. */
 export class SetUpPanel {
   readonly panel: Locator;
-  readonly topology: SelectBox;
+  readonly topology: Locator;
   readonly wantedGain: Locator;
   readonly feedbackResistor: Locator;
   readonly needs: Locator;
   readonly devices: Locator;
 
-  constructor(page: Page) {
+  constructor(private readonly page: Page) {
     this.panel = page.getByRole('region', { name: /^Set-up of / });
-    this.topology = new SelectBox(page, this.panel, 'Topology');
+    this.topology = this.panel.getByLabel('Topology');
     this.wantedGain = this.panel.getByLabel('Wanted gain');
     this.feedbackResistor = this.panel.getByLabel('Feedback resistor Rf');
     this.needs = this.panel.getByRole('region', { name: 'What passes here' });
@@ -33,7 +32,9 @@ export class SetUpPanel {
   }
 
   device(partNumber: string): Locator {
-    return this.devices.getByRole('row').filter({ has: this.deviceName(partNumber) });
+    return this.devices
+      .getByRole('row')
+      .filter({ has: this.page.getByRole('button', { name: partNumber, exact: true }) });
   }
 
   deviceName(partNumber: string): Locator {

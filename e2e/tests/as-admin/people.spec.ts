@@ -1,3 +1,4 @@
+import { newBrowserContext } from '../../fixtures/api';
 import { randomUUID } from 'node:crypto';
 import { expect, test } from '../../fixtures/test';
 import { PeoplePage } from '../../pages/people-page';
@@ -20,13 +21,13 @@ test.describe('people', () => {
     const link = await people.invite('Nela Fenn', email, ['designer', 'buyer']);
     await expect(people.person('Nela Fenn')).toContainText('invited');
 
-    const theirs = await browser.newContext({ baseURL });
+    const theirs = await newBrowserContext(browser, baseURL ?? '');
     const screen = await theirs.newPage();
     const desk = await (await new WelcomePage(screen).open(link)).choose(PASSWORD);
     await expect(desk.heading).toBeVisible();
     await expect(new TopBar(screen).destination('Administration')).toHaveCount(0);
 
-    const late = await browser.newContext({ baseURL });
+    const late = await newBrowserContext(browser, baseURL ?? '');
     const again = await new WelcomePage(await late.newPage()).open(link);
     await expect(again.alert).toContainText('used already or has expired');
     await late.close();

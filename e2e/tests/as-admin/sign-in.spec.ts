@@ -1,3 +1,4 @@
+import { newBrowserContext } from '../../fixtures/api';
 import { expect, test } from '../../fixtures/test';
 import { SignInPage } from '../../pages/sign-in-page';
 import { SetUpPage } from '../../pages/password-pages';
@@ -8,7 +9,7 @@ test.describe('on a first start without demo', () => {
   test.use({ role: null, expectedStatuses: [401, 404, 422] });
 
   test('the token makes one administrator, who then signs in by password', async ({ emptyServer, browser }) => {
-    const context = await browser.newContext({ baseURL: emptyServer.url });
+    const context = await newBrowserContext(browser, emptyServer.url);
     const page = await context.newPage();
     const setUp = await new SetUpPage(page).open();
     await setUp.create({ ...ADMINISTRATOR, token: 'this-is-not-the-token' });

@@ -1,15 +1,15 @@
 import { expect, test } from '../../fixtures/test';
-import { Api } from '../../fixtures/api';
+import { Api, newBrowserContext, newRequest } from '../../fixtures/api';
 import { DevicesPage } from '../../pages/device-pages';
 import { LedgerPage } from '../../pages/ledger-page';
 import { demoChain } from '../../testdata/receiver';
 
-test('a quote that the buyer enters is what the ledger counts', async ({ browser, ownDemo, playwright }) => {
-  const request = await playwright.request.newContext({ baseURL: ownDemo.url });
+test('a quote that the buyer enters is what the ledger counts', async ({ browser, ownDemo }) => {
+  const request = await newRequest(ownDemo.url);
   const api = new Api(request);
   await api.signInToDemo('buyer');
   const chain = await demoChain(api);
-  const context = await browser.newContext({ baseURL: ownDemo.url, storageState: await request.storageState() });
+  const context = await newBrowserContext(browser, ownDemo.url, await request.storageState());
   const page = await context.newPage();
 
   const ledger = await new LedgerPage(page).open(chain);
@@ -19,10 +19,11 @@ test('a quote that the buyer enters is what the ledger counts', async ({ browser
   const device = await (await new DevicesPage(page).open()).openDevice('MRWG-V300');
   await expect(device.edit, 'a buyer does not edit electrical values').toHaveCount(0);
   await device.openQuote();
-  await device.fillBreak(1, '1', '1.8O');
+  const line = await device.lineOf('250');
+  await device.price(line).fill('1.8O');
   await device.saveQuote();
   await expect(page.getByRole('alert').first()).toBeVisible();
-  await device.fillBreak(1, '1', '1.8025');
+  await device.price(line).fill('1.8025');
   await device.saveQuote();
   await expect(device.quote).toContainText('1.8025');
 

@@ -9,7 +9,7 @@ const PAGES = [
   { name: 'projects', path: '/projects', heading: 'Projects' },
   { name: 'new project', path: '/projects/new', heading: 'New project' },
   { name: 'devices', path: '/devices', heading: 'Devices' },
-  { name: 'new device', path: '/devices/new', heading: 'New device' },
+  { name: 'new device', path: '/devices/new', heading: 'Enter a device' },
   { name: 'about', path: '/about', heading: 'About Bandledger' },
 ];
 

@@ -2,7 +2,7 @@ import { chmodSync, copyFileSync, mkdirSync } from 'node:fs';
 import { delimiter, join, resolve } from 'node:path';
 import { commandIn, runCommand } from '../../fixtures/document-commands';
 import { expect, test } from '../../fixtures/test';
-import { Api } from '../../fixtures/api';
+import { Api, newRequest } from '../../fixtures/api';
 import { ADMINISTRATOR } from '../../testdata/people';
 
 test.use({ role: null });
@@ -16,8 +16,8 @@ function pathWithCurl(folder: string): string {
   return `${process.env.PATH}${delimiter}${tools}`;
 }
 
-test('the commands of docs/calculator.md run as they are printed', async ({ emptyServer, playwright }, testInfo) => {
-  const request = await playwright.request.newContext({ baseURL: emptyServer.url });
+test('the commands of docs/calculator.md run as they are printed', async ({ emptyServer }, testInfo) => {
+  const request = await newRequest(emptyServer.url);
   const { token, name, email, password } = ADMINISTRATOR;
   await new Api(request).send('POST', '/setup', { token, name, email, password });
   await request.dispose();

@@ -28,7 +28,7 @@ test('every device is tried in this place, the cheapest that pass first', async 
 test('figures follow what is typed, in engineering notation', async ({ page, api }) => {
   const ledger = await new LedgerPage(page).open(await seedReceiver(api));
   const panel = await ledger.select('S2');
-  await panel.topology.choose('non-inverting');
+  await panel.topology.selectOption('non-inverting');
   await panel.wantedGain.fill('20 dB');
   // Non-inverting ×10: noise gain 10, 75 MHz / (10 · 7 MHz) = 1.07.
   await expect(ledger.figure('S2', 'headroom')).toHaveText(/^×1\.07/);

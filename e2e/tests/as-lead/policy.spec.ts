@@ -1,4 +1,4 @@
-import { Api } from '../../fixtures/api';
+import { Api, newBrowserContext, newRequest } from '../../fixtures/api';
 import { expect, test } from '../../fixtures/test';
 import { LedgerPage } from '../../pages/ledger-page';
 import { ProjectPage, ProjectsPage } from '../../pages/project-pages';
@@ -10,7 +10,7 @@ test('the lead sees the weakest option first and sets the margins that verdicts 
   await expect(project.option('Baseline')).toContainText('over');
   await expect(project.option('Baseline')).toContainText('0.974');
 
-  await page.getByRole('link', { name: /settings/i }).click();
+  await page.getByRole('link', { name: 'Edit project' }).click();
   await page
     .getByLabel(/^Headroom/)
     .first()
@@ -23,8 +23,8 @@ test('the lead sees the weakest option first and sets the margins that verdicts 
   await expect(ledger.row('S3')).toHaveAccessibleName(/tight$/);
 });
 
-test('a closed project does not exist for others', async ({ page, api, browser, server, playwright }) => {
-  const request = await playwright.request.newContext({ baseURL: server.url });
+test('a closed project does not exist for others', async ({ page, api, browser, server }) => {
+  const request = await newRequest(server.url);
   const designer = new Api(request);
   await designer.signInToDemo('designer');
   const { id } = await designer.send<{ id: string }>('POST', '/projects', {
@@ -39,7 +39,7 @@ test('a closed project does not exist for others', async ({ page, api, browser, 
   await expect(projects.table).not.toContainText('HIDDEN');
   expect((await api.get<{ id: string }[]>('/projects')).map((project) => project.id)).not.toContain(id);
 
-  const context = await browser.newContext({ baseURL: server.url, storageState: await request.storageState() });
+  const context = await newBrowserContext(browser, server.url, await request.storageState());
   const own = await new ProjectsPage(await context.newPage()).open();
   await expect(own.table).toContainText('HIDDEN');
   await context.close();
