@@ -1,6 +1,6 @@
-import { Injectable } from '@nestjs/common';
+import { Injectable, Logger } from '@nestjs/common';
 import { InjectModel } from '@nestjs/sequelize';
-import type { Stage } from '../calculator/engine';
+import type { Device, Stage } from '../calculator/engine';
 import { DeviceLibraryService } from '../devices/device-library.service';
 import type { ProjectFacts } from '../projects/project.presenter';
 import type { SummarizedOption } from './chain.presenter';
@@ -8,7 +8,7 @@ import type { OptionSummaryDto } from './dto/summary.dto';
 import type { Chain } from './models/chain.model';
 import type { Option } from './models/option.model';
 import { StageRow } from './models/stage.model';
-import { optionSummary } from './option-summary';
+import { notCalculated, optionSummary } from './option-summary';
 import { deviceIdsOf, stageOf } from './stage-rows';
 
 /** An option with all that its figures depend on. */
@@ -28,6 +28,7 @@ const CACHE_SIZE = 5000;
 /** Figures of stored options, kept for as long as nothing that they depend on has changed. */
 @Injectable()
 export class OptionSummariesService {
+  private readonly logger = new Logger('OptionSummaries');
   private readonly cache = new Map<string, CacheEntry>();
 
   constructor(
@@ -44,13 +45,21 @@ export class OptionSummariesService {
     const devices = await this.library.findForCalculation(stale.flatMap((context) => deviceIdsOf(stagesOf(context))));
     return contexts.map((context, index) => ({
       option: context.option,
-      summary: this.fromCache(context.option.id, keys[index]!, () => {
-        const { policy, currency, buildQuantity } = context.project;
-        const { specification } = context.chain;
-        const chainStages = stagesOf(context);
-        return optionSummary({ specification, policy, stages: chainStages, devices, currency, buildQuantity });
-      }),
+      summary: this.fromCache(context.option.id, keys[index]!, () =>
+        this.summarize(context, stagesOf(context), devices),
+      ),
     }));
+  }
+
+  /** A fault of the calculator on one option must not take the lists with all the others away. */
+  private summarize({ project, chain, option }: OptionContext, stages: Stage[], devices: Device[]): OptionSummaryDto {
+    const { policy, currency, buildQuantity } = project;
+    try {
+      return optionSummary({ specification: chain.specification, policy, stages, devices, currency, buildQuantity });
+    } catch (error) {
+      this.logger.error(`option ${option.id}: ${error instanceof Error ? error.stack : String(error)}`);
+      return notCalculated('The calculator failed on this option. The error has been logged.', currency);
+    }
   }
 
   private fromCache(optionId: string, key: string, compute: () => OptionSummaryDto): OptionSummaryDto {

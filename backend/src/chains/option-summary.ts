@@ -15,7 +15,8 @@ export function optionSummary(input: ChainInput): OptionSummaryDto {
   }
 }
 
-function notCalculated(reason: string, currency: string): Omit<OptionSummaryDto, 'costLimit'> {
+/** The figures of an option that has none, with the reason. */
+export function notCalculated(reason: string, currency: string): OptionSummaryDto {
   return {
     verdict: 'unknown',
     lead: 'Cannot be calculated.',
@@ -24,6 +25,7 @@ function notCalculated(reason: string, currency: string): Omit<OptionSummaryDto,
     worstHeadroomStage: null,
     gain: { value: null, unit: 'dB', digits: 3, reason },
     cost: { amountMicros: null, currency, reason },
+    costLimit: null,
     reason,
   };
 }
