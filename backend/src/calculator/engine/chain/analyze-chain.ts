@@ -1,5 +1,6 @@
 import type { ChainAnalysis, ChainCaseAnalysis } from '../analysis';
 import { EngineInputError } from '../errors';
+import { hotIsMinimum } from '../devices/used-values';
 import { ChainInput, GBW_CASES, GbwCase } from '../types';
 import { analyzeCase } from './chain-case';
 import { ChainNetwork } from './chain-network';
@@ -26,6 +27,10 @@ export function analyzeChain(input: ChainInput, options: AnalyzeOptions = {}): C
   const cases: Partial<Record<GbwCase, ChainCaseAnalysis>> = {};
   let minimum: ChainResponse | undefined;
   for (const gbwCase of options.cases ?? GBW_CASES) {
+    if (gbwCase === 'minimumHot' && cases.minimum && hotIsMinimum(input.policy)) {
+      cases.minimumHot = { ...cases.minimum, gbwCase };
+      continue;
+    }
     const response = new ChainResponse(input, new ChainNetwork(input, gbwCase));
     if (gbwCase === 'minimum') minimum = response;
     cases[gbwCase] = analyzeCase(input, response, gbwCase);

@@ -1,4 +1,5 @@
 import type { MutableComplex } from '../complex';
+import { hotIsMinimum } from '../devices/used-values';
 import type { CurveCase, CurveRequest, Curves } from '../report';
 import { ChainInput, GBW_CASES, GbwCase } from '../types';
 import { degrees, powerToDb, ratioToDb } from '../units';
@@ -76,11 +77,17 @@ export function computeCurves(input: ChainInput, request: CurveRequest): Curves 
   const frequenciesHz = frequencies(request);
   const offset = basisOffsetDb(input.specification).value;
   const all = {} as Record<GbwCase, Trace[]>;
+  const { policy } = input;
+  const idealCase = policy.gbwCase === 'minimumHot' && hotIsMinimum(policy) ? 'minimum' : policy.gbwCase;
   let ideal: readonly number[] = [];
   for (const gbwCase of GBW_CASES) {
+    if (gbwCase === 'minimumHot' && hotIsMinimum(policy)) {
+      all.minimumHot = all.minimum;
+      continue;
+    }
     const response = new ChainResponse(input, new ChainNetwork(input, gbwCase));
     all[gbwCase] = traces(response, frequenciesHz, offset);
-    if (gbwCase === input.policy.gbwCase) ideal = response.idealGain;
+    if (gbwCase === idealCase) ideal = response.idealGain;
   }
   const caseCurves = (k: number): Record<GbwCase, CurveCase> => ({
     typical: curveOf(all.typical[k]),

@@ -48,12 +48,17 @@ function spreadValue(sheet: DatasheetValue, policy: Policy, corner: DeviceCorner
   if (corner === 'typical') return typicalOf(sheet);
   if (corner === 'maximum') return maximumOf(sheet, policy.gbwDerating);
   const minimum = minimumOf(sheet, policy.gbwDerating);
-  if (corner === 'minimum' || policy.temperatureFactor === 1) return minimum;
+  if (corner === 'minimum' || hotIsMinimum(policy)) return minimum;
   return {
     ...minimum,
     value: minimum.value * policy.temperatureFactor,
     text: `${minimum.text} × ${factorText(policy.temperatureFactor)} (hot)`,
   };
+}
+
+/** True when the hot case counts with the very values of the minimum case: nothing has to be computed twice. */
+export function hotIsMinimum(policy: Policy): boolean {
+  return policy.temperatureFactor === 1;
 }
 
 /**

@@ -56,15 +56,6 @@ export interface PreparedStage {
   readonly secondPoleHz: number | null;
 }
 
-const NO_VALUES = {
-  feedback: null,
-  section: null,
-  block: null,
-  transimpedanceBandwidth: null,
-  loopBandwidthHz: null,
-  secondPoleHz: null,
-};
-
 /** True for the topologies whose signal goes into the inverting node. */
 export function isInverting(stage: FeedbackStage): boolean {
   return stage.topology === 'inverting' || stage.topology === 'transimpedance';
@@ -76,48 +67,58 @@ export function isInverting(stage: FeedbackStage): boolean {
  * @example prepareStage(stage, device, { policy: DEFAULT_POLICY, corner: 'minimum' }).network.stageId // stage.id
  */
 export function prepareStage(stage: Stage, device: Device | null, context: PrepareContext): PreparedStage {
-  const nothing = { stage, device, ...NO_VALUES };
   if (stage.kind === 'rc-section') {
     const section = sectionValues(stage, context);
-    return { ...nothing, section, network: new RcSectionNetwork(stage.id, section) };
+    return passive(stage, device, new RcSectionNetwork(stage.id, section), section, null);
   }
   if (stage.kind === 'matched-block') {
     const block = blockValues(device as MatchedBlockDevice, context);
-    return { ...nothing, block, network: new MatchedBlockNetwork(stage.id, block) };
+    return passive(stage, device, new MatchedBlockNetwork(stage.id, block), null, block);
   }
-  if (stage.kind === 'voltage-feedback') {
-    return { ...nothing, ...voltageFeedback(stage, device as VoltageFeedbackDevice, context) };
-  }
-  return { ...nothing, ...currentFeedback(stage, device as CurrentFeedbackDevice, context) };
+  if (stage.kind === 'voltage-feedback') return voltageFeedback(stage, device as VoltageFeedbackDevice, context);
+  return currentFeedback(stage, device as CurrentFeedbackDevice, context);
 }
 
-/** The parts outside the amplifier; absent ones as 0 or null. */
-function surroundings(stage: FeedbackStage) {
-  const { feedbackF = 0, isolationOhm = 0, terminationOhm = null, couplingF = null, biasOhm = null } = stage;
-  const inverting = isInverting(stage);
+function passive(
+  stage: Stage,
+  device: Device | null,
+  network: NetworkStage,
+  section: RcSectionValues | null,
+  block: MatchedBlockValues | null,
+): PreparedStage {
   return {
-    inverting,
-    feedbackOhm: stage.feedbackOhm,
-    feedbackF,
-    isolationOhm,
-    terminationOhm,
-    couplingF,
-    biasOhm: inverting ? null : biasOhm,
+    stage,
+    device,
+    network,
+    feedback: null,
+    section,
+    block,
+    transimpedanceBandwidth: null,
+    loopBandwidthHz: null,
+    secondPoleHz: null,
   };
 }
 
+const or = <T>(value: T | null | undefined, fallback: T): T => value ?? fallback;
+
+/** Literals without spreads: a picker prepares thousands of stages. */
 function feedbackValues(stage: FeedbackStage, device: AmplifierDevice): FeedbackPartValues {
-  const { strayF = 0, gainOhm } = stage;
-  const inputOhm = valueOr(parasitic(device.inputResistanceOhm), Infinity);
+  const inverting = isInverting(stage);
   const inputF = valueOr(parasitic(device.commonModeCapacitanceF), 0);
   return {
-    ...surroundings(stage),
-    seriesOhm: stage.topology === 'inverting' ? (gainOhm ?? 0) : 0,
-    gainS: stage.topology === 'non-inverting' && gainOhm ? 1 / gainOhm : 0,
-    nodeF: inputF + strayF,
-    inputS: 1 / inputOhm,
+    inverting,
+    feedbackOhm: stage.feedbackOhm,
+    feedbackF: or(stage.feedbackF, 0),
+    seriesOhm: stage.topology === 'inverting' ? or(stage.gainOhm, 0) : 0,
+    gainS: stage.topology === 'non-inverting' && stage.gainOhm ? 1 / stage.gainOhm : 0,
+    nodeF: inputF + or(stage.strayF, 0),
+    inputS: 1 / valueOr(parasitic(device.inputResistanceOhm), Infinity),
     inputF,
     outputOhm: outputResistanceFor(device).value,
+    isolationOhm: or(stage.isolationOhm, 0),
+    terminationOhm: or(stage.terminationOhm, null),
+    couplingF: or(stage.couplingF, null),
+    biasOhm: inverting ? null : or(stage.biasOhm, null),
   };
 }
 
@@ -126,38 +127,46 @@ function valueOr<T>(used: UsedValue | null, fallback: T): number | T {
 }
 
 function amplifierNoise(device: AmplifierDevice, context: PrepareContext): AmplifierNoise {
-  const { corner, ambientK = DEFAULT_AMBIENT_K } = context;
-  const { voltageNoiseCornerHz = 0, currentNoiseCornerHz = 0 } = device;
-  const plus = valueOr(upperWorst(device.currentNoiseAPerRtHz, corner), null);
-  const common = {
+  const { corner } = context;
+  const ofCurrentFeedback = device.kind === 'current-feedback';
+  const minus = ofCurrentFeedback ? device.invertingCurrentNoiseAPerRtHz : device.currentNoiseAPerRtHz;
+  return {
     voltageVPerRtHz: valueOr(upperWorst(device.voltageNoiseVPerRtHz, corner), null),
-    voltageCornerHz: voltageNoiseCornerHz,
-    plusCurrentAPerRtHz: plus,
-    currentCornerHz: currentNoiseCornerHz,
-    ambientK,
+    voltageCornerHz: or(device.voltageNoiseCornerHz, 0),
+    plusCurrentAPerRtHz: valueOr(upperWorst(device.currentNoiseAPerRtHz, corner), null),
+    minusCurrentAPerRtHz: valueOr(upperWorst(minus, corner), null),
+    minusCurrentDatum: ofCurrentFeedback ? 'current noise of the inverting input' : 'current noise',
+    currentCornerHz: or(device.currentNoiseCornerHz, 0),
+    ambientK: or(context.ambientK, DEFAULT_AMBIENT_K),
   };
-  if (device.kind === 'voltage-feedback') {
-    return { ...common, minusCurrentAPerRtHz: plus, minusCurrentDatum: 'current noise' };
-  }
-  const minus = valueOr(upperWorst(device.invertingCurrentNoiseAPerRtHz, corner), null);
-  return { ...common, minusCurrentAPerRtHz: minus, minusCurrentDatum: 'current noise of the inverting input' };
 }
 
-function voltageFeedback(stage: FeedbackStage, device: VoltageFeedbackDevice, context: PrepareContext) {
+function voltageFeedback(stage: FeedbackStage, device: VoltageFeedbackDevice, context: PrepareContext): PreparedStage {
+  const { policy, corner } = context;
   const feedback = feedbackValues(stage, device);
-  const loopBandwidthHz = gbwFor(device, context.policy, context.corner).value;
+  const loopBandwidthHz = gbwFor(device, policy, corner).value;
   const secondPoleHz = secondPoleFor(device).frequencyHz;
   const network = new VoltageFeedbackNetwork(stage.id, feedback, {
-    openLoopGain: dbToRatio(openLoopGainDbFor(device, context.corner).value),
+    openLoopGain: dbToRatio(openLoopGainDbFor(device, corner).value),
     gainBandwidthHz: loopBandwidthHz,
     secondPoleHz,
-    differentialF: parasitic(device.differentialCapacitanceF)?.value ?? 0,
+    differentialF: valueOr(parasitic(device.differentialCapacitanceF), 0),
     noise: amplifierNoise(device, context),
   });
-  return { feedback, network, loopBandwidthHz, secondPoleHz };
+  return {
+    stage,
+    device,
+    network,
+    feedback,
+    section: null,
+    block: null,
+    transimpedanceBandwidth: null,
+    loopBandwidthHz,
+    secondPoleHz,
+  };
 }
 
-function currentFeedback(stage: FeedbackStage, device: CurrentFeedbackDevice, context: PrepareContext) {
+function currentFeedback(stage: FeedbackStage, device: CurrentFeedbackDevice, context: PrepareContext): PreparedStage {
   const { policy, corner } = context;
   const feedback = feedbackValues(stage, device);
   const transimpedanceBandwidth = transimpedanceBandwidthFor(device, policy, corner);
@@ -171,8 +180,17 @@ function currentFeedback(stage: FeedbackStage, device: CurrentFeedbackDevice, co
     noise: amplifierNoise(device, context),
   });
   const unityHz = transimpedanceBandwidth / (2 * Math.PI * (feedback.feedbackOhm + invertingInputOhm));
-  const loopBandwidthHz = Math.max(referenceBandwidthFor(device, policy, corner).value, unityHz);
-  return { feedback, network, loopBandwidthHz, secondPoleHz, transimpedanceBandwidth };
+  return {
+    stage,
+    device,
+    network,
+    feedback,
+    section: null,
+    block: null,
+    transimpedanceBandwidth,
+    loopBandwidthHz: Math.max(referenceBandwidthFor(device, policy, corner).value, unityHz),
+    secondPoleHz,
+  };
 }
 
 function sectionValues(stage: RcSectionStage, context: PrepareContext): RcSectionValues {
