@@ -3,7 +3,7 @@ import { partName } from '../../report/facts';
 import type { ChainFacts, StageFacts } from '../../report/facts';
 import { atLeastText, gainText, ratioText, roundAway, targetText, valueText } from '../../text/phrases';
 import { asNonInverting, isRatioStage, resistorGain, splitInTwo, withGain } from './replacement-stages';
-import { hint, priceDifferenceText, proposal, trialCheckVerdict, trialStages } from './trials';
+import { hint, priceDifferenceText, proposal, trialCheckVerdict, trialStages, turnsPolarity } from './trials';
 import type { FoundRemedy, Trial, Trials } from './trials';
 
 const MOST_GAIN_STEPS = 4;
@@ -47,7 +47,8 @@ function nonInvertingRemedy(trials: Trials, stage: StageFacts): FoundRemedy | nu
   const trial = replacement && trials.replace(stage.index, [replacement]);
   if (!replacement || !trial) return null;
   const gain = gainText(Math.abs(resistorGain(stage.stage)));
-  const brief = `As non-inverting ${gain} it would use ${spendingText(trial)}.`;
+  const polarity = turnsPolarity(trial) ? ' and turn the polarity over' : '';
+  const brief = `As non-inverting ${gain} it would use ${spendingText(trial)}${polarity}.`;
   return proposal(trial, brief, `Make it non-inverting ${gain}`);
 }
 
@@ -60,7 +61,7 @@ function splitRemedy(trials: Trials, stage: StageFacts): FoundRemedy | null {
   const gain = gainText(sign * Math.sqrt(Math.abs(resistorGain(stage.stage))));
   const brief =
     `Split into two stages of ${gain} with the same device, each would use at most ${spendingText(trial)}` +
-    `${priceDifferenceText(trial)}.`;
+    `${priceDifferenceText(trial)}${turnsPolarity(trial) ? '; the polarity turns over' : ''}.`;
   return proposal(trial, brief, 'Split in two');
 }
 

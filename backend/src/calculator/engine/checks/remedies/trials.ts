@@ -58,7 +58,7 @@ export function hint(sentence: string, brief = sentence): FoundRemedy {
 
 /** A remedy that can be applied, with what else it changes. */
 export function proposal(trial: Trial, brief: string, action: string): FoundRemedy {
-  const sentence = brief + consequenceText(trial);
+  const sentence = brief + failureText(trial);
   return { brief, remedy: { sentence, verdict: trialVerdict(trial), action, stages: trial.stages } };
 }
 
@@ -79,23 +79,18 @@ export function trialVerdict(trial: Trial): Remedy['verdict'] {
   return worstVerdict(own);
 }
 
-/** What else changes: polarity, price, requirements that fail afterwards. Empty, or starting with a space. */
-function consequenceText(trial: Trial): string {
-  const sentences = [polarityText(trial), failureText(trial)].filter((text) => text !== '');
-  return sentences.map((text) => ` ${text}`).join('');
+/** True when the chain's polarity is another one afterwards: never left unsaid. */
+export function turnsPolarity(trial: Trial): boolean {
+  return trial.before.facts.chain.inverted !== trial.after.facts.chain.inverted;
 }
 
-function polarityText(trial: Trial): string {
-  const turned = trial.before.facts.chain.inverted !== trial.after.facts.chain.inverted;
-  return turned ? 'This turns the polarity over.' : '';
-}
-
+/** Requirements of the chain that fail afterwards; empty, or starting with a space. */
 function failureText(trial: Trial): string {
   const failing = trial.after.chainChecks.filter((check) => check.verdict === 'over' && check.id !== 'polarity');
   if (failing.length === 0) return '';
   const before = new Set(trial.before.chainChecks.filter((check) => check.verdict === 'over').map((check) => check.id));
   const still = failing.every((check) => before.has(check.id)) ? 'still ' : '';
-  return `The chain would ${still}fail: ${listText(failing.map((check) => failureOf(trial, check)))}.`;
+  return ` The chain would ${still}fail: ${listText(failing.map((check) => failureOf(trial, check)))}.`;
 }
 
 function failureOf(trial: Trial, check: Check): string {
