@@ -1,4 +1,4 @@
-import { Body, Controller, HttpCode, Post } from '@nestjs/common';
+import { Body, Controller, Header, HttpCode, Post } from '@nestjs/common';
 import { ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { RateLimitBucket } from '../common/decorators';
 import { UsesUnions } from '../common/fields/union';
@@ -10,6 +10,9 @@ import { CandidatesReportDto } from './dto/candidates.dto';
 import { SOURCE } from './dto/specification.dto';
 import { STAGE } from './dto/stage.dto';
 
+/** The calculator's threads write their answers out themselves. */
+const JSON_TEXT = 'application/json; charset=utf-8';
+
 @ApiTags('calculations')
 @UsesUnions([STAGE, DEVICE, SOURCE], [DatasheetValueDto])
 @RateLimitBucket('calculation')
@@ -19,15 +22,17 @@ export class CalculatorController {
 
   @Post()
   @HttpCode(200)
+  @Header('Content-Type', JSON_TEXT)
   @ApiOkResponse({ type: CalculationResultDto })
-  calculate(@Body() request: CalculationRequestDto): Promise<CalculationResultDto> {
+  calculate(@Body() request: CalculationRequestDto): Promise<string> {
     return this.calculator.calculate(request);
   }
 
   @Post('candidates')
   @HttpCode(200)
+  @Header('Content-Type', JSON_TEXT)
   @ApiOkResponse({ type: CandidatesReportDto })
-  tryDevices(@Body() request: CandidatesRequestDto): Promise<CandidatesReportDto> {
+  tryDevices(@Body() request: CandidatesRequestDto): Promise<string> {
     return this.calculator.tryDevices(request);
   }
 }

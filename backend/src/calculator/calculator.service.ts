@@ -1,11 +1,9 @@
 import { Injectable } from '@nestjs/common';
 import { InvalidError } from '../common/errors';
 import { DeviceLibraryService } from '../devices/device-library.service';
-import { CandidatesPool } from './candidates-pool';
+import { CalculatorThreads } from './calculator-threads';
 import { chainInputOf, libraryDeviceIds } from './chain-input';
-import type { CalculationRequestDto, CalculationResultDto, CandidatesRequestDto } from './dto/calculation.dto';
-import type { CandidatesReportDto } from './dto/candidates.dto';
-import { EngineInputError, calculate, curves, working } from './engine';
+import type { CalculationRequestDto, CandidatesRequestDto } from './dto/calculation.dto';
 import type { ChainInput, Device, DeviceKind, Stage } from './engine';
 
 /** The calculator for requests: stateless; only devices are looked up. */
@@ -13,20 +11,17 @@ import type { ChainInput, Device, DeviceKind, Stage } from './engine';
 export class CalculatorService {
   constructor(
     private readonly library: DeviceLibraryService,
-    private readonly pool: CandidatesPool,
+    private readonly threads: CalculatorThreads,
   ) {}
 
-  async calculate(request: CalculationRequestDto): Promise<CalculationResultDto> {
+  /** JSON text of a CalculationResult. */
+  async calculate(request: CalculationRequestDto): Promise<string> {
     const input = chainInputOf(request, await this.library.findForCalculation(libraryDeviceIds(request)));
-    const { curves: curveRequest, working: workingRequest } = request.include ?? {};
-    return refusals(() => ({
-      report: calculate(input),
-      curves: curveRequest ? curves(input, curveRequest) : null,
-      working: workingRequest ? working(input, workingRequest) : null,
-    }));
+    return this.threads.calculate({ input, ...request.include });
   }
 
-  async tryDevices(request: CandidatesRequestDto): Promise<CandidatesReportDto> {
+  /** JSON text of a CandidatesReport. */
+  async tryDevices(request: CandidatesRequestDto): Promise<string> {
     const stage = request.stages.find(({ id }) => id === request.stageId);
     const kind = stage ? deviceKindOf(stage) : null;
     if (kind === null) {
@@ -35,7 +30,7 @@ export class CalculatorService {
     const used = await this.library.findForCalculation(libraryDeviceIds(request));
     const input = chainInputOf(request, used);
     const candidates = await this.candidatesFor(request, kind, input);
-    return this.pool.tryDevices({ input, stageId: request.stageId, candidates });
+    return this.threads.tryDevices({ input, stageId: request.stageId, candidates });
   }
 
   private async candidatesFor(
@@ -55,13 +50,4 @@ export class CalculatorService {
 /** The kind of device that a stage takes; null: none. */
 function deviceKindOf(stage: Stage): DeviceKind | null {
   return stage.kind === 'rc-section' ? null : stage.kind;
-}
-
-/** Runs the calculator; what it refuses becomes 422 with the fields it names. */
-function refusals<T>(run: () => T): T {
-  try {
-    return run();
-  } catch (error) {
-    throw error instanceof EngineInputError ? new InvalidError(error.issues) : error;
-  }
 }

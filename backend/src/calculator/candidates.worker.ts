@@ -1,5 +1,7 @@
-import { EngineInputError, tryDevices } from './engine';
-import type { CandidatesReport, ChainInput, Device, EngineIssue } from './engine';
+import { refusable } from './calculation.worker';
+import type { Refusal } from './calculation.worker';
+import { tryDevices } from './engine';
+import type { ChainInput, Device } from './engine';
 
 export interface CandidatesTask {
   readonly input: ChainInput;
@@ -7,15 +9,9 @@ export interface CandidatesTask {
   readonly candidates: readonly Device[];
 }
 
-/** Class instances do not survive the way between threads, so a refusal travels as data. */
-export type CandidatesAnswer = { readonly report: CandidatesReport } | { readonly issues: readonly EngineIssue[] };
+export type CandidatesAnswer = { readonly json: string } | Refusal;
 
 /** Runs in a thread of its own: hundreds of whole-chain calculations would hold up everybody's typing. */
 export default function runCandidates({ input, stageId, candidates }: CandidatesTask): CandidatesAnswer {
-  try {
-    return { report: tryDevices(input, stageId, candidates) };
-  } catch (error) {
-    if (error instanceof EngineInputError) return { issues: error.issues };
-    throw error;
-  }
+  return refusable(() => ({ json: JSON.stringify(tryDevices(input, stageId, candidates)) }));
 }

@@ -1,0 +1,74 @@
+import { availableParallelism } from 'node:os';
+import path from 'node:path';
+import { Injectable } from '@nestjs/common';
+import type { OnApplicationShutdown } from '@nestjs/common';
+import { Piscina } from 'piscina';
+import { InvalidError, TooManyRequestsError } from '../common/errors';
+import runCalculation from './calculation.worker';
+import type { CalculationAnswer, CalculationTask, Refusal } from './calculation.worker';
+import type { CandidatesAnswer, CandidatesTask } from './candidates.worker';
+
+/** Threads run compiled JavaScript; from the sources (unit tests) that is the build beside them. */
+const COMPILED = path.resolve(__dirname, '../../dist/calculator');
+const RUNS_FROM_SOURCES = __filename.endsWith('.ts');
+
+const THREADS = Math.max(1, Math.min(4, availableParallelism()));
+/** With more than this waiting the server is overrun; newer requests are refused and asked to come again. */
+const MAX_WAITING = 256;
+
+/** A pool that starts its threads when it is first needed. */
+class LazyPool<Task, Answer> {
+  private pool: Piscina<Task, Answer> | null = null;
+
+  constructor(
+    private readonly file: string,
+    private readonly maxThreads: number,
+  ) {}
+
+  async run(task: Task): Promise<Answer> {
+    this.pool ??= new Piscina({
+      filename: path.join(COMPILED, this.file),
+      minThreads: 1,
+      maxThreads: this.maxThreads,
+      maxQueue: MAX_WAITING,
+    });
+    if (this.pool.queueSize >= MAX_WAITING) {
+      throw new TooManyRequestsError('server_busy', 'The calculator is busy. Try again in a moment.', 1);
+    }
+    return this.pool.run(task);
+  }
+
+  async destroy(): Promise<void> {
+    await this.pool?.destroy();
+  }
+}
+
+/**
+ * The calculator's threads. They never open the database: all they need comes with the task. Trying devices takes long,
+ * so it has a pool of its own and live previews never queue behind it.
+ */
+@Injectable()
+export class CalculatorThreads implements OnApplicationShutdown {
+  private readonly previews = new LazyPool<CalculationTask, CalculationAnswer>('calculation.worker.js', THREADS);
+  private readonly trials = new LazyPool<CandidatesTask, CandidatesAnswer>('candidates.worker.js', THREADS);
+
+  /** The answer as JSON text. */
+  async calculate(task: CalculationTask): Promise<string> {
+    return accepted(RUNS_FROM_SOURCES ? runCalculation(task) : await this.previews.run(task));
+  }
+
+  /** The answer as JSON text. */
+  async tryDevices(task: CandidatesTask): Promise<string> {
+    return accepted(await this.trials.run(task));
+  }
+
+  async onApplicationShutdown(): Promise<void> {
+    await Promise.all([this.previews.destroy(), this.trials.destroy()]);
+  }
+}
+
+/** What the calculator refuses is the request's fault: 422 with the fields that it names. */
+function accepted(answer: { readonly json: string } | Refusal): string {
+  if ('issues' in answer) throw new InvalidError(answer.issues);
+  return answer.json;
+}
