@@ -11,10 +11,7 @@ test('the lead sees the weakest option first and sets the margins that verdicts 
   await expect(project.option('Baseline')).toContainText('0.974');
 
   await page.getByRole('link', { name: 'Edit project' }).click();
-  await page
-    .getByLabel(/^Headroom/)
-    .first()
-    .fill('8');
+  await page.getByRole('textbox', { name: 'GBW headroom' }).fill('8');
   await page.getByRole('button', { name: 'Save', exact: true }).click();
   await expect(project.chains).toBeVisible();
 
