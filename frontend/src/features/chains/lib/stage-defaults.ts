@@ -20,7 +20,9 @@ const NAMES: Readonly<Record<StageKind, string>> = {
   'matched-block': 'Block',
 };
 
-function amplifierStage(id: string, device: Device): FeedbackStage {
+const FIRST_TRANSIMPEDANCE_OHM = 10e3;
+
+function amplifierStage(id: string, device: Device, atCurrentSource: boolean): FeedbackStage {
   const name = NAMES[device.kind];
   if (device.kind === 'current-feedback') {
     const pair = pairHoldingFeedback(1, device.referenceFeedbackOhm, 'exact');
@@ -33,6 +35,11 @@ function amplifierStage(id: string, device: Device): FeedbackStage {
       wantedGain: 2,
       ...pair,
     };
+  }
+  if (atCurrentSource) {
+    const feedbackOhm = FIRST_TRANSIMPEDANCE_OHM;
+    const fixed = { kind: 'voltage-feedback', topology: 'transimpedance', deviceId: device.id, gainOhm: null } as const;
+    return { id, name: 'Transimpedance', ...fixed, wantedGain: -feedbackOhm, feedbackOhm };
   }
   // A part that is not stable at low gain starts at one where it is.
   const stable = device.kind === 'voltage-feedback' ? (device.minimumStableGain ?? 1) : 1;
@@ -54,11 +61,16 @@ export function needsDevice(kind: StageKind): boolean {
   return kind !== 'rc-section';
 }
 
-/** A stage to begin with. Kinds with a device need one: there is no amplifier without it. */
-export function newStage(id: string, kind: StageKind, device: Device | null): Stage | null {
+/**
+ * A stage to begin with. Kinds with a device need one: there is no amplifier without it. What a current source feeds
+ * first is a transimpedance stage.
+ */
+export function newStage(id: string, kind: StageKind, device: Device | null, atCurrentSource = false): Stage | null {
   if (kind === 'rc-section') return { id, name: NAMES[kind], kind, seriesOhm: 50, shuntF: 100e-12 };
   if (!device || device.kind !== kind) return null;
-  return kind === 'matched-block' ? { id, name: NAMES[kind], kind, deviceId: device.id } : amplifierStage(id, device);
+  return kind === 'matched-block'
+    ? { id, name: NAMES[kind], kind, deviceId: device.id }
+    : amplifierStage(id, device, atCurrentSource);
 }
 
 export function isFeedbackStage(stage: Stage): stage is FeedbackStage {

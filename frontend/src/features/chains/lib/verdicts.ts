@@ -1,4 +1,4 @@
-import type { Check, CheckId, Verdict } from '../../../api/types';
+import type { ChainReport, Check, CheckId, Verdict } from '../../../api/types';
 
 const BADNESS: Readonly<Record<Verdict, number>> = { clear: 0, tight: 1, unknown: 2, over: 3 };
 
@@ -28,6 +28,8 @@ export function laneVerdict(checks: readonly Check[], fallback: Verdict): Verdic
   return verdictOf(checks, ...LANE_CHECKS) ?? fallback;
 }
 
-export function chainLaneVerdict(checks: readonly Check[], fallback: Verdict): Verdict {
-  return verdictOf(checks, ...CHAIN_LANE_CHECKS) ?? fallback;
+export function chainLaneVerdict({ checks, stages }: Pick<ChainReport, 'checks' | 'stages'>): Verdict {
+  const ofStages = stages.map((stage) => verdictOf(stage.checks, ...LANE_CHECKS)).filter((verdict) => verdict !== null);
+  const ofChain = verdictOf(checks, ...CHAIN_LANE_CHECKS);
+  return worstVerdict(ofChain === null ? ofStages : [...ofStages, ofChain]) ?? 'clear';
 }

@@ -18,18 +18,12 @@ export function HeadlineFigures() {
 }
 
 function HeadlineFigure({ item }: { item: HeadlineItem }) {
-  const { openWorking } = useWorkspace();
-  const { label, figure, money, verdict, requirement, chainFigure } = item;
-  const tone = verdict === null || verdict === 'clear' ? undefined : verdict;
-  const figureKey = money ? 'cost' : chainFigure;
-  const open = figureKey === null ? undefined : () => openWorking(null, figureKey, label);
+  const { label, verdict, requirement } = item;
   return (
     <div className={styles.headlineItem}>
-      <dt>{item.key === 'cost' ? <span className={styles.money}>{label}</span> : label}</dt>
-      <dd className={`${styles.headlineValue} ${tone ? styles[tone] : ''}`}>
-        {figure && <FigureText figure={figure} name={label} tone={tone} onOpen={open} />}
-        {money && <MoneyText money={money} name={label} onOpen={open} />}
-        {!figure && !money && <span className="soft">–</span>}
+      <dt className={item.money ? styles.money : undefined}>{label}</dt>
+      <dd className={styles.headlineValue}>
+        <HeadlineValue item={item} />
       </dd>
       <dd className={`${styles.headlineLimit} ${verdict ? styles[verdict] : ''}`}>
         {verdict && <VerdictIcon verdict={verdict} size={12} />}
@@ -40,4 +34,21 @@ function HeadlineFigure({ item }: { item: HeadlineItem }) {
       </dd>
     </div>
   );
+}
+
+/** A figure that is clear stays in ink; what is not stands out. */
+function HeadlineValue({ item }: { item: HeadlineItem }) {
+  const { openWorking } = useWorkspace();
+  const { label, figure, money, verdict, chainFigure } = item;
+  const tone = verdict === null || verdict === 'clear' ? undefined : verdict;
+  if (money) {
+    return (
+      <span className={tone && styles[tone]}>
+        <MoneyText money={money} name={label} onOpen={() => openWorking(null, 'cost', label)} />
+      </span>
+    );
+  }
+  if (!figure) return <span className="soft">–</span>;
+  const open = chainFigure === null ? undefined : () => openWorking(null, chainFigure, label);
+  return <FigureText figure={figure} name={label} tone={tone} onOpen={open} />;
 }

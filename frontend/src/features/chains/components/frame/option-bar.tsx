@@ -20,9 +20,9 @@ export function OptionBar() {
 }
 
 function OptionLink({ row, current }: { row: ChainOptionRow; current: boolean }) {
-  const { control, preview, gbwCase } = useWorkspace();
+  const { control, preview, address } = useWorkspace();
   const verdict = (current ? preview.report?.verdict.verdict : undefined) ?? row.summary.verdict;
-  const search = new URLSearchParams({ option: row.id, case: gbwCase });
+  const search = new URLSearchParams({ option: row.id, ...(address.gbwCase && { case: address.gbwCase }) });
   return (
     <Link
       to={{ search: `?${search}` }}

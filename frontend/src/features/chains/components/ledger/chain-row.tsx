@@ -73,11 +73,7 @@ export function ChainRow() {
         </td>
         <td className={styles.lane}>
           <div className={styles.laneBox}>
-            <LaneDrawing
-              lane={report.cases[gbwCase].lane}
-              axis={report.axis}
-              verdict={chainLaneVerdict(report.checks, verdict.verdict)}
-            />
+            <LaneDrawing lane={report.cases[gbwCase].lane} axis={report.axis} verdict={chainLaneVerdict(report)} />
           </div>
         </td>
         <td />

@@ -1,5 +1,5 @@
 import type { FrequencyAxis, Lane, Verdict } from '../../../../api/types';
-import { axisTicks, laneGeometry, unlimitedLane, type LaneGeometry } from '../../lib/lane-geometry';
+import { axisTicks, laneGeometry, unlimitedLane, type LaneGeometry, type Span } from '../../lib/lane-geometry';
 import { fadeOf, hatchOf } from './lane-defs';
 import styles from './lane.module.css';
 
@@ -44,34 +44,36 @@ export function LaneBackground({ axis, geometry }: { axis: FrequencyAxis; geomet
   );
 }
 
-function LaneBar({ geometry, verdict, half }: { geometry: LaneGeometry; verdict: Verdict; half: number }) {
-  const { solid, fading, tick, typicalTick, startsInside, openEnded } = geometry;
-  const start = solid?.from ?? fading?.from;
-  const end = fading?.to ?? solid?.to;
+interface LaneBarProps {
+  geometry: LaneGeometry;
+  verdict: Verdict;
+  half: number;
+}
+
+function LaneBar({ geometry, verdict, half }: LaneBarProps) {
+  const { solid, fading, startsInside } = geometry;
+  const whole = solid && fading ? { from: solid.from, to: fading.to } : (solid ?? fading);
   return (
     <g className={styles[verdict]}>
-      {solid && (
-        <rect
-          x={percent(solid.from)}
-          width={percent(solid.to - solid.from)}
-          y={-half}
-          height={2 * half}
-          fill="currentColor"
-        />
-      )}
-      {fading && (
-        <rect
-          x={percent(fading.from)}
-          width={percent(fading.to - fading.from)}
-          y={-half}
-          height={2 * half}
-          fill={fadeOf(verdict)}
-        />
-      )}
-      {start !== undefined && end !== undefined && verdict !== 'clear' && (
-        <rect x={percent(start)} width={percent(end - start)} y={-half} height={2 * half} fill={hatchOf(verdict)} />
-      )}
-      {startsInside && start !== undefined && <line className={styles.start} {...vertical(start, half + 2)} />}
+      <Bar span={solid} half={half} fill="currentColor" />
+      <Bar span={fading} half={half} fill={fadeOf(verdict)} />
+      {verdict !== 'clear' && <Bar span={whole} half={half} fill={hatchOf(verdict)} />}
+      {startsInside && whole && <line className={styles.start} {...vertical(whole.from, half + 2)} />}
+      <LaneEnds geometry={geometry} half={half} />
+    </g>
+  );
+}
+
+function Bar({ span, half, fill }: { span: Span | null; half: number; fill: string }) {
+  if (!span) return null;
+  return <rect x={percent(span.from)} width={percent(span.to - span.from)} y={-half} height={2 * half} fill={fill} />;
+}
+
+/** The corner, the same for the typical device, and the sign that a lane goes on beyond the axis. */
+function LaneEnds({ geometry, half }: { geometry: LaneGeometry; half: number }) {
+  const { tick, typicalTick, openEnded } = geometry;
+  return (
+    <>
       {typicalTick !== null && <TypicalTick at={typicalTick} half={half + 3} />}
       {tick !== null && <line className={styles.tick} {...vertical(tick, half + 5)} />}
       {openEnded && (
@@ -79,7 +81,7 @@ function LaneBar({ geometry, verdict, half }: { geometry: LaneGeometry; verdict:
           <path className={styles.onward} d={`M-7 ${-half + 1} -1 0 -7 ${half - 1}`} />
         </svg>
       )}
-    </g>
+    </>
   );
 }
 

@@ -111,7 +111,7 @@ function ChainCard() {
         </span>
       </span>
       <div className={styles.cardLane}>
-        <LaneDrawing lane={lane} axis={report.axis} verdict={chainLaneVerdict(report.checks, report.verdict.verdict)} />
+        <LaneDrawing lane={lane} axis={report.axis} verdict={chainLaneVerdict(report)} />
       </div>
       <span className={styles.cardFigures}>
         <FigureText figure={figures.gainOperating} strong />

@@ -1,3 +1,4 @@
+import HolderOutlined from '@ant-design/icons/es/icons/HolderOutlined';
 import { useSortable } from '@dnd-kit/sortable';
 import type { KeyboardEvent } from 'react';
 
@@ -20,13 +21,15 @@ interface LedgerRowProps {
 
 export function LedgerRow({ stage, index, report, rows }: LedgerRowProps) {
   const { address, editable } = useWorkspace();
-  const sortable = useSortable({ id: stage.id, disabled: !editable });
+  const { setNodeRef, setActivatorNodeRef, listeners, transform, transition, isDragging } = useSortable({
+    id: stage.id,
+    disabled: !editable,
+  });
   const selected = address.stageId === stage.id;
-  const { transform, transition, isDragging } = sortable;
   const classes = [styles.row, selected ? styles.selected : '', isDragging ? styles.dragging : ''].join(' ');
   return (
     <tr
-      ref={sortable.setNodeRef}
+      ref={setNodeRef}
       data-stage={stage.id}
       className={classes}
       style={transform ? { transform: `translateY(${transform.y}px)`, transition } : undefined}
@@ -37,7 +40,21 @@ export function LedgerRow({ stage, index, report, rows }: LedgerRowProps) {
       onClick={() => address.change({ stageId: stage.id })}
       onKeyDown={(event: KeyboardEvent) => rows.onKeyDown(event, stage.id)}
     >
-      <StageCell stage={stage} index={index} report={report} sortable={sortable} />
+      <StageCell stage={stage} index={index} report={report}>
+        {editable ? (
+          <span
+            ref={setActivatorNodeRef}
+            className={styles.handle}
+            title="Drag to reorder (Alt + arrow keys)"
+            aria-hidden="true"
+            {...listeners}
+          >
+            <HolderOutlined />
+          </span>
+        ) : (
+          <span className={styles.handle} />
+        )}
+      </StageCell>
       {report ? (
         <RowFigures report={report} />
       ) : (

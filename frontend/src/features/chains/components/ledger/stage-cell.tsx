@@ -1,5 +1,4 @@
-import HolderOutlined from '@ant-design/icons/es/icons/HolderOutlined';
-import type { useSortable } from '@dnd-kit/sortable';
+import type { ReactNode } from 'react';
 
 import type { Stage, StageReport } from '../../../../api/types';
 import { GradeMark } from '../../../../components/data-marks';
@@ -11,7 +10,8 @@ interface StageCellProps {
   stage: Stage;
   index: number;
   report: StageReport | null;
-  sortable: ReturnType<typeof useSortable>;
+  /** The handle to drag it by. */
+  children: ReactNode;
 }
 
 /** Where the device's name comes from while there are no figures yet. */
@@ -22,26 +22,13 @@ function usePartNumber(stage: Stage, report: StageReport | null): string | null 
   return option.devices.find((device) => device.id === deviceId)?.partNumber ?? null;
 }
 
-export function StageCell({ stage, index, report, sortable }: StageCellProps) {
-  const { editable } = useWorkspace();
+export function StageCell({ stage, index, report, children }: StageCellProps) {
   const partNumber = usePartNumber(stage, report);
   const topology = 'topology' in stage ? stage.topology : stage.kind === 'rc-section' ? 'passive' : 'matched';
   return (
     <th scope="row" className={styles.stage}>
       <div className={styles.stageCell}>
-        {editable ? (
-          <span
-            ref={sortable.setActivatorNodeRef}
-            className={styles.handle}
-            title="Drag to reorder (Alt + arrow keys)"
-            aria-hidden="true"
-            {...sortable.listeners}
-          >
-            <HolderOutlined />
-          </span>
-        ) : (
-          <span className={styles.handle} />
-        )}
+        {children}
         <div className={styles.stageText}>
           <div className={styles.stageName} title={stage.name}>
             S{index + 1} {stage.name}

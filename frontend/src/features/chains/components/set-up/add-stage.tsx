@@ -16,11 +16,13 @@ import styles from './add-stage.module.css';
 
 /** Kind first, then the device it is made with; the rest is set up in place. */
 export function AddStage({ onClose }: { onClose: () => void }) {
-  const { edits, address } = useWorkspace();
+  const { edits, address, control } = useWorkspace();
   const [kind, setKind] = useState<StageKind>('voltage-feedback');
   const [chosen, setChosen] = useState<DeviceDto | null>(null);
   const device = useDeviceChoice(kind, chosen);
-  const stage = newStage('', kind, device);
+  const { stages, specification } = control.draft;
+  const atCurrentSource = stages.length === 0 && specification.source.kind === 'current';
+  const stage = newStage('', kind, device, atCurrentSource);
 
   const add = () => {
     if (!stage) return;

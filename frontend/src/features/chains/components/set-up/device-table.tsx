@@ -5,7 +5,7 @@ import type { CandidateReport } from '../../../../api/types';
 import { GradeMark } from '../../../../components/data-marks';
 import { FigureText } from '../../../../components/figure-text';
 import { MoneyText } from '../../../../components/money-text';
-import { VerdictMark } from '../../../../components/verdict-mark';
+import { VerdictIcon, VerdictMark } from '../../../../components/verdict-mark';
 import { frequencyText } from '../../lib/frequency-text';
 import { useWorkspace } from '../workspace-context';
 import styles from './set-up.module.css';
@@ -114,8 +114,18 @@ function DeviceRow({ candidate, onChoose }: { candidate: CandidateReport; onChoo
         <FigureText figure={candidate.droopOperating} hideUnit />
       </td>
       <td className={styles.then}>
-        {candidate.chainText}
-        {reason && <div className={styles.reason}>{reason}</div>}
+        <span className={styles.thenChain}>
+          {candidate.chainVerdict !== verdict && <VerdictIcon verdict={candidate.chainVerdict} size={12} />}
+          <span>
+            <span className="visually-hidden">chain {candidate.chainVerdict}: </span>
+            {candidate.chainText}
+          </span>
+        </span>
+        {reason && (
+          <div className={styles.reason} title={reason}>
+            {reason}
+          </div>
+        )}
       </td>
       <td className="number">
         <MoneyText money={candidate.unitCost} hideCurrency />

@@ -6,69 +6,67 @@ import { useWorkspace } from '../workspace-context';
 import { LoadText } from './load-text';
 import { useStageForm } from './use-stage-form';
 
+type PartKey = 'feedbackF' | 'strayF' | 'terminationOhm' | 'biasOhm' | 'isolationOhm';
+
+/** Zero is the same as no part where it is allowed. */
+const PARTS: Readonly<Record<PartKey, { label: string; unit: 'Ω' | 'pF'; zeroAllowed: boolean }>> = {
+  feedbackF: { label: 'Cf across Rf', unit: 'pF', zeroAllowed: true },
+  strayF: { label: 'Stray at − pin', unit: 'pF', zeroAllowed: true },
+  terminationOhm: { label: 'Termination', unit: 'Ω', zeroAllowed: false },
+  biasOhm: { label: 'Bias to ground', unit: 'Ω', zeroAllowed: false },
+  isolationOhm: { label: 'Isolation at output', unit: 'Ω', zeroAllowed: true },
+};
+
 /** The parts around the amplifier, from its input to its output; empty means that the part is not there. */
 export function PartsFields({ stage }: { stage: FeedbackStage }) {
-  const { set, replace, error, disabled } = useStageForm(stage);
-  const resistor = { unit: 'Ω', maximum: 1e12, disabled, placeholder: 'none' } as const;
-  const capacitor = { maximum: 1, minimum: 0, disabled, placeholder: 'none' } as const;
   return (
     <>
-      <QuantityInput
-        {...capacitor}
-        label="Cf across Rf"
-        unit="pF"
-        value={stage.feedbackF ?? null}
-        error={error('feedbackF')}
-        onChange={(value) => set('feedbackF', 'Cf', { feedbackF: value ?? undefined })}
-      />
-      <QuantityInput
-        {...capacitor}
-        label="Input coupling"
-        unit="nF"
-        exclusiveMinimum
-        value={stage.couplingF ?? null}
-        error={error('couplingF')}
-        suffix={<CouplingCorner stage={stage} />}
-        onChange={(couplingF) => replace(withCoupling(stage, couplingF), 'input coupling', 'couplingF')}
-      />
-      {isNonInverting(stage.topology) && (
-        <QuantityInput
-          {...resistor}
-          label="Bias to ground"
-          minimum={0}
-          exclusiveMinimum
-          value={stage.biasOhm ?? null}
-          error={error('biasOhm')}
-          onChange={(biasOhm) => set('biasOhm', 'bias resistor', { biasOhm })}
-        />
-      )}
-      <QuantityInput
-        {...resistor}
-        label="Termination"
-        minimum={0}
-        exclusiveMinimum
-        value={stage.terminationOhm ?? null}
-        error={error('terminationOhm')}
-        onChange={(terminationOhm) => set('terminationOhm', 'termination', { terminationOhm })}
-      />
-      <QuantityInput
-        {...capacitor}
-        label="Stray at − pin"
-        unit="pF"
-        value={stage.strayF ?? null}
-        error={error('strayF')}
-        onChange={(value) => set('strayF', 'stray capacitance', { strayF: value ?? undefined })}
-      />
-      <QuantityInput
-        {...resistor}
-        label="Isolation at output"
-        minimum={0}
-        value={stage.isolationOhm ?? null}
-        error={error('isolationOhm')}
-        onChange={(value) => set('isolationOhm', 'isolation', { isolationOhm: value ?? undefined })}
-      />
+      <PartField stage={stage} part="feedbackF" />
+      <CouplingField stage={stage} />
+      {isNonInverting(stage.topology) && <PartField stage={stage} part="biasOhm" />}
+      <PartField stage={stage} part="terminationOhm" />
+      <PartField stage={stage} part="strayF" />
+      <PartField stage={stage} part="isolationOhm" />
       <LoadText stageId={stage.id} />
     </>
+  );
+}
+
+function PartField({ stage, part }: { stage: FeedbackStage; part: PartKey }) {
+  const { set, error, disabled } = useStageForm(stage);
+  const { label, unit, zeroAllowed } = PARTS[part];
+  return (
+    <QuantityInput
+      label={label}
+      unit={unit}
+      minimum={0}
+      exclusiveMinimum={!zeroAllowed}
+      maximum={unit === 'pF' ? 1 : 1e12}
+      placeholder="none"
+      disabled={disabled}
+      value={stage[part] ?? null}
+      error={error(part)}
+      onChange={(value) => set(part, label, { [part]: value ?? undefined })}
+    />
+  );
+}
+
+function CouplingField({ stage }: { stage: FeedbackStage }) {
+  const { replace, error, disabled } = useStageForm(stage);
+  return (
+    <QuantityInput
+      label="Input coupling"
+      unit="nF"
+      minimum={0}
+      exclusiveMinimum
+      maximum={1}
+      placeholder="none"
+      disabled={disabled}
+      value={stage.couplingF ?? null}
+      error={error('couplingF')}
+      suffix={<CouplingCorner stage={stage} />}
+      onChange={(couplingF) => replace(withCoupling(stage, couplingF), 'input coupling', 'couplingF')}
+    />
   );
 }
 

@@ -6,15 +6,21 @@ import { Group } from './group';
 import type { SpecificationFieldsProps } from './specification-form';
 
 const BAND_LABELS: readonly (readonly [keyof Band, string])[] = [
-  ['lowHz', 'From'],
+  ['lowHz', 'Lower band edge'],
   ['operatingHz', 'Operating frequency'],
-  ['highHz', 'To'],
+  ['highHz', 'Upper band edge'],
 ];
 
 const BASIS_LABELS: Readonly<Record<GainBasis, string>> = {
-  voltage: 'voltage: load over EMF',
-  transducer: 'transducer: power over available power',
-  transimpedance: 'transimpedance: voltage over current',
+  voltage: 'voltage gain',
+  transducer: 'transducer gain',
+  transimpedance: 'transimpedance',
+};
+
+const BASIS_HINTS: Readonly<Record<GainBasis, string>> = {
+  voltage: 'Load voltage over EMF.',
+  transducer: 'Load power over available power.',
+  transimpedance: 'Load voltage over current.',
 };
 
 /** Limits as the server has them: anything from a millihertz to a terahertz. */
@@ -46,6 +52,7 @@ export function BandFields({ specification, onChange, messages, disabled }: Spec
         options={bases.map((value) => ({ value, label: BASIS_LABELS[value] }))}
         disabled={disabled || bases.length < 2}
         error={messages['gainBasis']}
+        hint={BASIS_HINTS[gainBasis]}
         onChange={(value) => onChange({ ...specification, gainBasis: value }, 'gainBasis')}
       />
     </Group>

@@ -5,8 +5,9 @@ import type { SpecificationFieldsProps } from './specification-form';
 const ZERO_CELSIUS_K = 273.15;
 const DEFAULT_AMBIENT_K = 298.15;
 
-export function LoadFields({ specification, onChange, messages, disabled }: SpecificationFieldsProps) {
-  const { load, supply } = specification;
+export function LoadFields(props: SpecificationFieldsProps) {
+  const { specification, onChange, messages, disabled } = props;
+  const { load } = specification;
   return (
     <Group title="Load and supply">
       <QuantityInput
@@ -36,6 +37,28 @@ export function LoadFields({ specification, onChange, messages, disabled }: Spec
           onChange({ ...specification, load: { ...load, capacitanceF: value ?? undefined } }, 'load.capacitanceF')
         }
       />
+      <SupplyFields {...props} />
+      <QuantityInput
+        label="Ambient temperature"
+        unit="°C"
+        minimum={-ZERO_CELSIUS_K}
+        exclusiveMinimum
+        maximum={300}
+        disabled={disabled}
+        value={Number(((specification.ambientK ?? DEFAULT_AMBIENT_K) - ZERO_CELSIUS_K).toFixed(6))}
+        error={messages['ambientK']}
+        onChange={(celsius) =>
+          onChange({ ...specification, ambientK: celsius === null ? undefined : celsius + ZERO_CELSIUS_K }, 'ambientK')
+        }
+      />
+    </Group>
+  );
+}
+
+function SupplyFields({ specification, onChange, messages, disabled }: SpecificationFieldsProps) {
+  const { supply } = specification;
+  return (
+    <>
       <QuantityInput
         label="Positive supply"
         unit="V"
@@ -62,19 +85,6 @@ export function LoadFields({ specification, onChange, messages, disabled }: Spec
           negativeV !== null && onChange({ ...specification, supply: { ...supply, negativeV } }, 'supply.negativeV')
         }
       />
-      <QuantityInput
-        label="Ambient temperature"
-        unit="°C"
-        minimum={-ZERO_CELSIUS_K}
-        exclusiveMinimum
-        maximum={300}
-        disabled={disabled}
-        value={Number(((specification.ambientK ?? DEFAULT_AMBIENT_K) - ZERO_CELSIUS_K).toFixed(6))}
-        error={messages['ambientK']}
-        onChange={(celsius) =>
-          onChange({ ...specification, ambientK: celsius === null ? undefined : celsius + ZERO_CELSIUS_K }, 'ambientK')
-        }
-      />
-    </Group>
+    </>
   );
 }

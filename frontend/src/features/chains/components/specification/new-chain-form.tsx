@@ -22,6 +22,11 @@ export function NewChainForm({ projectId, currency }: { projectId: string; curre
   const [specification, setSpecification] = useState<Specification>(EMPTY_SPECIFICATION);
   const [tried, setTried] = useState(false);
   const messages = fieldMessages(create.error);
+  // What was refused may be right by now: the server is asked again, not quoted.
+  const edit = (next: Specification): void => {
+    setSpecification(next);
+    if (create.error) create.reset();
+  };
   const typed = name !== '' || specification !== EMPTY_SPECIFICATION;
 
   const submit = (event: FormEvent<HTMLFormElement>): void => {
@@ -48,7 +53,7 @@ export function NewChainForm({ projectId, currency }: { projectId: string; curre
       />
       <SpecificationForm
         specification={specification}
-        onChange={setSpecification}
+        onChange={edit}
         messages={specificationMessages(messages)}
         currency={currency}
       />

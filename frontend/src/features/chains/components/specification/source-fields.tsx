@@ -7,8 +7,8 @@ import { Group } from './group';
 import type { SpecificationFieldsProps } from './specification-form';
 
 const SOURCE_KINDS: readonly { value: Source['kind']; label: string }[] = [
-  { value: 'voltage', label: 'Voltage with series resistance' },
-  { value: 'current', label: 'Current (photodiode, coil, sensor)' },
+  { value: 'voltage', label: 'Voltage source' },
+  { value: 'current', label: 'Current source, as a photodiode' },
 ];
 
 const LEVEL_KINDS: readonly { value: LevelKind; label: string; unit: QuantityUnit }[] = [
