@@ -8,10 +8,22 @@ export default defineConfig({
   server: { proxy: { '/api': backendUrl } },
   build: { target: 'es2022', chunkSizeWarningLimit: 1000 },
   test: {
-    environment: 'jsdom',
-    setupFiles: ['src/testing/setup.ts'],
-    include: ['src/**/*.spec.{ts,tsx}'],
-    css: { modules: { classNameStrategy: 'non-scoped' } },
     restoreMocks: true,
+    css: { modules: { classNameStrategy: 'non-scoped' } },
+    // Generous, because the machine that runs them may be busy with the rest of the checks.
+    testTimeout: 30_000,
+    projects: [
+      // Pure helpers need no browser.
+      { extends: true, test: { name: 'helpers', environment: 'node', include: ['src/**/*.spec.ts'] } },
+      {
+        extends: true,
+        test: {
+          name: 'screens',
+          environment: 'jsdom',
+          setupFiles: ['src/testing/setup.ts'],
+          include: ['src/**/*.spec.tsx'],
+        },
+      },
+    ],
   },
 });

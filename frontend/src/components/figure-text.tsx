@@ -1,5 +1,6 @@
 import type { Figure, Verdict } from '../api/types';
 import { formatFigure, otherNotation } from '../lib/format-figure';
+import { classNames, FigureShell } from './figure-shell';
 import styles from './figure-text.module.css';
 
 export interface FigureTextProps {
@@ -24,47 +25,37 @@ export function figureHint(figure: Figure): string | undefined {
 }
 
 /** A figure with SI prefix and unit in tabular numerals; a dash with its reason when there is none. */
-export function FigureText({ figure, name, onOpen, tone, strong, hideUnit, className }: FigureTextProps) {
+export function FigureText({ figure, name = 'Figure', onOpen, tone, strong, hideUnit, className }: FigureTextProps) {
   const { text, number } = formatFigure(figure);
+  const known = figure.value !== null;
   const shown = hideUnit && figure.unit !== 'fraction' ? number : text;
-  const hint = figureHint(figure);
-  const classes = [
+  const classes = classNames(
     styles.figure,
-    tone ? styles[tone] : '',
-    strong ? styles.strong : '',
-    figure.value === null ? styles.missing : '',
-    className ?? '',
-  ].join(' ');
-  const content = (
-    <>
-      {shown}
-      {figure.assumed && figure.value !== null && (
-        <span className={styles.assumed} aria-hidden="true">
-          ~
-        </span>
-      )}
-      {figure.value === null && <span className="visually-hidden"> not known: {figure.reason}</span>}
-    </>
+    tone && styles[tone],
+    strong && styles.strong,
+    !known && styles.missing,
+    className,
   );
-  if (!onOpen) {
-    return (
-      <span className={classes} title={hint}>
-        {content}
-      </span>
-    );
-  }
   return (
-    <button
-      type="button"
-      className={`${classes} ${styles.button}`}
-      title={hint ? `${hint} · show the working` : 'Show the working'}
-      aria-label={`${name ?? 'Figure'} ${figure.value === null ? (figure.reason ?? 'not known') : text}, show the working`}
-      onClick={(event) => {
-        event.stopPropagation();
-        onOpen();
-      }}
+    <FigureShell
+      className={classes}
+      hint={figureHint(figure)}
+      spoken={`${name} ${known ? text : (figure.reason ?? 'not known')}`}
+      onOpen={onOpen}
     >
-      {content}
-    </button>
+      {shown}
+      <FigureRemark figure={figure} />
+    </FigureShell>
+  );
+}
+
+/** A tilde where a value was assumed; for screen readers, why there is no figure. */
+function FigureRemark({ figure }: { figure: Figure }) {
+  if (figure.value === null) return <span className="visually-hidden"> not known: {figure.reason}</span>;
+  if (!figure.assumed) return null;
+  return (
+    <span className={styles.assumed} aria-hidden="true">
+      ~
+    </span>
   );
 }

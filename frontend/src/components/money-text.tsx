@@ -1,5 +1,6 @@
 import type { Money } from '../api/types';
-import { formatMicros } from '../lib/money';
+import { formatMicros, formatMoney } from '../lib/money';
+import { classNames, FigureShell } from './figure-shell';
 import styles from './figure-text.module.css';
 
 export interface MoneyTextProps {
@@ -12,36 +13,19 @@ export interface MoneyTextProps {
 }
 
 /** An amount, exact; a dash with its reason when it is not known (never a zero). */
-export function MoneyText({ money, name, hideCurrency, strong, onOpen }: MoneyTextProps) {
-  const known = money.amountMicros !== null;
-  const amount = money.amountMicros === null ? '–' : formatMicros(money.amountMicros, money.currency);
-  const text = known && !hideCurrency ? `${amount}\u00a0${money.currency}` : amount;
-  const classes = `${styles.figure} ${strong ? styles.strong : ''} ${known ? '' : styles.missing}`;
-  const content = (
-    <>
-      {text}
-      {!known && <span className="visually-hidden"> not known: {money.reason}</span>}
-    </>
-  );
-  if (!onOpen) {
-    return (
-      <span className={classes} title={money.reason}>
-        {content}
-      </span>
-    );
-  }
+export function MoneyText({ money, name = 'Cost', hideCurrency, strong, onOpen }: MoneyTextProps) {
+  const { amountMicros, currency, reason } = money;
+  const full = formatMoney(money);
+  const known = amountMicros !== null;
   return (
-    <button
-      type="button"
-      className={`${classes} ${styles.button}`}
-      title={money.reason ?? 'Show the working'}
-      aria-label={`${name ?? 'Cost'} ${known ? `${amount} ${money.currency}` : (money.reason ?? 'not known')}, show the working`}
-      onClick={(event) => {
-        event.stopPropagation();
-        onOpen();
-      }}
+    <FigureShell
+      className={classNames(styles.figure, strong && styles.strong, !known && styles.missing)}
+      hint={reason}
+      spoken={`${name} ${known ? full : (reason ?? 'not known')}`}
+      onOpen={onOpen}
     >
-      {content}
-    </button>
+      {known && hideCurrency ? formatMicros(amountMicros, currency) : full}
+      {!known && <span className="visually-hidden"> not known: {reason}</span>}
+    </FigureShell>
   );
 }

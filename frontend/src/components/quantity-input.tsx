@@ -10,7 +10,7 @@ import {
   type QuantityLimits,
   type QuantityUnit,
 } from '../lib/quantity-units';
-import { describedBy, Field } from './field';
+import { describedBy, errorId, Field } from './field';
 import styles from './quantity-input.module.css';
 
 export interface QuantityInputProps extends QuantityLimits {
@@ -62,71 +62,104 @@ function needsTranslation(text: string, value: number, unit: QuantityUnit): bool
   return text.trim() !== '' && text.trim().replace('-', '−') !== toFieldText(value, unit) && Number.isFinite(value);
 }
 
+interface QuantityText {
+  readonly text: string;
+  /** What the field itself complains about. */
+  readonly ownMessage: string | null;
+  /** "= 4.70 kΩ" where what was typed says it otherwise. */
+  readonly understood: string | null;
+  readonly accept: (text: string) => void;
+}
+
+/** What is typed beside the value that it stands for. */
+function useQuantityText(props: QuantityInputProps): QuantityText {
+  const { unit, onChange } = props;
+  const value = props.value ?? null;
+  const shown = (): Typed => ({ text: toFieldText(value, unit), value, message: null });
+  const [typed, setTyped] = useState<Typed>(shown);
+  // Somebody else changed the value (undo, snapping, another row): show that instead of what was typed.
+  const current = Object.is(typed.value, value) ? typed : shown();
+  const translated = current.message === null && value !== null && needsTranslation(current.text, value, unit);
+  return {
+    text: current.text,
+    ownMessage: current.message,
+    understood: translated ? `= ${describeQuantity(value, unit)}` : null,
+    accept: (text) => {
+      const next = readTyped(text, props);
+      setTyped(next);
+      if (next.message === null && !Object.is(next.value, value)) onChange(next.value);
+    },
+  };
+}
+
 /**
  * A field for a quantity in engineering notation. Keeps what was typed, says what it understood, and names the limit
- * that was broken. A form finds an unreadable field by `aria-invalid`.
+ * that was broken. A form finds an unreadable field by `data-unreadable`.
  */
 export function QuantityInput(props: QuantityInputProps) {
-  const { label, ariaLabel, unit, onChange, required, error, hint, suffix, placeholder, disabled, bare, onBlur } =
-    props;
   const generatedId = useId();
   const id = props.id ?? generatedId;
-  const value = props.value ?? null;
-  const [typed, setTyped] = useState<Typed>(() => ({ text: toFieldText(value, unit), value, message: null }));
-
-  // Somebody else changed the value (undo, snapping, another row): show that instead of what was typed.
-  const current: Typed = Object.is(typed.value, value)
-    ? typed
-    : { text: toFieldText(value, unit), value, message: null };
-
-  const accept = (text: string): void => {
-    const next = readTyped(text, props);
-    setTyped(next);
-    if (next.message === null && !Object.is(next.value, value)) onChange(next.value);
-  };
-
-  const message = current.message ?? error ?? null;
-  const understood =
-    message === null && value !== null && needsTranslation(current.text, value, unit)
-      ? `= ${describeQuantity(value, unit)}`
-      : null;
-  const control = (
-    <Input
-      id={id}
-      className={styles.input}
-      value={current.text}
-      onChange={(event) => accept(event.target.value)}
-      onBlur={onBlur}
-      placeholder={placeholder}
-      disabled={disabled}
-      autoFocus={props.autoFocus}
-      inputMode="text"
-      autoComplete="off"
-      spellCheck={false}
-      status={message ? 'error' : undefined}
-      aria-invalid={message ? true : undefined}
-      data-unreadable={current.message ? true : undefined}
-      aria-required={required || undefined}
-      aria-label={bare ? (ariaLabel ?? String(label)) : ariaLabel}
-      aria-describedby={bare ? undefined : describedBy(id, message, understood ?? hint)}
-      title={bare ? (message ?? understood ?? undefined) : undefined}
-      suffix={<span className={styles.unit}>{suffix ?? unitLabel(unit)}</span>}
-    />
-  );
-  if (bare) return <BareControl message={message}>{control}</BareControl>;
+  const quantity = useQuantityText(props);
+  const message = quantity.ownMessage ?? props.error ?? null;
+  const hint = message ? null : (quantity.understood ?? props.hint);
+  const control = <QuantityControl {...props} id={id} quantity={quantity} message={message} hint={hint} />;
+  if (props.bare) {
+    return (
+      <BareControl id={id} message={message}>
+        {control}
+      </BareControl>
+    );
+  }
   return (
-    <Field id={id} label={label} required={required && !props.quietRequired} error={message} hint={understood ?? hint}>
+    <Field id={id} label={props.label} required={props.required && !props.quietRequired} error={message} hint={hint}>
       {control}
     </Field>
   );
 }
 
-function BareControl({ message, children }: { message: string | null; children: ReactNode }) {
+/** In a bare field the label is nowhere to be seen. */
+function spokenName({ bare, ariaLabel, label }: QuantityInputProps): string | undefined {
+  return bare ? (ariaLabel ?? String(label)) : ariaLabel;
+}
+
+interface QuantityControlProps extends QuantityInputProps {
+  id: string;
+  quantity: QuantityText;
+  message: string | null;
+}
+
+function QuantityControl({ id, quantity, message, hint, ...props }: QuantityControlProps) {
+  const described = describedBy(id, message, props.bare ? null : hint);
+  return (
+    <Input
+      id={id}
+      className={styles.input}
+      value={quantity.text}
+      onChange={(event) => quantity.accept(event.target.value)}
+      onBlur={props.onBlur}
+      placeholder={props.placeholder}
+      disabled={props.disabled}
+      autoFocus={props.autoFocus}
+      autoComplete="off"
+      spellCheck={false}
+      status={message ? 'error' : undefined}
+      aria-invalid={message ? true : undefined}
+      data-unreadable={quantity.ownMessage ? true : undefined}
+      aria-required={props.required || undefined}
+      aria-label={spokenName(props)}
+      aria-describedby={described}
+      title={props.bare ? (quantity.understood ?? undefined) : undefined}
+      suffix={<span className={styles.unit}>{props.suffix ?? unitLabel(props.unit)}</span>}
+    />
+  );
+}
+
+function BareControl({ id, message, children }: { id: string; message: string | null; children: ReactNode }) {
   return (
     <div className={styles.bare}>
       {children}
       {message && (
-        <div className={styles.bareError} role="alert">
+        <div id={errorId(id)} className={styles.bareError} role="alert">
           {message}
         </div>
       )}

@@ -121,27 +121,32 @@ function sameUnit(typed: string, unit: string, kind: QuantityKind): boolean {
 
 const UNIT_EXPONENTS: Readonly<Record<string, number>> = { 'V/us': 6, 'V/ns': 9 };
 
-interface Suffix {
-  readonly exponent: number;
-  readonly hasUnit: boolean;
+/** Prefixes that a kind takes, kilo also in capital. */
+function prefixesOf(rule: KindRule): readonly string[] {
+  return ['', ...(rule.prefixes.includes('k') ? ['K'] : []), ...rule.prefixes];
 }
 
-/** What follows the number: nothing, a prefix, a unit, or both. */
-function readSuffix(suffix: string, kind: QuantityKind): Suffix | ParsedQuantity {
+const exponentOf = (prefix: string): number => PREFIX_EXPONENTS[prefix === 'K' ? 'k' : prefix] ?? 0;
+
+/** The power of ten when `suffix` is just this prefix with this unit, else null. */
+function exponentIfMatches(suffix: string, prefix: string, unit: string, kind: QuantityKind): number | null {
+  if (!suffix.startsWith(prefix)) return null;
+  const rest = suffix.slice(prefix.length);
+  const matches = unit === '' ? rest === '' : sameUnit(rest, unit, kind);
+  return matches ? exponentOf(prefix) + (UNIT_EXPONENTS[unit] ?? 0) : null;
+}
+
+/** What follows the number: nothing, a prefix, a unit, or both. Its power of ten, or why it is refused. */
+function readSuffix(text: string, kind: QuantityKind): number | ParsedQuantity {
   const rule = KIND_RULES[kind];
-  if (suffix === '') return { exponent: 0, hasUnit: false };
-  const withoutMega = suffix.replace(/^meg/i, 'M');
+  const suffix = text.replace(/^meg/i, 'M');
   for (const unit of ['', ...rule.units]) {
-    for (const prefix of ['', 'k', 'K', ...rule.prefixes]) {
-      const kilo = prefix.toLowerCase() === 'k';
-      if (kilo && !rule.prefixes.includes('k')) continue;
-      const rest = withoutMega.startsWith(prefix) ? withoutMega.slice(prefix.length) : null;
-      if (rest === null || (unit === '' ? rest !== '' : !sameUnit(rest, unit, kind))) continue;
-      const prefixExponent = PREFIX_EXPONENTS[kilo ? 'k' : prefix] ?? 0;
-      return { exponent: prefixExponent + (UNIT_EXPONENTS[unit] ?? 0), hasUnit: unit !== '' };
+    for (const prefix of prefixesOf(rule)) {
+      const exponent = exponentIfMatches(suffix, prefix, unit, kind);
+      if (exponent !== null) return exponent;
     }
   }
-  return refuseSuffix(withoutMega, rule);
+  return refuseSuffix(suffix, rule);
 }
 
 function refuseSuffix(suffix: string, rule: KindRule): ParsedQuantity {
@@ -158,19 +163,21 @@ function refuseSuffix(suffix: string, rule: KindRule): ParsedQuantity {
   return refuse('unreadable', `“${suffix}” is not understood. Write it like ${rule.example}.`);
 }
 
+/** The power of ten of a letter that stands for the decimal point, or null. */
+function infixExponent(letter: string, kind: QuantityKind): number | null {
+  if (letter === 'R') return kind === 'resistance' || kind === 'transimpedance' ? 0 : null;
+  return prefixesOf(KIND_RULES[kind]).includes(letter) ? exponentOf(letter) : null;
+}
+
 /** `4k7`, `4R7`, `2n2`: the prefix stands for the decimal point. */
 function readInfix(text: string, kind: QuantityKind): ParsedQuantity | null {
-  const match = /^([+-]?\d+)([a-zA-Z])(\d+)\s?(.*)$/.exec(text);
+  const match = /^([+-]?\d+)([a-df-zA-DF-Z])(\d+)\s?(.*)$/.exec(text);
   if (!match) return null;
   const [, whole = '', letter = '', fraction = '', unit = ''] = match;
   const rule = KIND_RULES[kind];
-  const resistive = kind === 'resistance' || kind === 'transimpedance';
-  if (letter === 'e' || letter === 'E') return null;
   if (unit !== '' && !rule.units.some((own) => sameUnit(unit, own, kind))) return refuseSuffix(unit, rule);
-  if (letter === 'R' && resistive) return finite(`${whole}.${fraction}`, 0, kind);
-  const prefix = letter === 'K' ? 'k' : letter;
-  if (!rule.prefixes.includes(prefix)) return refuseSuffix(letter, rule);
-  return finite(`${whole}.${fraction}`, PREFIX_EXPONENTS[prefix] ?? 0, kind);
+  const exponent = infixExponent(letter, kind);
+  return exponent === null ? refuseSuffix(letter, rule) : finite(`${whole}.${fraction}`, exponent, kind);
 }
 
 /** Gains: `x10`, `×10`, `20 dB`; transimpedance `100 dBΩ`. Null: not written that way. */
@@ -200,13 +207,17 @@ export function parseQuantity(text: string, kind: QuantityKind, bareExponent = 0
   if (pointed === null) {
     return refuse('unreadable', 'The comma can be read in two ways. Write 1200 or 1.2.');
   }
-  const special = readGain(pointed, kind) ?? readInfix(pointed, kind);
-  if (special) return special;
-  const match = /^([+-]?(?:\d+\.?\d*|\.\d+)(?:e[+-]?\d+)?)\s?(.*)$/i.exec(pointed);
-  if (!match) return refuse('unreadable', `“${text.trim()}” is not understood. Write it like ${rule.example}.`);
+  return readGain(pointed, kind) ?? readInfix(pointed, kind) ?? readPlain(pointed, kind, bareExponent);
+}
+
+/** A number with what follows it. */
+function readPlain(text: string, kind: QuantityKind, bareExponent: number): ParsedQuantity {
+  const match = /^([+-]?(?:\d+\.?\d*|\.\d+)(?:e[+-]?\d+)?)\s?(.*)$/i.exec(text);
+  if (!match) {
+    return refuse('unreadable', `“${text}” is not understood. Write it like ${KIND_RULES[kind].example}.`);
+  }
   const [, mantissa = '', rest = ''] = match;
-  const suffix = readSuffix(rest.trim(), kind);
-  if ('ok' in suffix) return suffix;
-  const bare = rest === '';
-  return finite(mantissa, bare ? bareExponent : suffix.exponent, kind);
+  if (rest === '') return finite(mantissa, bareExponent, kind);
+  const exponent = readSuffix(rest.trim(), kind);
+  return typeof exponent === 'number' ? finite(mantissa, exponent, kind) : exponent;
 }

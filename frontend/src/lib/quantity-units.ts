@@ -82,19 +82,28 @@ function scaled(value: number, exponent: number): number {
 
 const withoutTrailingZeros = (text: string): string => (text.includes('.') ? text.replace(/\.?0+$/, '') : text);
 
+/** Whether a bare number in the field's unit has few zeros. */
+function isComfortable(bare: number, rule: UnitRule): boolean {
+  if (bare === 0 || rule.base === null) return true;
+  const size = Math.abs(bare);
+  return size >= 0.01 && size < (rule.exponent === 0 ? 1000 : 100_000);
+}
+
+/** "4.7k" in a field of Ω, "1 µF" in one of pF. */
+function withPrefix(value: number, base: string, exponent: number): string {
+  const { number, unit } = formatSi(value, base, SIGNIFICANT);
+  const digits = withoutTrailingZeros(number);
+  const prefix = unit.slice(0, unit.length - base.length);
+  return prefix !== '' && exponent === 0 ? `${digits}${prefix}` : `${digits} ${unit}`;
+}
+
 /** The text a field starts with: a bare number in its unit, or with a prefix where that would have many zeros. */
 export function toFieldText(value: number | null | undefined, unit: QuantityUnit): string {
   if (value === null || value === undefined || !Number.isFinite(value)) return '';
   const rule: UnitRule = QUANTITY_UNITS[unit];
   const bare = scaled(value, rule.exponent);
-  const size = Math.abs(bare);
-  const comfortable =
-    size === 0 || rule.base === null || (size >= 0.01 && size < (rule.exponent === 0 ? 1000 : 100_000));
-  if (comfortable) return withoutTrailingZeros(formatSignificant(bare, SIGNIFICANT));
-  const { number, unit: prefixed } = formatSi(value, rule.base ?? '', SIGNIFICANT);
-  const prefix = prefixed.slice(0, prefixed.length - (rule.base?.length ?? 0));
-  const digits = withoutTrailingZeros(number);
-  return prefix !== '' && rule.exponent === 0 ? `${digits}${prefix}` : `${digits} ${prefixed}`;
+  if (isComfortable(bare, rule)) return withoutTrailingZeros(formatSignificant(bare, SIGNIFICANT));
+  return withPrefix(value, rule.base ?? '', rule.exponent);
 }
 
 /** What was understood, in full: "4.7 kΩ". */

@@ -1,6 +1,9 @@
 import '@testing-library/jest-dom/vitest';
-import { cleanup } from '@testing-library/react';
+import { cleanup, configure } from '@testing-library/react';
 import { afterEach, vi } from 'vitest';
+
+// Waits end as soon as what is waited for is there; this is only the limit.
+configure({ asyncUtilTimeout: 10_000 });
 
 afterEach(() => {
   cleanup();

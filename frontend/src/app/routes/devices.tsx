@@ -2,6 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import { Button } from 'antd';
 import { useSearchParams } from 'react-router-dom';
 
+import type { DeviceList } from '../../api/types';
 import { EmptyState } from '../../components/empty-state';
 import { ErrorNotice } from '../../components/error-notice';
 import { LinkButton } from '../../components/link-button';
@@ -25,44 +26,54 @@ export function Component() {
   const [search, setSearch] = useSearchParams();
   const filters = readFilters(search);
   const { data, error, refetch, isPlaceholderData } = useQuery(devicesQuery(filters));
-  const mayCreate = useHasRole('designer', 'lead');
   const change = (next: DeviceFilters): void => setSearch(writeFilters(next), { replace: true });
-  const empty = data?.total === 0 && !isPlaceholderData;
-  const create = (
+  const bare = data?.total === 0 && !isPlaceholderData && !isNarrowed(filters);
+  return (
+    <Page wide>
+      <PageHeader title="Devices" extra={bare ? null : <EnterDevice />} />
+      {!bare && <DeviceFilterBar filters={filters} onChange={change} />}
+      <ErrorNotice error={error} title="The devices could not be loaded." onRetry={() => void refetch()} />
+      {!data && !error && <SkeletonRows rows={8} />}
+      {data && <DeviceResults data={data} stale={isPlaceholderData} filters={filters} onChange={change} />}
+    </Page>
+  );
+}
+
+function EnterDevice() {
+  const mayCreate = useHasRole('designer', 'lead');
+  if (!mayCreate) return null;
+  return (
     <LinkButton to="/devices/new" type="primary">
       Enter a device
     </LinkButton>
   );
+}
+
+interface DeviceResultsProps {
+  data: DeviceList;
+  /** The rows are of the question before. */
+  stale: boolean;
+  filters: DeviceFilters;
+  onChange: (filters: DeviceFilters) => void;
+}
+
+function DeviceResults({ data, stale, filters, onChange }: DeviceResultsProps) {
+  if (data.total === 0 && stale) return <SkeletonRows rows={8} />;
+  if (data.total === 0) return <NoDevices narrowed={isNarrowed(filters)} onClear={() => onChange(NO_FILTERS)} />;
   return (
-    <Page wide>
-      <PageHeader title="Devices" extra={mayCreate && !(empty && !isNarrowed(filters)) ? create : null} />
-      {!(empty && !isNarrowed(filters)) && <DeviceFilterBar filters={filters} onChange={change} />}
-      <ErrorNotice error={error} title="The devices could not be loaded." onRetry={() => void refetch()} />
-      {!data && !error && <SkeletonRows rows={8} />}
-      {empty && (
-        <NoDevices
-          narrowed={isNarrowed(filters)}
-          action={mayCreate ? create : null}
-          onClear={() => change(NO_FILTERS)}
-        />
-      )}
-      {data && data.total > 0 && (
-        <>
-          <DeviceTable devices={data.items} filters={filters} onChange={change} stale={isPlaceholderData} />
-          <Pager page={filters.page} total={data.total} onChange={(page) => change({ ...filters, page })} />
-        </>
-      )}
-    </Page>
+    <>
+      <DeviceTable devices={data.items} filters={filters} onChange={onChange} stale={stale} />
+      <Pager page={filters.page} total={data.total} onChange={(page) => onChange({ ...filters, page })} />
+    </>
   );
 }
 
 interface NoDevicesProps {
   narrowed: boolean;
-  action: React.ReactNode;
   onClear: () => void;
 }
 
-function NoDevices({ narrowed, action, onClear }: NoDevicesProps) {
+function NoDevices({ narrowed, onClear }: NoDevicesProps) {
   if (narrowed) {
     return (
       <EmptyState title="No device matches these filters" action={<Button onClick={onClear}>Clear filters</Button>}>
@@ -71,7 +82,7 @@ function NoDevices({ narrowed, action, onClear }: NoDevicesProps) {
     );
   }
   return (
-    <EmptyState title="The library is empty" action={action}>
+    <EmptyState title="The library is empty" action={<EnterDevice />}>
       Enter the first device from its datasheet. Its gain-bandwidth product is enough to start with.
     </EmptyState>
   );

@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { Navigate, useSearchParams } from 'react-router-dom';
 
+import type { Session } from '../../api/types';
 import { ErrorNotice } from '../../components/error-notice';
 import { DemoPeople } from '../../features/session/components/demo-people';
 import { SessionCard } from '../../features/session/components/session-card';
@@ -14,13 +15,21 @@ const ownPath = (path: string | null): string => (path && /^\/(?![/\\])/.test(pa
 export function Component() {
   const [params] = useSearchParams();
   const { data: session, error, refetch } = useQuery(sessionQuery());
-  if (session?.user) return <Navigate to={ownPath(params.get('from'))} replace />;
-  if (session?.setupNeeded) return <Navigate to="/setup" replace />;
-  if (!session && !error) return <PageSkeleton />;
+  if (session) return <SignInPage session={session} from={ownPath(params.get('from'))} />;
+  if (!error) return <PageSkeleton />;
   return (
     <SessionCard title="Sign in">
-      <ErrorNotice error={session ? null : error} onRetry={() => void refetch()} />
-      {session?.demo && session.demoAccounts.length > 0 && <DemoPeople accounts={session.demoAccounts} />}
+      <ErrorNotice error={error} onRetry={() => void refetch()} />
+    </SessionCard>
+  );
+}
+
+function SignInPage({ session, from }: { session: Session; from: string }) {
+  if (session.user) return <Navigate to={from} replace />;
+  if (session.setupNeeded) return <Navigate to="/setup" replace />;
+  return (
+    <SessionCard title="Sign in">
+      {session.demoAccounts.length > 0 && <DemoPeople accounts={session.demoAccounts} />}
       <SignInForm />
     </SessionCard>
   );

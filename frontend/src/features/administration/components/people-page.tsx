@@ -20,12 +20,8 @@ interface ShownLink {
 }
 
 export function PeoplePage() {
-  const { data: people, error, refetch } = useQuery(usersQuery());
   const [inviting, setInviting] = useState(false);
-  const [editing, setEditing] = useState<UserRow | null>(null);
   const [shown, setShown] = useState<ShownLink | null>(null);
-  const makeLink = useLinkFor(setShown);
-  const editedNow = editing && (people?.find((person) => person.id === editing.id) ?? editing);
   return (
     <>
       <PageHeader
@@ -48,11 +44,23 @@ export function PeoplePage() {
           }}
         />
       )}
+      <PeopleList onLink={setShown} />
+      <OneTimeLink name={shown?.name ?? ''} link={shown?.link ?? null} onClose={() => setShown(null)} />
+    </>
+  );
+}
+
+function PeopleList({ onLink }: { onLink: (shown: ShownLink) => void }) {
+  const { data: people, error, refetch } = useQuery(usersQuery());
+  const [editingId, setEditingId] = useState<string | null>(null);
+  const makeLink = useLinkFor(onLink);
+  const editing = people?.find((person) => person.id === editingId);
+  return (
+    <>
       <ErrorNotice error={error} title="The people could not be loaded." onRetry={() => void refetch()} />
       {!people && !error && <SkeletonRows />}
-      {people && <PeopleTable people={people} onEdit={setEditing} onLink={makeLink} />}
-      {editedNow && <EditPerson key={editedNow.id} person={editedNow} onClose={() => setEditing(null)} />}
-      <OneTimeLink name={shown?.name ?? ''} link={shown?.link ?? null} onClose={() => setShown(null)} />
+      {people && <PeopleTable people={people} onEdit={({ id }) => setEditingId(id)} onLink={makeLink} />}
+      {editing && <EditPerson key={editing.id} person={editing} onClose={() => setEditingId(null)} />}
     </>
   );
 }

@@ -1,5 +1,5 @@
 import { Input } from 'antd';
-import { useId } from 'react';
+import { memo, useId } from 'react';
 
 import { QuantityInput } from '../../../components/quantity-input';
 
@@ -13,7 +13,8 @@ interface SheetRowProps {
   field: DeviceField;
   sheet: SheetDraft | undefined;
   problems: Problems;
-  onChange: (sheet: SheetDraft) => void;
+  /** Must stay the same function: rows that nobody types in are not drawn again. */
+  onChange: (key: string, sheet: SheetDraft) => void;
 }
 
 const COLUMN_NAMES: Readonly<Record<Column, string>> = { min: 'minimum', typ: 'typical', max: 'maximum' };
@@ -21,7 +22,8 @@ const COLUMN_NAMES: Readonly<Record<Column, string>> = { min: 'minimum', typ: 't
 const labelOf = (field: DeviceField): string => (field.symbol ? `${field.label} (${field.symbol})` : field.label);
 
 /** A row as datasheets have it: quantity, min, typ, max, condition, page. */
-export function SheetRow({ field, sheet = EMPTY_SHEET, problems, onChange }: SheetRowProps) {
+export const SheetRow = memo(function SheetRow({ field, sheet = EMPTY_SHEET, problems, onChange }: SheetRowProps) {
+  const change = (part: Partial<SheetDraft>): void => onChange(field.key, { ...sheet, ...part });
   const offered = ALL.filter((column) => field.columns.includes(column) || sheet[column] !== null);
   const filled = ALL.some((column) => sheet[column] !== null);
   return (
@@ -39,7 +41,7 @@ export function SheetRow({ field, sheet = EMPTY_SHEET, problems, onChange }: She
               placeholder={column}
               value={sheet[column]}
               error={problems[`${field.key}.${column}`]}
-              onChange={(value) => onChange({ ...sheet, [column]: value })}
+              onChange={(value) => change({ [column]: value })}
             />
           )}
         </div>
@@ -51,7 +53,7 @@ export function SheetRow({ field, sheet = EMPTY_SHEET, problems, onChange }: She
         maxLength={120}
         value={sheet.condition}
         error={problems[`${field.key}.condition`]}
-        onChange={(condition) => onChange({ ...sheet, condition })}
+        onChange={(condition) => change({ condition })}
       />
       <TextCell
         label={`${field.label}, datasheet page`}
@@ -60,21 +62,21 @@ export function SheetRow({ field, sheet = EMPTY_SHEET, problems, onChange }: She
         maxLength={24}
         value={sheet.page}
         error={problems[`${field.key}.page`]}
-        onChange={(page) => onChange({ ...sheet, page })}
+        onChange={(page) => change({ page })}
       />
     </div>
   );
-}
+});
 
 interface NumberRowProps {
   field: DeviceField;
   value: number | null;
   problems: Problems;
-  onChange: (value: number | null) => void;
+  onChange: (key: string, value: number | null) => void;
 }
 
 /** A row with one number, without columns. */
-export function NumberRow({ field, value, problems, onChange }: NumberRowProps) {
+export const NumberRow = memo(function NumberRow({ field, value, problems, onChange }: NumberRowProps) {
   return (
     <div className={styles.row} role="group" aria-label={labelOf(field)}>
       <RowLabel field={field} filled={value !== null} />
@@ -88,12 +90,12 @@ export function NumberRow({ field, value, problems, onChange }: NumberRowProps) 
           placeholder={field.placeholder}
           value={value}
           error={problems[field.key]}
-          onChange={onChange}
+          onChange={(next) => onChange(field.key, next)}
         />
       </div>
     </div>
   );
-}
+});
 
 function RowLabel({ field, filled, error }: { field: DeviceField; filled: boolean; error?: string }) {
   return (

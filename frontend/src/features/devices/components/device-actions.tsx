@@ -1,4 +1,4 @@
-import { App, Button } from 'antd';
+import { App, Button, Modal } from 'antd';
 import { useNavigate } from 'react-router-dom';
 
 import { isApiError } from '../../../api/api-error';
@@ -55,25 +55,43 @@ function DeleteButton({ device }: { device: DeviceDto }) {
   const { modal } = App.useApp();
   const navigate = useNavigate();
   const remove = useDeleteDevice();
-  const explain = (error: unknown): void => {
-    const uses = usesOf(error);
-    void modal.error({
-      title: `${device.partNumber} was not deleted`,
-      width: 560,
-      content: uses ? <UseList uses={uses} /> : messageOf(error),
-    });
-  };
   const ask = (): void =>
     void modal.confirm({
       title: `Delete ${device.partNumber}?`,
       content: 'Its values and its quote are deleted with it. This cannot be undone.',
       okText: 'Delete',
       okButtonProps: { danger: true },
-      onOk: () => remove.mutate(device, { onSuccess: () => void navigate('/devices'), onError: explain }),
+      onOk: () => remove.mutate(device, { onSuccess: () => void navigate('/devices') }),
     });
   return (
-    <Button danger loading={remove.isPending} onClick={ask}>
-      Delete
-    </Button>
+    <>
+      <Button danger loading={remove.isPending} onClick={ask}>
+        Delete
+      </Button>
+      <RefusedDelete device={device} error={remove.error} onClose={() => remove.reset()} />
+    </>
+  );
+}
+
+interface RefusedDeleteProps {
+  device: DeviceDto;
+  error: unknown;
+  onClose: () => void;
+}
+
+/** Names the stages that use the device; its links need the router, so it is drawn in place. */
+function RefusedDelete({ device, error, onClose }: RefusedDeleteProps) {
+  const uses = usesOf(error);
+  return (
+    <Modal
+      open={Boolean(error)}
+      title={`${device.partNumber} was not deleted`}
+      width={560}
+      onCancel={onClose}
+      footer={<Button onClick={onClose}>Close</Button>}
+    >
+      <p>{uses ? 'It is used in:' : messageOf(error)}</p>
+      {uses && <UseList uses={uses} />}
+    </Modal>
   );
 }

@@ -1,5 +1,5 @@
 import { Button } from 'antd';
-import { useState, type FormEvent } from 'react';
+import { useCallback, useMemo, useState, type FormEvent } from 'react';
 
 import { fieldMessages, isApiError } from '../../../api/api-error';
 import type { DeviceDto } from '../../../api/types';
@@ -10,7 +10,7 @@ import { LeaveGuard } from '../../../components/leave-guard';
 import { LinkButton } from '../../../components/link-button';
 import { Section } from '../../../components/section';
 import { TextField } from '../../../components/text-field';
-import { deviceProblems, draftOf, type DeviceDraft } from '../lib/device-draft';
+import { deviceProblems, draftOf, type DeviceDraft, type SheetDraft } from '../lib/device-draft';
 import { FIELD_GROUPS } from '../lib/device-fields';
 import type { DeviceFieldGroup } from '../lib/device-field';
 import { NumberRow, SheetRow } from './datasheet-row';
@@ -36,37 +36,53 @@ function newerDevice(error: unknown): DeviceDto | null {
   return isApiError(error) && error.isStale ? ((error.details.current as DeviceDto | undefined) ?? null) : null;
 }
 
-/** Copies a datasheet: identity, then the values group by group as datasheets print them. */
-export function DeviceForm(props: DeviceFormProps) {
-  const { initial, saving, saved, error } = props;
+type Problems = Readonly<Record<string, string>>;
+type SetSheet = (key: string, sheet: SheetDraft) => void;
+type SetNumber = (key: string, value: number | null) => void;
+
+const NO_PROBLEMS: Problems = {};
+
+/** The same object while there is nothing to complain about, so that rows can tell. */
+function useShownProblems(error: unknown, own: Problems | null): Problems {
+  const fromServer = useMemo(() => fieldMessages(error), [error]);
+  if (own === null) return Object.keys(fromServer).length > 0 ? fromServer : NO_PROBLEMS;
+  return { ...fromServer, ...own };
+}
+
+/** The draft, and setters that stay the same while rows are typed in. */
+function useDeviceDraft(initial: DeviceDraft) {
   const [draft, setDraft] = useState(initial);
   const [start, setStart] = useState(initial);
+  const setSheet = useCallback<SetSheet>((key, sheet) => {
+    setDraft((before) => ({ ...before, sheets: { ...before.sheets, [key]: sheet } }));
+  }, []);
+  const setNumber = useCallback<SetNumber>((key, value) => {
+    setDraft((before) => ({ ...before, numbers: { ...before.numbers, [key]: value } }));
+  }, []);
+  const restart = (from: DeviceDraft): void => {
+    setDraft(from);
+    setStart(from);
+  };
+  return { draft, setDraft, setSheet, setNumber, restart, dirty: draft !== start };
+}
+
+/** Copies a datasheet: identity, then the values group by group as datasheets print them. */
+export function DeviceForm(props: DeviceFormProps) {
+  const { saving, saved, error, onSubmit } = props;
+  const { draft, setDraft, setSheet, setNumber, restart, dirty } = useDeviceDraft(props.initial);
   const [tried, setTried] = useState(false);
-  const newer = newerDevice(error);
   const own = deviceProblems(draft);
-  const problems = { ...fieldMessages(error), ...(tried ? own : {}) };
+  const problems = useShownProblems(error, tried ? own : null);
   const submit = (event: FormEvent<HTMLFormElement>): void => {
     event.preventDefault();
     setTried(true);
     if (focusFirstProblem(event.currentTarget, Object.keys(own).length > 0)) return;
-    props.onSubmit(draft);
-  };
-  const takeTheirs = (theirs: DeviceDto): void => {
-    setDraft(draftOf(theirs));
-    setStart(draftOf(theirs));
-    props.onTakeTheirs?.(theirs);
+    onSubmit(draft);
   };
   return (
     <form onSubmit={submit} noValidate>
-      <LeaveGuard when={draft !== start && !saving && !saved} />
-      <ConflictDialog
-        open={newer !== null}
-        what={`The device ${draft.partNumber}`}
-        saving={saving}
-        onKeepMine={() => newer && props.onSaveOver?.(draft, newer)}
-        onTakeTheirs={() => newer && takeTheirs(newer)}
-        onClose={() => props.onCloseConflict?.()}
-      />
+      <LeaveGuard when={dirty && !saving && !saved} />
+      <DeviceConflict form={props} draft={draft} onRestart={restart} />
       <DeviceIdentity draft={draft} onChange={setDraft} problems={problems} kindFixed={props.kindFixed} />
       <p className={styles.guide}>
         Type values as the datasheet prints them: <kbd>75</kbd> counts in the unit shown, <kbd>1.2G</kbd> or{' '}
@@ -74,13 +90,7 @@ export function DeviceForm(props: DeviceFormProps) {
         known.
       </p>
       {FIELD_GROUPS[draft.kind].map((group) => (
-        <ValueGroup
-          key={`${draft.kind} ${group.title}`}
-          group={group}
-          draft={draft}
-          onChange={setDraft}
-          problems={problems}
-        />
+        <ValueGroup key={`${draft.kind} ${group.title}`} {...{ group, draft, problems, setSheet, setNumber }} />
       ))}
       <Section title="Notes">
         <TextField
@@ -97,20 +107,46 @@ export function DeviceForm(props: DeviceFormProps) {
           {props.submitLabel}
         </Button>
         <LinkButton to={props.cancelTo}>Cancel</LinkButton>
-        {!newer && <ErrorNotice error={error} title="The device was not saved." />}
+        <ErrorNotice error={newerDevice(error) ? null : error} title="The device was not saved." />
       </div>
     </form>
+  );
+}
+
+interface DeviceConflictProps {
+  form: DeviceFormProps;
+  draft: DeviceDraft;
+  onRestart: (from: DeviceDraft) => void;
+}
+
+/** Somebody else saved in between: theirs or mine. */
+function DeviceConflict({ form, draft, onRestart }: DeviceConflictProps) {
+  const newer = newerDevice(form.error);
+  const takeTheirs = (theirs: DeviceDto): void => {
+    onRestart(draftOf(theirs));
+    form.onTakeTheirs?.(theirs);
+  };
+  return (
+    <ConflictDialog
+      open={newer !== null}
+      what={`The device ${draft.partNumber}`}
+      saving={form.saving}
+      onKeepMine={() => newer && form.onSaveOver?.(draft, newer)}
+      onTakeTheirs={() => newer && takeTheirs(newer)}
+      onClose={() => form.onCloseConflict?.()}
+    />
   );
 }
 
 interface ValueGroupProps {
   group: DeviceFieldGroup;
   draft: DeviceDraft;
-  onChange: (draft: DeviceDraft) => void;
-  problems: Readonly<Record<string, string>>;
+  problems: Problems;
+  setSheet: SetSheet;
+  setNumber: SetNumber;
 }
 
-function ValueGroup({ group, draft, onChange, problems }: ValueGroupProps) {
+function ValueGroup({ group, draft, problems, setSheet, setNumber }: ValueGroupProps) {
   return (
     <Section title={group.title}>
       <div className={styles.columnHeads} aria-hidden="true">
@@ -128,7 +164,7 @@ function ValueGroup({ group, draft, onChange, problems }: ValueGroupProps) {
             field={field}
             sheet={draft.sheets[field.key]}
             problems={problems}
-            onChange={(sheet) => onChange({ ...draft, sheets: { ...draft.sheets, [field.key]: sheet } })}
+            onChange={setSheet}
           />
         ) : (
           <NumberRow
@@ -136,7 +172,7 @@ function ValueGroup({ group, draft, onChange, problems }: ValueGroupProps) {
             field={field}
             value={draft.numbers[field.key] ?? null}
             problems={problems}
-            onChange={(value) => onChange({ ...draft, numbers: { ...draft.numbers, [field.key]: value } })}
+            onChange={setNumber}
           />
         ),
       )}

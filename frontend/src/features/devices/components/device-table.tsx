@@ -85,21 +85,14 @@ function SortHead({ sort, label, number, filters, onSort }: SortHeadProps) {
 }
 
 function DeviceTableRow({ device }: { device: DeviceDto }) {
-  const bandwidth = bandwidthOf(device);
-  const least = device.kind === 'voltage-feedback' ? device.minimumStableGain : undefined;
   return (
     <tr>
       <th scope="row">
         <Link to={`/devices/${device.id}`}>{device.partNumber}</Link> <GradeMark grade={device.grade} />
         {device.maker && <div className={styles.maker}>{device.maker}</div>}
       </th>
-      <td>
-        {KIND_LABELS[device.kind]}
-        {bandwidth && bandwidth.note !== '' && <div className="soft">{bandwidth.note}</div>}
-      </td>
-      <td className="number">{columnText(bandwidth?.sheet, 'min', 'MHz') || <Missing what="no minimum" />}</td>
-      <td className="number">{columnText(bandwidth?.sheet, 'typ', 'MHz') || <Missing what="no typical value" />}</td>
-      <td className="number">{least === undefined ? <Missing what="not given" /> : `×${least}`}</td>
+      <BandwidthCells device={device} />
+      <td className="number">{stableFromText(device) ?? <Missing what="not given" />}</td>
       <td className="number">{sheetText(device, 'slewRateVPerS', 'V/µs')}</td>
       <td className="number">{sheetText(device, 'supplyCurrentA', 'mA')}</td>
       <td className="number">{lowestPriceText(device.quote) ?? <Missing what="no quote" />}</td>
@@ -108,6 +101,27 @@ function DeviceTableRow({ device }: { device: DeviceDto }) {
       </td>
     </tr>
   );
+}
+
+/** Kind and bandwidth; the note says what stands there where a kind has no GBW. */
+function BandwidthCells({ device }: { device: DeviceDto }) {
+  const bandwidth = bandwidthOf(device);
+  return (
+    <>
+      <td>
+        {KIND_LABELS[device.kind]}
+        {bandwidth && bandwidth.note !== '' && <div className="soft">{bandwidth.note}</div>}
+      </td>
+      <td className="number">{columnText(bandwidth?.sheet, 'min', 'MHz') || <Missing what="no minimum" />}</td>
+      <td className="number">{columnText(bandwidth?.sheet, 'typ', 'MHz') || <Missing what="no typical value" />}</td>
+    </>
+  );
+}
+
+/** Smallest noise gain at which the maker calls it stable; null = not given. */
+function stableFromText(device: DeviceDto): string | null {
+  const least = device.kind === 'voltage-feedback' ? device.minimumStableGain : undefined;
+  return least === undefined ? null : `×${least}`;
 }
 
 /** The worst column that is given: minimum of what should be large, else typical. */

@@ -76,18 +76,26 @@ export function draftOf(device: DeviceDto): DeviceDraft {
   }
   return {
     kind: device.kind,
-    partNumber: device.partNumber,
-    maker: device.maker ?? '',
-    grade: device.grade,
-    package: device.package ?? '',
-    lifecycle: device.lifecycle ?? '',
-    lifecycleDate: device.lifecycleDate ?? '',
-    channels: device.channels,
-    datasheetRevision: device.datasheet?.revision ?? '',
-    datasheetTitle: device.datasheet?.title ?? '',
-    notes: device.notes ?? '',
+    ...identityOf(device),
     sheets,
     numbers,
+  };
+}
+
+const given = (value: string | undefined): string => value ?? '';
+
+function identityOf(device: DeviceDto): Omit<DeviceDraft, 'kind' | 'sheets' | 'numbers'> {
+  return {
+    partNumber: device.partNumber,
+    maker: given(device.maker),
+    grade: device.grade,
+    package: given(device.package),
+    lifecycle: device.lifecycle ?? '',
+    lifecycleDate: given(device.lifecycleDate),
+    channels: device.channels,
+    datasheetRevision: given(device.datasheet?.revision),
+    datasheetTitle: given(device.datasheet?.title),
+    notes: given(device.notes),
   };
 }
 
