@@ -1,5 +1,6 @@
 import { EngineInputError, calculate, curves, working } from './engine';
 import type { ChainInput, CurveRequest, EngineIssue, WorkingRequest } from './engine';
+import { warmUp } from './warm-up';
 
 export interface CalculationTask {
   readonly input: ChainInput;
@@ -33,3 +34,5 @@ export function refusable<T>(run: () => T): T | Refusal {
     throw error;
   }
 }
+
+warmUp((input) => runCalculation({ input }));

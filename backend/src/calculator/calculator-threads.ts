@@ -1,7 +1,7 @@
 import { availableParallelism } from 'node:os';
 import path from 'node:path';
 import { Injectable } from '@nestjs/common';
-import type { OnApplicationShutdown } from '@nestjs/common';
+import type { OnApplicationBootstrap, OnApplicationShutdown } from '@nestjs/common';
 import { Piscina } from 'piscina';
 import { InvalidError, TooManyRequestsError } from '../common/errors';
 import runCalculation from './calculation.worker';
@@ -16,26 +16,31 @@ const THREADS = Math.max(1, Math.min(4, availableParallelism()));
 /** With more than this waiting the server is overrun; newer requests are refused and asked to come again. */
 const MAX_WAITING = 256;
 
-/** A pool that starts its threads when it is first needed. */
+/** A pool whose threads are started, and kept, from the first moment that they may be needed. */
 class LazyPool<Task, Answer> {
   private pool: Piscina<Task, Answer> | null = null;
 
   constructor(
     private readonly file: string,
-    private readonly maxThreads: number,
+    private readonly threads: number,
   ) {}
 
-  async run(task: Task): Promise<Answer> {
+  start(): Piscina<Task, Answer> {
     this.pool ??= new Piscina({
       filename: path.join(COMPILED, this.file),
-      minThreads: 1,
-      maxThreads: this.maxThreads,
+      minThreads: this.threads,
+      maxThreads: this.threads,
       maxQueue: MAX_WAITING,
     });
-    if (this.pool.queueSize >= MAX_WAITING) {
+    return this.pool;
+  }
+
+  async run(task: Task): Promise<Answer> {
+    const pool = this.start();
+    if (pool.queueSize >= MAX_WAITING) {
       throw new TooManyRequestsError('server_busy', 'The calculator is busy. Try again in a moment.', 1);
     }
-    return this.pool.run(task);
+    return pool.run(task);
   }
 
   async destroy(): Promise<void> {
@@ -48,12 +53,18 @@ class LazyPool<Task, Answer> {
  * so it has a pool of its own and live previews never queue behind it.
  */
 @Injectable()
-export class CalculatorThreads implements OnApplicationShutdown {
+export class CalculatorThreads implements OnApplicationBootstrap, OnApplicationShutdown {
   private readonly previews = new LazyPool<CalculationTask, CalculationAnswer>('calculation.worker.js', THREADS);
-  private readonly trials = new LazyPool<CandidatesTask, CandidatesAnswer>('candidates.worker.js', THREADS);
+  private readonly trials = new LazyPool<CandidatesTask, CandidatesAnswer>('candidates.worker.js', 1);
+
+  onApplicationBootstrap(): void {
+    if (!RUNS_FROM_SOURCES) this.previews.start();
+  }
 
   /** The answer as JSON text. */
   async calculate(task: CalculationTask): Promise<string> {
+    // Whoever looks at a chain will soon try devices in it.
+    if (!RUNS_FROM_SOURCES) this.trials.start();
     return accepted(RUNS_FROM_SOURCES ? runCalculation(task) : await this.previews.run(task));
   }
 

@@ -2,6 +2,7 @@ import { refusable } from './calculation.worker';
 import type { Refusal } from './calculation.worker';
 import { tryDevices } from './engine';
 import type { ChainInput, Device } from './engine';
+import { warmUp } from './warm-up';
 
 export interface CandidatesTask {
   readonly input: ChainInput;
@@ -15,3 +16,5 @@ export type CandidatesAnswer = { readonly json: string } | Refusal;
 export default function runCandidates({ input, stageId, candidates }: CandidatesTask): CandidatesAnswer {
   return refusable(() => ({ json: JSON.stringify(tryDevices(input, stageId, candidates)) }));
 }
+
+warmUp((input) => runCandidates({ input, stageId: '2', candidates: input.devices }));
