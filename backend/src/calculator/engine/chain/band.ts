@@ -3,6 +3,8 @@ import type { ChainResponse } from './response';
 const BAND_POINTS = 101;
 const GOLDEN = (Math.sqrt(5) - 1) / 2;
 const GOLDEN_STEPS = 16;
+/** Share of a grid step by which an edge is left to see which way the gain goes. */
+const EDGE_STEP = 1e-3;
 
 /** Extremes of the chain's power over ideal within the band. */
 export interface BandExtremes {
@@ -10,6 +12,11 @@ export interface BandExtremes {
   readonly lowestPower: number;
   /** Where the lowest is. */
   readonly lowestHz: number;
+}
+
+interface Extreme {
+  readonly log: number;
+  readonly power: number;
 }
 
 /** Largest value of `sign`·power between two log frequencies, by golden section; `best` is the sample between them. */
@@ -69,9 +76,19 @@ export function bandExtremes(response: ChainResponse, lowHz: number, highHz: num
       lowestAt = index;
     }
   }
-  const top = refineExtreme(response, 1, logAt(highestAt - 1), logAt(highestAt + 1));
-  const bottom = refineExtreme(response, -1, logAt(lowestAt - 1), logAt(lowestAt + 1));
-  const sampledHz = lowestAt === BAND_POINTS - 1 ? highHz : lowestAt === 0 ? lowHz : Math.exp(logAt(lowestAt));
+  const around = (sign: 1 | -1, index: number, power: number): Extreme => {
+    const edge = index === 0 || index === BAND_POINTS - 1;
+    const inward = index === 0 ? 1 : -1;
+    const log = logAt(index);
+    // At an edge there is something to look for only where the gain still goes the same way inward.
+    if (edge && sign * response.chainPower(Math.exp(log + inward * step * EDGE_STEP)) <= sign * power)
+      return { log, power };
+    return refineExtreme(response, sign, logAt(index - 1), logAt(index + 1));
+  };
+  const top = around(1, highestAt, highest);
+  const bottom = around(-1, lowestAt, lowest);
+  const edgeHz = lowestAt === 0 ? lowHz : highHz;
+  const sampledHz = lowestAt === 0 || lowestAt === BAND_POINTS - 1 ? edgeHz : Math.exp(logAt(lowestAt));
   return {
     highestPower: Math.max(highest, top.power),
     lowestPower: Math.min(lowest, bottom.power),

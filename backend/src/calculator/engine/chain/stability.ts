@@ -5,8 +5,8 @@ import { stageSpan, StageSpan } from './stage-span';
 import type { ChainResponse } from './response';
 import { powerToDb } from '../units';
 
-const COARSE_PER_DECADE = 3;
-const FINE_PER_DECADE = 8;
+const COARSE_PER_DECADE = 2;
+const FINE_PER_DECADE = 6;
 const LOWEST_HZ = 1;
 /** Below this relative power above ideal (0.002 dB) a peak is not looked for more finely. */
 const WORTH_REFINING = 1.0005;

@@ -26,7 +26,7 @@ function deviceOf(
   stage: Exclude<Stage, RcSectionStage>,
   devices: readonly Device[],
 ): Device | null {
-  const device = devices.find((candidate) => candidate.id === stage.deviceId);
+  const device = devices.find((candidate) => candidate?.id === stage.deviceId);
   if (!device) {
     found.add('device_unknown', `${path}.deviceId`, 'There is no such device.');
     return null;

@@ -17,7 +17,9 @@ export function validateChain(input: ChainInput): EngineIssue[] {
   validateSpecification(found, input.specification);
   validatePolicy(found, input.policy);
   found.required('buildQuantity', input.buildQuantity, 'count');
-  input.devices.forEach((device, index) => validateDevice(found, `devices.${index}`, device));
+  input.devices.forEach((device, index) => {
+    if (isThere(found, `devices.${index}`, device)) validateDevice(found, `devices.${index}`, device);
+  });
   validateStages(found, input);
   return found.issues;
 }
@@ -36,9 +38,15 @@ function hasShape(found: IssueCollector, input: ChainInput): boolean {
     ['devices', input.devices],
   ];
   for (const [path, value] of needed) {
-    if (typeof value !== 'object' || value === null) found.add('required', path, 'This part of the input is missing.');
+    isThere(found, path, value);
   }
   return found.issues.length === 0;
+}
+
+function isThere(found: IssueCollector, path: string, value: unknown): boolean {
+  if (typeof value === 'object' && value !== null) return true;
+  found.add('required', path, 'This part of the input is missing.');
+  return false;
 }
 
 function validateStages(found: IssueCollector, { stages, devices }: ChainInput): void {
@@ -50,6 +58,7 @@ function validateStages(found: IssueCollector, { stages, devices }: ChainInput):
   let front: Front = { ohm: 1, dcReturn: true };
   stages.forEach((stage, index) => {
     const path = `stages.${index}`;
+    if (!isThere(found, path, stage)) return;
     if (ids.has(stage.id)) found.add('out_of_range', `${path}.id`, 'Two stages have the same id.');
     ids.add(stage.id);
     front = validateStage(found, path, stage, devices, front);
