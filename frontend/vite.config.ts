@@ -11,7 +11,7 @@ export default defineConfig({
     restoreMocks: true,
     css: { modules: { classNameStrategy: 'non-scoped' } },
     // Generous, because the machine that runs them may be busy with the rest of the checks.
-    testTimeout: 30_000,
+    testTimeout: 60_000,
     projects: [
       // Pure helpers need no browser.
       { extends: true, test: { name: 'helpers', environment: 'node', include: ['src/**/*.spec.ts'] } },

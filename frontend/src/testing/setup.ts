@@ -3,7 +3,7 @@ import { cleanup, configure } from '@testing-library/react';
 import { afterEach, vi } from 'vitest';
 
 // Waits end as soon as what is waited for is there; this is only the limit.
-configure({ asyncUtilTimeout: 10_000 });
+configure({ asyncUtilTimeout: 20_000 });
 
 afterEach(() => {
   cleanup();

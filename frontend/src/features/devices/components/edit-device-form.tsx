@@ -2,6 +2,7 @@ import { useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 
 import type { DeviceDto } from '../../../api/types';
+import { AFTER_SAVING } from '../../../components/leave-guard';
 import { draftOf, type DeviceDraft } from '../lib/device-draft';
 import { useUpdateDevice } from '../mutations';
 import { DeviceForm } from './device-form';
@@ -13,7 +14,7 @@ export function EditDeviceForm({ device }: { device: DeviceDto }) {
   const [initial] = useState(() => draftOf(device));
   const update = useUpdateDevice(device.id);
   const save = (draft: DeviceDraft, of: number): void =>
-    update.mutate({ draft, version: of }, { onSuccess: () => void navigate(`/devices/${device.id}`) });
+    update.mutate({ draft, version: of }, { onSuccess: () => void navigate(`/devices/${device.id}`, AFTER_SAVING) });
   return (
     <DeviceForm
       initial={initial}

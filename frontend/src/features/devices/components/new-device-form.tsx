@@ -2,6 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import { useNavigate, useSearchParams } from 'react-router-dom';
 
 import { ErrorNotice } from '../../../components/error-notice';
+import { AFTER_SAVING } from '../../../components/leave-guard';
 import { SkeletonRows } from '../../../components/skeleton-rows';
 import { duplicateOf, NEW_DEVICE, type DeviceDraft } from '../lib/device-draft';
 import { useCreateDevice } from '../mutations';
@@ -35,7 +36,9 @@ function CreateForm({ initial }: { initial: DeviceDraft }) {
       saving={create.isPending}
       saved={create.isSuccess}
       error={create.error}
-      onSubmit={(draft) => create.mutate(draft, { onSuccess: (device) => void navigate(`/devices/${device.id}`) })}
+      onSubmit={(draft) =>
+        create.mutate(draft, { onSuccess: (device) => void navigate(`/devices/${device.id}`, AFTER_SAVING) })
+      }
     />
   );
 }

@@ -5,7 +5,7 @@ import { useNavigate } from 'react-router-dom';
 import { fieldMessages } from '../../../api/api-error';
 import { ErrorNotice } from '../../../components/error-notice';
 import { focusFirstProblem } from '../../../components/form-problems';
-import { LeaveGuard } from '../../../components/leave-guard';
+import { AFTER_SAVING, LeaveGuard } from '../../../components/leave-guard';
 import { LinkButton } from '../../../components/link-button';
 import { Section } from '../../../components/section';
 import { useSessionUser } from '../../../components/session-context';
@@ -26,7 +26,7 @@ export function NewProjectForm() {
     event.preventDefault();
     setTried(true);
     if (focusFirstProblem(event.currentTarget, Object.keys(projectProblems(draft)).length > 0)) return;
-    create.mutate(draft, { onSuccess: (project) => void navigate(`/projects/${project.id}`) });
+    create.mutate(draft, { onSuccess: (project) => void navigate(`/projects/${project.id}`, AFTER_SAVING) });
   };
   return (
     <form onSubmit={submit} noValidate>

@@ -7,7 +7,7 @@ import type { Project } from '../../../api/types';
 import { ConflictDialog } from '../../../components/conflict-dialog';
 import { ErrorNotice } from '../../../components/error-notice';
 import { focusFirstProblem } from '../../../components/form-problems';
-import { LeaveGuard } from '../../../components/leave-guard';
+import { AFTER_SAVING, LeaveGuard } from '../../../components/leave-guard';
 import { LinkButton } from '../../../components/link-button';
 import { Section } from '../../../components/section';
 import { draftOf, projectProblems } from '../lib/project-draft';
@@ -44,7 +44,7 @@ export function ProjectSettingsForm({ project }: { project: Project }) {
   const [tried, setTried] = useState(false);
   const newer = newerProject(update.error);
   const problems = { ...fieldMessages(update.error), ...(tried ? projectProblems(draft) : {}) };
-  const leave = (): void => void navigate(`/projects/${project.id}`);
+  const leave = (): void => void navigate(`/projects/${project.id}`, AFTER_SAVING);
   const submit = (event: FormEvent<HTMLFormElement>): void => {
     event.preventDefault();
     setTried(true);
