@@ -33,6 +33,7 @@ export * from './report';
  * @param input specification, policy, stages and devices in SI units
  * @returns the report; every number finite, every missing one with its reason
  * @throws EngineInputError with all issues (stable code and path) when the input cannot be calculated
+ * @example calculate(input).verdict.lead // 'S2 spends more than it has.'
  */
 export function calculate(input: ChainInput): ChainReport {
   return buildReport(input);
@@ -44,6 +45,7 @@ export function calculate(input: ChainInput): ChainReport {
  * @param input whole chain
  * @param request from, to in Hz and number of points
  * @throws EngineInputError
+ * @example curves(input, { fromHz: 1e6, toHz: 1e8, points: 401 }).chain.minimum.gainDb.length // 401
  */
 export function curves(input: ChainInput, request: CurveRequest): Curves {
   return computeCurves(input, request);
@@ -55,6 +57,7 @@ export function curves(input: ChainInput, request: CurveRequest): Curves {
  * @param input whole chain
  * @param request stage (null: chain), figure and GBW case
  * @throws EngineInputError also when there is no such stage or figure
+ * @example working(input, { stageId, figure: 'headroom', gbwCase: 'minimum' }).result // '×0.974'
  */
 export function working(input: ChainInput, request: WorkingRequest): Working {
   return buildWorking(input, request);
@@ -67,6 +70,7 @@ export function working(input: ChainInput, request: WorkingRequest): Working {
  * @param stageId the stage
  * @param devices devices to try; those of another kind are left out
  * @throws EngineInputError
+ * @example tryDevices(input, stageId, devices).candidates[0].verdict // 'clear'
  */
 export function tryDevices(input: ChainInput, stageId: string, devices: readonly Device[]): CandidatesReport {
   return tryDevicesInStage(input, stageId, devices);
@@ -77,6 +81,7 @@ export function tryDevices(input: ChainInput, stageId: string, devices: readonly
  *
  * @param input whole chain
  * @throws EngineInputError
+ * @example summarize(input).worstHeadroomStage // 'S2 Gain'
  */
 export function summarize(input: ChainInput): ChainSummary {
   return summarizeChain(input);

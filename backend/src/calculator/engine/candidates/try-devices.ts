@@ -1,6 +1,7 @@
 import type { Judgement } from '../checks/judge';
 import { badness, worstCheck } from '../checks/verdict-order';
 import { withDevice } from '../checks/remedies/device-remedy';
+import { devicesOf } from '../checks/remedies/trials';
 import { EngineInputError } from '../errors';
 import type { CandidateReport, CandidatesReport, Check, Money } from '../report';
 import { evaluate } from '../report/evaluate';
@@ -46,7 +47,7 @@ function byVerdictAndPrice(a: CandidateReport, b: CandidateReport): number {
 function candidate(input: ChainInput, index: number, device: Device, stage: Stage | null): CandidateReport | null {
   if (!stage) return null;
   const stages = input.stages.map((each, position) => (position === index ? stage : each));
-  const devices = [...input.devices.filter((each) => each.id !== device.id), device];
+  const devices = devicesOf(stages, [...input.devices.filter((each) => each.id !== device.id), device]);
   const current = 'deviceId' in input.stages[index] && input.stages[index].deviceId === device.id;
   try {
     return candidateReport(evaluate({ ...input, stages, devices }), index, device, current);

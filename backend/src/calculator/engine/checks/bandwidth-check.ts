@@ -88,9 +88,8 @@ export function lowerCornerCheck(facts: ChainFacts, stage: StageFacts): Check | 
 function lowerSentence(facts: ChainFacts, stage: StageFacts, corner: number, verdict: Verdict): string {
   const { lowHz } = facts.input.specification.band;
   const factor = targetFactor(facts, stage);
-  const cause = isFeedbackStage(stage.stage)
-    ? 'Its coupling puts the lower −3 dB corner at'
-    : 'Its lower −3 dB corner is at';
+  const isCoupled = isFeedbackStage(stage.stage) && typeof stage.stage.couplingF === 'number';
+  const cause = isCoupled ? 'Its coupling puts the lower −3 dB corner at' : 'Its lower −3 dB corner is at';
   const is = `${cause} ${valueText(corner, 'Hz', [lowHz, lowHz / factor])}`;
   if (verdict === 'over') return `${is}: the band starts at ${setFrequency(lowHz)}.`;
   const ratio = valueText(lowHz / corner, 'ratio', [1, factor]);

@@ -4,7 +4,7 @@ import type { ChainFacts } from '../report/facts';
 import { limitFigure } from '../report/figures';
 import { ratioToDb } from '../report/maybe';
 import { isAbove, isBelow } from '../text/deciding-digits';
-import { because, cannotBeJudged, decibelText, setFrequency, valueText } from '../text/phrases';
+import { because, cannotBeJudged, decibelText, setFrequency, setNumber, valueText } from '../text/phrases';
 import { flatnessContributions, gainContributions, largestContributionText } from './contributions';
 import { makeCheck, unknownCheck, verdictAtLeast, verdictAtMost } from './make-check';
 import type { CheckFigures } from './make-check';
@@ -93,9 +93,9 @@ export function requiredGainText(facts: ChainFacts): string {
   const { gainDb, minimumGainDb, maximumGainDb } = facts.input.specification.requirements;
   const unit = chainGainUnit(facts);
   const parts: string[] = [];
-  if (gainDb) parts.push(`${gainDb.target} ±${gainDb.tolerance} ${unit}`);
-  if (minimumGainDb !== undefined) parts.push(`at least ${minimumGainDb} ${unit}`);
-  if (maximumGainDb !== undefined) parts.push(`at most ${maximumGainDb} ${unit}`);
+  if (gainDb) parts.push(`${setNumber(gainDb.target)} ±${setNumber(gainDb.tolerance)} ${unit}`);
+  if (minimumGainDb !== undefined) parts.push(`at least ${setNumber(minimumGainDb)} ${unit}`);
+  if (maximumGainDb !== undefined) parts.push(`at most ${setNumber(maximumGainDb)} ${unit}`);
   return parts.join(', ');
 }
 

@@ -12,6 +12,7 @@ import {
   deviceHas,
   ratioText,
   setFrequency,
+  setNumber,
   targetText,
   valueText,
 } from '../text/phrases';
@@ -141,7 +142,7 @@ interface LevelJudgement {
 function levelCheck(facts: ChainFacts, level: LevelJudgement): Check {
   const tightRatio = dbToRatio(facts.policy.levelMarginDb);
   const verdict = verdictAtLeast(level.headroom, 1, tightRatio);
-  const close = verdict === 'tight' ? `, within ${facts.policy.levelMarginDb} dB of the limit` : '';
+  const close = verdict === 'tight' ? `, within ${setNumber(facts.policy.levelMarginDb)} dB of the limit` : '';
   const sentence = (): string => `${level.sides()}: ${ratioText(level.headroom, [1, tightRatio])}${close}.`;
   return makeCheck(level.id, level.title, verdict, sentence, () => ({
     actual: level.actual(),
@@ -162,7 +163,7 @@ export function loopGainCheck(facts: ChainFacts, stage: StageFacts): Check | nul
   const decibels = ratioToDb(loopGain.value);
   const at = setFrequency(facts.input.specification.band.operatingHz);
   const sentence = (): string =>
-    `Its loop gain at ${at} is ${decibelText(decibels, [required])}; required is ${required} dB.`;
+    `Its loop gain at ${at} is ${decibelText(decibels, [required])}; required is ${setNumber(required)} dB.`;
   return makeCheck('loop-gain', 'loop gain', verdictAtLeast(decibels, required, required), sentence, () => ({
     actual: actual(),
     limit: limitFigure(required, 'dB'),

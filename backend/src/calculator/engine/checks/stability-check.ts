@@ -5,7 +5,7 @@ import type { ChainFacts, StageFacts } from '../report/facts';
 import { limitFigure } from '../report/figures';
 import { stageFigure, worsePoint } from '../report/stage-figures';
 import { isBelow } from '../text/deciding-digits';
-import { basisText, noiseGainText, setFrequency, valueText } from '../text/phrases';
+import { basisText, noiseGainText, setFrequency, setNumber, valueText } from '../text/phrases';
 import { makeCheck, unknownCheck } from './make-check';
 import type { CheckFigures } from './make-check';
 import { feedbackResistorShare, LOWEST_FEEDBACK_SHARE } from './current-feedback-check';
@@ -87,7 +87,7 @@ function marginSentence(each: Case, margin: number, limit: number): string {
   const size = isBound ? `at most ${value}, because the second pole is not known` : value;
   const where = each.point.crossingHz === null ? '' : ` at ${valueText(each.point.crossingHz, 'Hz')}`;
   const oscillates = margin < 0 ? ' It oscillates.' : '';
-  return `Its phase margin${where} is ${size}, ${whichEnd(each, each.stability.worse)}; the limit is ${limit}°.${oscillates}`;
+  return `Its phase margin${where} is ${size}, ${whichEnd(each, each.stability.worse)}; the limit is ${setNumber(limit)}°.${oscillates}`;
 }
 
 function figures(each: Case, limit: number): () => CheckFigures {

@@ -1,5 +1,6 @@
 import type { Money } from '../report';
 import type { ChainInput, Device, Stage } from '../types';
+import { listText } from '../text/phrases';
 import { decimalAmount } from '../text/si-format';
 import { countStagesByDevice, unitPrice } from './unit-price';
 import type { UnitPrice } from './unit-price';
@@ -62,7 +63,12 @@ function sum(stages: readonly StageCost[], currency: string): Money {
 }
 
 function missingReason(missing: readonly StageCost[], knownCount: number, knownText: string): string {
-  const what = missing.map((stage) => `${stage.label}: ${stage.money.reason ?? 'no price'}`).join('; ');
+  const stagesByReason = new Map<string, string[]>();
+  for (const { label, money } of missing) {
+    const reason = money.reason ?? 'no price';
+    stagesByReason.set(reason, [...(stagesByReason.get(reason) ?? []), label]);
+  }
+  const what = [...stagesByReason].map(([reason, labels]) => `${listText(labels)}: ${reason}`).join('; ');
   return knownCount === 0 ? what : `${what} (the others sum to ${knownText})`;
 }
 

@@ -8,6 +8,11 @@ export function setFrequency(frequencyHz: number): string {
   return typed(frequencyHz, 'Hz');
 }
 
+/** A number that somebody set, with the real minus sign: "60", "−7.74". */
+export function setNumber(value: number): string {
+  return trimmed(value, 6);
+}
+
 /** A signed gain: "×10", "−10", "×3.162". */
 export function gainText(gain: number): string {
   return quantity(gain, 'gain', digitsWithoutTrailingZeros(gain, 4));

@@ -2,6 +2,7 @@ import { gbwUsed, worstHeadroom, worstNoiseGain } from '../../report/derived';
 import { partName } from '../../report/facts';
 import type { ChainFacts, StageFacts } from '../../report/facts';
 import { atLeastText, gainText, ratioText, roundAway, targetText, valueText } from '../../text/phrases';
+import { badness } from '../verdict-order';
 import { asNonInverting, isRatioStage, resistorGain, splitInTwo, withGain } from './replacement-stages';
 import { hint, priceDifferenceText, proposal, trialCheckVerdict, trialStages, turnsPolarity } from './trials';
 import type { FoundRemedy, Trial, Trials } from './trials';
@@ -41,11 +42,17 @@ function headroomOf(trial: Trial, stage: StageFacts): number {
   return worstHeadroom(trial.after.facts, stage).headroom.value ?? 0;
 }
 
+/** A change that leaves the GBW check as bad as it is is no remedy. */
+function helps(trial: Trial, stage: StageFacts): boolean {
+  const before = trial.before.stageChecks[stage.index].find((check) => check.id === 'gbw');
+  return before !== undefined && badness(trialCheckVerdict(trial, 'gbw')) < badness(before.verdict);
+}
+
 function nonInvertingRemedy(trials: Trials, stage: StageFacts): FoundRemedy | null {
   if (!isRatioStage(stage.stage)) return null;
   const replacement = asNonInverting(stage.stage);
   const trial = replacement && trials.replace(stage.index, [replacement]);
-  if (!replacement || !trial) return null;
+  if (!trial || !helps(trial, stage)) return null;
   const gain = gainText(Math.abs(resistorGain(stage.stage)));
   const polarity = turnsPolarity(trial) ? ' and turn the polarity over' : '';
   const brief = `As non-inverting ${gain} it would use ${spendingText(trial)}${polarity}.`;
@@ -56,7 +63,7 @@ function splitRemedy(trials: Trials, stage: StageFacts): FoundRemedy | null {
   if (!isRatioStage(stage.stage)) return null;
   const pair = splitInTwo(stage.stage, trials.before.facts.input.stages);
   const trial = pair && trials.replace(stage.index, pair);
-  if (!pair || !trial) return null;
+  if (!trial || !helps(trial, stage)) return null;
   const sign = stage.stage.topology === 'inverting' ? -1 : 1;
   const gain = gainText(sign * Math.sqrt(Math.abs(resistorGain(stage.stage))));
   const brief =
@@ -81,7 +88,7 @@ function lessGainRemedy(trials: Trials, stage: StageFacts): FoundRemedy | null {
     if (!trial || !replacement) return null;
     feedbackOhm = replacement.feedbackOhm;
     spent = spentBy(trial.after.facts, trialStages(trial)[0]);
-    if (spent.headroom >= target) return lessGain(trial, magnitude, stage);
+    if (spent.headroom >= target) return magnitude < 1 ? null : lessGain(trial, magnitude, stage);
   }
   return null;
 }

@@ -7,6 +7,9 @@ import type { Device, Stage } from '../../types';
 import type { Judgement } from '../judge';
 import { worstVerdict } from '../verdict-order';
 
+/** Requirements named one by one in a remedy; the rest is counted. */
+const MOST_FAILURES_NAMED = 2;
+
 /** A chain with one stage replaced, evaluated by the full model. */
 export interface Trial {
   readonly before: Judgement;
@@ -40,7 +43,7 @@ export function createTrials(before: Judgement, mostEvaluations: number): Trials
 }
 
 /** Only the devices that are used: the others need not be validated again for every trial. */
-function devicesOf(stages: readonly Stage[], devices: readonly Device[]): readonly Device[] {
+export function devicesOf(stages: readonly Stage[], devices: readonly Device[]): readonly Device[] {
   const used = new Set(stages.flatMap((stage) => ('deviceId' in stage ? [stage.deviceId] : [])));
   return devices.filter((device) => used.has(device.id));
 }
@@ -90,7 +93,13 @@ function failureText(trial: Trial): string {
   if (failing.length === 0) return '';
   const before = new Set(trial.before.chainChecks.filter((check) => check.verdict === 'over').map((check) => check.id));
   const still = failing.every((check) => before.has(check.id)) ? 'still ' : '';
-  return ` The chain would ${still}fail: ${listText(failing.map((check) => failureOf(trial, check)))}.`;
+  return ` The chain would ${still}fail: ${failures(trial, failing)}.`;
+}
+
+function failures(trial: Trial, failing: readonly Check[]): string {
+  const named = failing.slice(0, MOST_FAILURES_NAMED).map((check) => failureOf(trial, check));
+  const others = failing.length - named.length;
+  return listText(others > 0 ? [...named, `${others} more`] : named);
 }
 
 function failureOf(trial: Trial, check: Check): string {
