@@ -1,6 +1,6 @@
 import { availableParallelism } from 'node:os';
 import path from 'node:path';
-import { Injectable } from '@nestjs/common';
+import { Injectable, Logger } from '@nestjs/common';
 import type { OnApplicationBootstrap, OnApplicationShutdown } from '@nestjs/common';
 import { Piscina } from 'piscina';
 import { InvalidError, TooManyRequestsError } from '../common/errors';
@@ -18,6 +18,7 @@ const MAX_WAITING = 256;
 
 /** A pool whose threads are started, and kept, from the first moment that they may be needed. */
 class LazyPool<Task, Answer> {
+  private readonly logger = new Logger('CalculatorThreads');
   private pool: Piscina<Task, Answer> | null = null;
 
   constructor(
@@ -26,12 +27,7 @@ class LazyPool<Task, Answer> {
   ) {}
 
   start(): Piscina<Task, Answer> {
-    this.pool ??= new Piscina({
-      filename: path.join(COMPILED, this.file),
-      minThreads: this.threads,
-      maxThreads: this.threads,
-      maxQueue: MAX_WAITING,
-    });
+    this.pool ??= this.create();
     return this.pool;
   }
 
@@ -45,6 +41,18 @@ class LazyPool<Task, Answer> {
 
   async destroy(): Promise<void> {
     await this.pool?.destroy();
+  }
+
+  private create(): Piscina<Task, Answer> {
+    const pool = new Piscina<Task, Answer>({
+      filename: path.join(COMPILED, this.file),
+      minThreads: this.threads,
+      maxThreads: this.threads,
+      maxQueue: MAX_WAITING,
+    });
+    // Nobody listening would end the server for a fault in one thread; the pool starts another one.
+    pool.on('error', (error: Error) => this.logger.error(error.stack));
+    return pool;
   }
 }
 

@@ -74,6 +74,10 @@ const WARM_UP_MS = 400;
 export function warmUp(run: (input: ChainInput) => unknown): void {
   if (isMainThread) return;
   const end = performance.now() + WARM_UP_MS;
-  do run(SAMPLE);
-  while (performance.now() < end);
+  try {
+    do run(SAMPLE);
+    while (performance.now() < end);
+  } catch {
+    // A thread must start whatever the sample does: the first real calculation will tell what is wrong.
+  }
 }
