@@ -53,8 +53,8 @@ export interface ChecksWithRemedies {
 }
 
 /**
- * Looks for what would help: on the deciding check of every stage that is over or tight, and on gain and flatness of a chain
- * whose stages pass. Every figure named comes from the full model of the changed chain.
+ * Looks for what would help: on every check of a stage that is over or tight (another device only on the worst of them), and
+ * on gain and flatness of a chain whose stages pass. Every figure named comes from the full model of the changed chain.
  *
  * @param judgement the chain as it is
  */
@@ -62,10 +62,11 @@ export function findRemedies(judgement: Judgement): ChecksWithRemedies {
   const trials = createTrials(judgement, MOST_EVALUATIONS);
   const found = new Map<Check, readonly FoundRemedy[]>();
   const order = judgement.facts.stages
-    .map((stage) => ({ stage, check: worstCheck(judgement.stageChecks[stage.index]) }))
-    .filter((each): each is { stage: StageFacts; check: Check } => each.check !== null && canHelp(each.check))
+    .flatMap((stage) => judgement.stageChecks[stage.index].map((check) => ({ stage, check })))
+    .filter(({ check }) => canHelp(check))
     .sort((a, b) => badness(b.check.verdict) - badness(a.check.verdict));
-  for (const { stage, check } of order) found.set(check, stageRemedies(trials, stage, check));
+  const deciding = new Set(order.map(({ stage }) => worstOf(judgement, stage)));
+  for (const { stage, check } of order) found.set(check, stageRemedies(trials, stage, check, deciding.has(check)));
   for (const check of judgement.chainChecks) found.set(check, chainRemedies(trials, check));
   const briefs = new Map<Check, readonly string[]>();
   const withRemedies = (check: Check): Check => {
@@ -91,9 +92,14 @@ function canHelp(check: Check): boolean {
   return check.verdict === 'over' || check.verdict === 'tight';
 }
 
-function stageRemedies(trials: Trials, stage: StageFacts, check: Check): readonly FoundRemedy[] {
+/** The check of a stage that another device is looked for: the worst of those that something can be done about. */
+function worstOf(judgement: Judgement, stage: StageFacts): Check | null {
+  return worstCheck(judgement.stageChecks[stage.index].filter(canHelp));
+}
+
+function stageRemedies(trials: Trials, stage: StageFacts, check: Check, isDeciding: boolean): readonly FoundRemedy[] {
   const own = FINDERS[check.id]?.(trials, stage) ?? [];
-  const device = DEVICE_CAN_HELP.has(check.id) ? deviceRemedy(trials, stage, check.id) : null;
+  const device = isDeciding && DEVICE_CAN_HELP.has(check.id) ? deviceRemedy(trials, stage, check.id) : null;
   return device ? [...own.slice(0, 1), device, ...own.slice(1)] : own;
 }
 
