@@ -1,7 +1,8 @@
 import type { EngineIssue, EngineIssueCode } from '../errors';
 
-/** What a number may be. `above` is exclusive, `from` and `to` are inclusive. */
+/** What a number may be. `above` is exclusive, `from` and `to` are inclusive; `least` is the smallest beside 0. */
 export interface Range {
+  readonly least?: number;
   readonly above?: number;
   readonly from?: number;
   readonly to: number;
@@ -10,12 +11,12 @@ export interface Range {
 
 /** Generous: they keep arithmetic finite and catch slips of many powers of ten; forms may be stricter. */
 export const RANGES = {
-  resistanceOhm: { above: 0, to: 1e15, unit: 'Ω' },
-  resistanceOrZeroOhm: { from: 0, to: 1e15, unit: 'Ω' },
-  capacitanceF: { above: 0, to: 10, unit: 'F' },
-  capacitanceOrZeroF: { from: 0, to: 10, unit: 'F' },
-  frequencyHz: { above: 0, to: 1e15, unit: 'Hz' },
-  frequencyOrZeroHz: { from: 0, to: 1e15, unit: 'Hz' },
+  resistanceOhm: { from: 1e-9, to: 1e15, unit: 'Ω' },
+  resistanceOrZeroOhm: { from: 0, least: 1e-9, to: 1e15, unit: 'Ω' },
+  capacitanceF: { from: 1e-21, to: 10, unit: 'F' },
+  capacitanceOrZeroF: { from: 0, least: 1e-21, to: 10, unit: 'F' },
+  frequencyHz: { from: 1e-6, to: 1e15, unit: 'Hz' },
+  frequencyOrZeroHz: { from: 0, least: 1e-6, to: 1e15, unit: 'Hz' },
   positive: { above: 0, to: 1e15, unit: '' },
   notNegative: { from: 0, to: 1e15, unit: '' },
   any: { from: -1e15, to: 1e15, unit: '' },
@@ -35,17 +36,16 @@ export const RANGES = {
 
 export type RangeName = keyof typeof RANGES;
 
-function rangeText({ above, from, to, unit }: Range): string {
-  const low = above === undefined ? `at least ${from}` : `above ${above}`;
+function rangeText({ above, from, least, to, unit }: Range): string {
+  const lowest = above === undefined ? `at least ${from}` : `above ${above}`;
+  const low = least === undefined ? lowest : `0, or at least ${least}`;
   return `${low} and at most ${to}${unit ? ` ${unit}` : ''}`;
 }
 
-function isInside(value: number, { above, from, to }: Range): boolean {
-  if (value > to) return false;
-  if (above !== undefined) return value > above;
-  const lowest = from ?? -Infinity;
+function isInside(value: number, { above = -Infinity, from = -Infinity, least = -Infinity, to }: Range): boolean {
   // Negative zero is no quantity that somebody measured: it comes from a slip, and 1/−0 would turn a sign.
-  return value >= lowest && !(lowest === 0 && Object.is(value, -0));
+  if (value === 0 && from === 0) return !Object.is(value, -0);
+  return value <= to && value > above && value >= from && value >= least;
 }
 
 /** Gathers issues; every check adds at most one and goes on. */
