@@ -75,6 +75,8 @@ describe('edges: chains that are refused', () => {
     ['negative zero', { ...inverting, isolationOhm: -0 }, 'out_of_range', 'isolationOhm'],
     ['NaN', { ...inverting, gainOhm: NaN }, 'not_finite', 'gainOhm'],
     ['infinite', { ...inverting, feedbackOhm: Infinity }, 'not_finite', 'feedbackOhm'],
+    ['a resistance below any wire', { ...inverting, gainOhm: 1e-190 }, 'out_of_range', 'gainOhm'],
+    ['a coupling below any gap', { ...inverting, couplingF: 1e-190 }, 'out_of_range', 'couplingF'],
     ['text for a number', { ...inverting, strayF: '1p' as never }, 'not_finite', 'strayF'],
     ['a coupling of 0 F', { ...inverting, couplingF: 0 }, 'out_of_range', 'couplingF'],
     ['unknown device', { ...inverting, deviceId: 'nothing' }, 'device_unknown', 'deviceId'],
