@@ -52,7 +52,7 @@ function upperSentence(facts: ChainFacts, stage: StageFacts, corner: number, ver
   const { highHz, operatingHz } = facts.input.specification.band;
   const factor = targetFactor(facts, stage);
   const is = `${capitalised(partName(stage))} is at −3 dB at ${valueText(corner, 'Hz', [highHz, highHz * factor])} here, loaded`;
-  if (stage.analysis.operatingBeyondCorner) {
+  if (isBelow(corner, operatingHz)) {
     return `${is}: the operating frequency of ${setFrequency(operatingHz)} is already beyond the corner.`;
   }
   if (verdict === 'over') return `${is}; the band goes up to ${setFrequency(highHz)}.`;

@@ -6,7 +6,7 @@ import type { ChainFacts, StageFacts } from '../report/facts';
 import { limitFigure } from '../report/figures';
 import { noiseUnit } from '../report/stage-figures';
 import { decimalAmount, typed } from '../text/si-format';
-import { cannotBeJudged, capitalised, decibelText, valueText } from '../text/phrases';
+import { cannotBeJudged, capitalised, decibelLimitText, decibelText, valueText } from '../text/phrases';
 import { makeCheck, unknownCheck, verdictAtMost } from './make-check';
 
 /** A quantity that has to stay under a limit and tight within a share of it. */
@@ -86,7 +86,7 @@ export function noiseFigureCheck(facts: ChainFacts): Check | null {
   const noiseFigure = value.value;
   const verdict = verdictAtMost(noiseFigure, limit, limit - facts.policy.noiseMarginDb);
   const sentence = (): string => {
-    const is = `Noise figure is ${decibelText(noiseFigure, [limit])}; the limit is ${decibelText(limit)}.`;
+    const is = `Noise figure is ${decibelText(noiseFigure, [limit])}; the limit is ${decibelLimitText(limit)}.`;
     return verdict === 'clear' ? is : `${is} ${noisiest(facts)}`.trim();
   };
   return makeCheck('noise-figure', 'noise figure', verdict, sentence, () => ({

@@ -4,7 +4,15 @@ import type { ChainFacts } from '../report/facts';
 import { limitFigure } from '../report/figures';
 import { ratioToDb } from '../report/maybe';
 import { isAbove, isBelow } from '../text/deciding-digits';
-import { because, cannotBeJudged, decibelText, setFrequency, setNumber, valueText } from '../text/phrases';
+import {
+  because,
+  cannotBeJudged,
+  decibelLimitText,
+  decibelText,
+  setFrequency,
+  setNumber,
+  valueText,
+} from '../text/phrases';
 import { flatnessContributions, gainContributions, largestContributionText } from './contributions';
 import { makeCheck, unknownCheck, verdictAtLeast, verdictAtMost } from './make-check';
 import type { CheckFigures } from './make-check';
@@ -62,7 +70,7 @@ function judgeBounds(gain: number, bounds: readonly GainBound[]): { verdict: Ver
   const left = (bound: GainBound): number => (bound.side === 'least' ? gain - bound.limitDb : bound.limitDb - gain);
   const nearest = bounds.reduce((a, b) => (left(b) < left(a) ? b : a));
   const isOver = nearest.side === 'least' ? isBelow(gain, nearest.limitDb) : isAbove(gain, nearest.limitDb);
-  const isTight = bounds.some((bound) => left(bound) < bound.tightDb);
+  const isTight = bounds.some((bound) => isBelow(left(bound), bound.tightDb));
   return { verdict: isOver ? 'over' : isTight ? 'tight' : 'clear', limit: nearest.limitDb };
 }
 
@@ -70,11 +78,11 @@ function gainSentence(facts: ChainFacts, gain: number, verdict: Verdict, limit: 
   const unit = chainGainUnit(facts) === 'dBΩ' ? 'dBΩ' : 'dB';
   const at = setFrequency(facts.input.specification.band.operatingHz);
   const is = `The gain at ${at} is ${decibelText(gain, [limit], unit)}`;
-  if (verdict === 'clear') return `${is}, within ${requiredGainText(facts)}.`;
+  if (verdict === 'clear') return `${is}; required is ${requiredGainText(facts)}.`;
   if (verdict === 'tight')
-    return `${is}, ${decibelText(Math.abs(gain - limit))} inside the limit of ${decibelText(limit, [], unit)}.`;
+    return `${is}, ${decibelText(Math.abs(gain - limit))} inside the limit of ${decibelLimitText(limit, unit)}.`;
   const side = gain < limit ? 'below' : 'above';
-  return `${is}, ${side} ${decibelText(limit, [], unit)} (${requiredGainText(facts)}).${gainCause(facts, gain, limit)}`;
+  return `${is}, ${side} ${decibelLimitText(limit, unit)} (${requiredGainText(facts)}).${gainCause(facts, gain, limit)}`;
 }
 
 /** Either the gains are set wrong, or stages lose gain: then which one loses most. */
@@ -83,7 +91,7 @@ function gainCause(facts: ChainFacts, gain: number, limit: number): string {
   if (ideal === null) return '';
   if (gain > limit) return '';
   if (isBelow(ideal, limit)) {
-    return ` Even with ideal amplifiers it would be ${decibelText(ideal, [limit])}: ${decibelText(limit - ideal)} more gain has to be set.`;
+    return ` Even with ideal amplifiers it would be ${decibelText(ideal, [limit], chainGainUnit(facts) === 'dBΩ' ? 'dBΩ' : 'dB')}: ${decibelText(limit - ideal)} more gain has to be set.`;
   }
   return largestContributionText(gainContributions(facts), ideal - gain);
 }
@@ -120,7 +128,7 @@ function flatnessSentence(facts: ChainFacts, flatness: number, required: number,
   const value = decibelText(flatness, [required, required * (1 - facts.policy.toleranceMargin)]);
   const band = `From ${setFrequency(lowHz)} to ${setFrequency(highHz)}`;
   const cause = verdict === 'clear' ? '' : largestContributionText(flatnessContributions(facts), flatness);
-  return `${band} the gain changes by ${value}; the limit is ${decibelText(required)}.${cause}`;
+  return `${band} the gain changes by ${value}; the limit is ${decibelLimitText(required)}.${cause}`;
 }
 
 /** The chain's exact upper −3 dB corner. */
@@ -131,7 +139,9 @@ export function upperCornerCheck(facts: ChainFacts): Check | null {
   const actual = (): Figure => chainFigure(facts, 'cornerUpper');
   if (corner.value === null) return cornerWithoutValue(facts, 'upper-corner', 'upper corner', corner.reason, actual);
   const { value } = corner;
-  const beyond = facts.chain.operatingBeyondCorner ? ' The operating frequency is beyond the corner.' : '';
+  const beyond = isBelow(value, facts.input.specification.band.operatingHz)
+    ? ' The operating frequency is beyond the corner.'
+    : '';
   const sentence = (): string =>
     `The chain is at −3 dB at ${valueText(value, 'Hz', [required])}; required is ${setFrequency(required)}.${beyond}`;
   const verdict = verdictAtLeast(value, required, required * (1 + facts.policy.toleranceMargin));
@@ -170,7 +180,8 @@ function cornerWithoutValue(
 ): Check {
   const figures = (): CheckFigures => ({ actual: actual() });
   if (facts.chain.gainOperatingDb.value === null) return unknownRequirement(id, title, reason, actual);
-  if (facts.chain.operatingBeyondCorner) {
+  const { operatingBeyondCorner, cornerLowerHz, cornerUpperHz } = facts.chain;
+  if (operatingBeyondCorner && cornerLowerHz.value === null && cornerUpperHz.value === null) {
     return makeCheck(id, title, 'over', () => 'The chain never comes to half the power of its ideal gain.', figures);
   }
   return makeCheck(id, title, 'clear', () => `The ${title} is no limit: ${because(reason)}.`, figures);

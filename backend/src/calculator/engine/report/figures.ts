@@ -1,7 +1,12 @@
 import type { Maybe } from '../analysis';
 import type { Figure, Unit } from '../report';
 import { asSentence } from '../text/phrases';
-import { decidingDigits, digitsForDecimals, digitsWithoutTrailingZeros } from '../text/deciding-digits';
+import {
+  decibelLimitDigits,
+  decidingDigits,
+  digitsForDecimals,
+  digitsWithoutTrailingZeros,
+} from '../text/deciding-digits';
 
 const MOST_DIGITS_OF_A_GAIN = 4;
 const USUAL_DIGITS = 3;
@@ -55,5 +60,5 @@ export function figure(value: number, unit: Unit, options: FigureOptions = {}): 
 /** A limit as a figure: printed as it was typed. */
 export function limitFigure(value: number, unit: Unit): Figure {
   const decibel = unit === 'dB' || unit === 'dBΩ';
-  return { value, unit, digits: decibel ? digitsForDecimals(value, 2) : digitsWithoutTrailingZeros(value, 6) };
+  return { value, unit, digits: decibel ? decibelLimitDigits(value) : digitsWithoutTrailingZeros(value, 6) };
 }

@@ -2,7 +2,7 @@ import type { Check, CheckId, Figure, HeadlineItem, Verdict } from '../report';
 import { requiredGainText } from '../checks/gain-checks';
 import { worstVerdict } from '../checks/verdict-order';
 import { isAbove, isBelow } from '../text/deciding-digits';
-import { decibelText, setFrequency, targetText } from '../text/phrases';
+import { decibelLimitText, setFrequency, targetText } from '../text/phrases';
 import { decimalAmount, typed } from '../text/si-format';
 import { chainFigure, gainLimits } from './chain-figures';
 import { worstHeadroom, worstHeadroomStage } from './derived';
@@ -60,7 +60,7 @@ function gainRequirement(facts: ChainFacts, figure: Figure): string {
   const least = gainDb ? gainDb.target - gainDb.tolerance : minimumGainDb;
   const most = gainDb ? gainDb.target + gainDb.tolerance : maximumGainDb;
   const required = requiredGainText(facts);
-  const bare = (limit: number): string => decibelText(limit).replace(/ dB$/, '');
+  const bare = (limit: number): string => decibelLimitText(limit).replace(/ dB$/, '');
   if (figure.value === null) return required;
   if (least !== undefined && isBelow(figure.value, least)) return `below ${bare(least)} (${required})`;
   if (most !== undefined && isAbove(figure.value, most)) return `above ${bare(most)} (${required})`;
@@ -76,7 +76,7 @@ function flatnessItem(facts: ChainFacts, checks: HeadlineChecks): HeadlineItem {
     figure: chainFigure(facts, 'flatness'),
     money: null,
     verdict: verdictOf(checks, ['flatness']),
-    requirement: limit === undefined ? NOTHING_REQUIRED : `limit ${decibelText(limit)}`,
+    requirement: limit === undefined ? NOTHING_REQUIRED : `limit ${decibelLimitText(limit)}`,
     chainFigure: 'flatness',
   };
 }
@@ -130,7 +130,7 @@ function noiseItem(facts: ChainFacts, checks: HeadlineChecks): HeadlineItem {
     figure: chainFigure(facts, showsFigure ? 'noiseFigure' : 'inputNoise'),
     money: null,
     verdict: verdictOf(checks, ['input-noise', 'noise-figure']),
-    requirement: showsFigure ? `limit ${decibelText(noiseFigureDb)}` : densityLimit,
+    requirement: showsFigure ? `limit ${decibelLimitText(noiseFigureDb)}` : densityLimit,
     chainFigure: showsFigure ? 'noiseFigure' : 'inputNoise',
   };
 }

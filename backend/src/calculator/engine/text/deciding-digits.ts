@@ -52,6 +52,17 @@ export function digitsForDecimals(value: number, decimals: number): number {
 }
 
 /**
+ * Digits of a limit in decibels: two decimals, and every further one that was set, so that a value beside it never seems to
+ * keep a limit that it breaks.
+ *
+ * @param limit finite number
+ * @returns significant digits; `decibelLimitDigits(1)` → 3, `decibelLimitDigits(0.125)` → 3, `decibelLimitDigits(59.875)` → 5
+ */
+export function decibelLimitDigits(limit: number): number {
+  return Math.max(digitsForDecimals(limit, 2), digitsWithoutTrailingZeros(limit, 6));
+}
+
+/**
  * The fewest digits that say the same as `most` digits do: 11.00 needs two, 3.162 needs four.
  *
  * @param value finite number

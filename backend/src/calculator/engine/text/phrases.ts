@@ -1,6 +1,6 @@
 import type { UsedValue } from '../analysis';
 import type { Unit } from '../report';
-import { decidingDigits, digitsForDecimals, digitsWithoutTrailingZeros } from './deciding-digits';
+import { decidingDigits, decibelLimitDigits, digitsForDecimals, digitsWithoutTrailingZeros } from './deciding-digits';
 import { quantity, trimmed, typed } from './si-format';
 
 /** A frequency that somebody set: "7 MHz". */
@@ -101,6 +101,11 @@ export function capitalised(text: string): string {
 /** Decibels with two decimals, or as many digits as show the side of the limits: "58.08 dB". */
 export function decibelText(value: number, limits: readonly number[] = [], unit: 'dB' | 'dBΩ' = 'dB'): string {
   return quantity(value, unit, decidingDigits(value, digitsForDecimals(value, 2), limits));
+}
+
+/** Decibels that somebody set as a limit: two decimals, and every further one that was set: "1.00 dB", "0.125 dB". */
+export function decibelLimitText(limit: number, unit: 'dB' | 'dBΩ' = 'dB'): string {
+  return quantity(limit, unit, decibelLimitDigits(limit));
 }
 
 /**
