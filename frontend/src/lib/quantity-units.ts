@@ -110,7 +110,8 @@ export function toFieldText(value: number | null | undefined, unit: QuantityUnit
 export function describeQuantity(value: number, unit: QuantityUnit): string {
   const rule: UnitRule = QUANTITY_UNITS[unit];
   if (rule.figureUnit === null) return `${toFieldText(value, unit)} ${unitLabel(unit)}`.trim();
-  const digits = Math.max(3, Math.min(8, significantDigitsOf(value)));
+  // No more digits than were typed: a datasheet's 75 MHz is not 75.0 MHz.
+  const digits = Math.min(8, significantDigitsOf(value));
   const text = formatValue(value, rule.figureUnit, digits);
   if (rule.kind !== 'gain' || value === 0) return text;
   return `${text} = ${formatValue(20 * Math.log10(Math.abs(value)), 'dB', 4)}`;

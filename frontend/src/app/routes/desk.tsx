@@ -8,6 +8,7 @@ import { SkeletonRows } from '../../components/skeleton-rows';
 import { DeskCounts } from '../../features/desk/components/desk-counts';
 import { FirstSteps } from '../../features/desk/components/first-steps';
 import { OverChains } from '../../features/desk/components/over-chains';
+import { WaitingList } from '../../features/desk/components/waiting-list';
 import { deskQuery } from '../../features/desk/queries';
 
 export function Component() {
@@ -20,6 +21,11 @@ export function Component() {
       {desk && (
         <>
           <DeskCounts counts={desk.counts} />
+          {desk.waiting.length > 0 && (
+            <Section title="Waiting for you">
+              <WaitingList items={desk.waiting} />
+            </Section>
+          )}
           <Section title="Over a limit">
             {desk.overChains.length > 0 ? <OverChains chains={desk.overChains} /> : <FirstSteps counts={desk.counts} />}
           </Section>

@@ -29,7 +29,7 @@ describe('a device', () => {
   it('shows its values with page, what is not given, and where it is used', async () => {
     open();
     const row = await screen.findByRole('row', { name: /Gain-bandwidth product/ });
-    expect(row).toHaveTextContent('75.0 MHz');
+    expect(row).toHaveTextContent('75 MHz');
     expect(row).toHaveTextContent('100 MHz');
     expect(within(row).getByText('4')).toBeVisible();
     expect(screen.getByText('Slew and full-power bandwidth are unknown.')).toBeVisible();

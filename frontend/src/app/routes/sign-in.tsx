@@ -27,10 +27,12 @@ export function Component() {
 function SignInPage({ session, from }: { session: Session; from: string }) {
   if (session.user) return <Navigate to={from} replace />;
   if (session.setupNeeded) return <Navigate to="/setup" replace />;
+  const offersDemo = session.demoAccounts.length > 0;
   return (
     <SessionCard title="Sign in">
-      {session.demoAccounts.length > 0 && <DemoPeople accounts={session.demoAccounts} />}
-      <SignInForm />
+      {offersDemo && <DemoPeople accounts={session.demoAccounts} />}
+      {offersDemo && <h2>With an account of your own</h2>}
+      <SignInForm autoFocus={!offersDemo} />
     </SessionCard>
   );
 }

@@ -41,7 +41,7 @@ function QuoteTable({ device, quote }: { device: DeviceDto; quote: Quote }) {
     quote.validUntil && `valid until ${formatPlainDate(quote.validUntil)}`,
   ].filter(Boolean);
   return (
-    <>
+    <div className={styles.quote}>
       <table className={`data-table ${styles.breaks}`}>
         <caption>Price of one piece, by quantity</caption>
         <thead>
@@ -63,10 +63,13 @@ function QuoteTable({ device, quote }: { device: DeviceDto; quote: Quote }) {
           ))}
         </tbody>
       </table>
-      {details.length > 0 && <p className="soft">{details.join(' · ')}</p>}
-      {lapsed && <p className={styles.lapsed}>This quote has lapsed; its prices still count and are marked.</p>}
-      {device.can.editQuote && <RemoveQuote device={device} />}
-    </>
+      <div>
+        {details.length > 0 && <p>{details.join(' · ')}</p>}
+        {lapsed && <p className={styles.lapsed}>This quote has lapsed; its prices still count and are marked.</p>}
+        <p className="soft">The cost column takes the price of the highest break that a build reaches.</p>
+        {device.can.editQuote && <RemoveQuote device={device} />}
+      </div>
+    </div>
   );
 }
 

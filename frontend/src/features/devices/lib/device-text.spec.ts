@@ -36,7 +36,7 @@ describe('lowestPriceText(quote)', () => {
 describe('columnText(sheet, column, unit)', () => {
   it('is empty for a column that the datasheet does not give', () => {
     expect(columnText({ min: 75e6 }, 'max', 'MHz')).toBe('');
-    expect(plain(columnText({ min: 75e6 }, 'min', 'MHz'))).toBe('75.0 MHz');
+    expect(plain(columnText({ min: 75e6 }, 'min', 'MHz'))).toBe('75 MHz');
   });
 });
 

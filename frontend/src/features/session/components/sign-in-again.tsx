@@ -11,7 +11,7 @@ export function SignInAgain({ session, onDone }: { session: Session; onDone: () 
       <p className="soft" style={{ marginBottom: 12 }}>
         Sign in again to go on. The page behind keeps what you typed.
       </p>
-      <SignInForm initialEmail={session.user?.email} onDone={onDone} />
+      <SignInForm autoFocus initialEmail={session.user?.email} onDone={onDone} />
       {session.demo && <DemoPeople accounts={session.demoAccounts} onDone={onDone} />}
     </Modal>
   );

@@ -7,7 +7,13 @@ import { useSignIn } from '../mutations';
 import { EmailField, PasswordField } from './credential-fields';
 import styles from './session-card.module.css';
 
-export function SignInForm({ initialEmail = '', onDone }: { initialEmail?: string; onDone?: () => void }) {
+interface SignInFormProps {
+  initialEmail?: string;
+  onDone?: () => void;
+  autoFocus?: boolean;
+}
+
+export function SignInForm({ initialEmail = '', onDone, autoFocus }: SignInFormProps) {
   const [email, setEmail] = useState(initialEmail);
   const [password, setPassword] = useState('');
   const signIn = useSignIn();
@@ -24,7 +30,7 @@ export function SignInForm({ initialEmail = '', onDone }: { initialEmail?: strin
         </p>
       )}
       {!refused && <ErrorNotice error={signIn.error} />}
-      <EmailField id="sign-in-email" label="E-mail address" value={email} onChange={setEmail} autoFocus />
+      <EmailField id="sign-in-email" label="E-mail address" value={email} onChange={setEmail} autoFocus={autoFocus} />
       <PasswordField id="sign-in-password" label="Password" value={password} onChange={setPassword} />
       <Button type="primary" htmlType="submit" loading={signIn.isPending}>
         Sign in
