@@ -1,4 +1,4 @@
-import type { ChainReport, Check, CheckId, Verdict } from '../../../api/types';
+import type { Check, CheckId, Verdict } from '../../../api/types';
 
 const BADNESS: Readonly<Record<Verdict, number>> = { clear: 0, tight: 1, unknown: 2, over: 3 };
 
@@ -28,7 +28,12 @@ export function laneVerdict(checks: readonly Check[], fallback: Verdict): Verdic
   return verdictOf(checks, ...LANE_CHECKS) ?? fallback;
 }
 
-export function chainLaneVerdict({ checks, stages }: Pick<ChainReport, 'checks' | 'stages'>): Verdict {
+interface Checked {
+  readonly checks: readonly Check[];
+}
+
+/** The chain carries as far as its worst stage does, and as its own requirements say. */
+export function chainLaneVerdict({ checks, stages }: Checked & { readonly stages: readonly Checked[] }): Verdict {
   const ofStages = stages.map((stage) => verdictOf(stage.checks, ...LANE_CHECKS)).filter((verdict) => verdict !== null);
   const ofChain = verdictOf(checks, ...CHAIN_LANE_CHECKS);
   return worstVerdict(ofChain === null ? ofStages : [...ofStages, ofChain]) ?? 'clear';

@@ -11,6 +11,7 @@ import { useNarrow } from '../use-narrow';
 import { useWorkspace } from '../workspace-context';
 import { EmptyChain } from './empty-chain';
 import styles from './frame.module.css';
+import { LastStep } from './last-step';
 
 export function LedgerSection() {
   const { control, preview, chain } = useWorkspace();
@@ -42,6 +43,7 @@ function AddButton({ onClick }: { onClick: () => void }) {
       <Button icon={<PlusOutlined />} onClick={onClick} disabled={full}>
         Add a stage
       </Button>
+      <LastStep />
       {full && <span className="soft">A chain has at most {MAXIMUM_STAGES} stages.</span>}
     </div>
   );

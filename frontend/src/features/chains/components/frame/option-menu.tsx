@@ -111,7 +111,7 @@ function RenameOption({ onClose }: { onClose: () => void }) {
 }
 
 function RenameChain({ onClose }: { onClose: () => void }) {
-  const { chain } = useWorkspace();
+  const { chain, control } = useWorkspace();
   const rename = useRenameChain(chain);
   return (
     <NameDialog
@@ -122,7 +122,9 @@ function RenameChain({ onClose }: { onClose: () => void }) {
       error={rename.error}
       busy={rename.isPending}
       onSubmit={async (name) => {
-        await rename.mutateAsync(name);
+        const saved = await rename.mutateAsync(name);
+        // The draft is not out of date because of a new name.
+        control.rebase({ ...control.base, chainVersion: saved.version });
         onClose();
       }}
       onClose={onClose}

@@ -2,6 +2,7 @@ import { useLayoutEffect, useRef, useState, type KeyboardEvent, type RefObject }
 
 import { neighbourOf, stageIndex } from '../../lib/draft';
 import { useWorkspace, type Workspace } from '../workspace-context';
+import { rowOf } from './row-of';
 
 export interface RowKeys {
   /** The row that Tab reaches. */
@@ -65,7 +66,7 @@ export function useRowKeys(table: RefObject<HTMLElement | null>): RowKeys {
   // After the rows have been drawn in their new order; React may have taken the focused row out for a moment.
   useLayoutEffect(() => {
     if (wanted.current === null) return;
-    const row = table.current?.querySelector<HTMLElement>(`[data-stage="${CSS.escape(wanted.current)}"]`);
+    const row = rowOf(table.current, wanted.current);
     wanted.current = null;
     row?.focus();
     row?.scrollIntoView({ block: 'nearest' });

@@ -76,9 +76,9 @@ function CornerMarks({ scales, gainDb, box }: { scales: PlotScales; gainDb: numb
             <line className={styles.corner} x1={x} x2={x} y1={scales.y(gainDb) - 12} y2={scales.y(gainDb) + 12} />
             <text
               className={styles.markText}
-              x={index === 0 ? x + 7 : x - 7}
-              y={scales.y(gainDb) + 22}
-              textAnchor={index === 0 ? 'start' : 'end'}
+              x={index === 0 ? x - 7 : x + 7}
+              y={scales.y(gainDb) - 8}
+              textAnchor={index === 0 ? 'end' : 'start'}
             >
               −3 dB {formatFigure(figure).text}
             </text>

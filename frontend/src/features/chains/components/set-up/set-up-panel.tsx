@@ -10,6 +10,7 @@ import type { KeyboardEvent } from 'react';
 import type { Stage } from '../../../../api/types';
 import { neighbourOf, stageIndex } from '../../lib/draft';
 import { isFeedbackStage } from '../../lib/stage-defaults';
+import { rowOf } from '../ledger/row-of';
 import { useNarrow } from '../use-narrow';
 import { useWorkspace } from '../workspace-context';
 import { BlockForm } from './block-form';
@@ -46,7 +47,7 @@ function DockedPanel({ stage, onClose }: PanelProps) {
   const onKeyDown = (event: KeyboardEvent) => {
     if (event.key !== 'Escape' || event.defaultPrevented) return;
     onClose();
-    document.querySelector<HTMLElement>(`[data-stage="${CSS.escape(stage.id)}"]`)?.focus();
+    rowOf(document, stage.id)?.focus();
   };
   return (
     <section
