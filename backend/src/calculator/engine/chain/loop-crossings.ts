@@ -24,72 +24,77 @@ export interface LoopSamples {
   readonly length: number;
 }
 
-interface Sample {
-  readonly logHz: number;
-  readonly re: number;
-  readonly im: number;
-  /** Unwrapped, radians. */
-  readonly phase: number;
-  readonly logPower: number;
-}
-
 interface Crossing {
   readonly frequencyHz: number;
+  /** Unwrapped, radians. */
   readonly phase: number;
 }
 
-/** An interval over which the phase turns further than this is halved: the unwrapped phase could be a turn off. */
-const LARGEST_TURN = Math.PI / 3;
+/** cos² of 60°: an interval over which the phase turns further is halved, or the unwrapped phase could be a turn off. */
+const LARGEST_TURN_COS_SQUARED = 0.25;
 const DEEPEST_TURN = 24;
 /** Intervals beside an extremum of |T| are cut this often: two crossings could hide between their ends. */
 const EXTREMUM_DEPTH = 4;
-const TOLERANCE = 1e-12;
+/** Of the logarithm of the frequency. */
+const TOLERANCE = 1e-11;
 
-function sampleAfter(before: Sample, logHz: number, re: number, im: number): Sample {
-  const turn = Math.atan2(im * before.re - re * before.im, re * before.re + im * before.im);
-  return { logHz, re, im, phase: before.phase + turn, logPower: Math.log(re * re + im * im) };
-}
-
-/** Walks a loop from low to high frequency, follows its phase and collects the crossings of |T| = 1. */
+/**
+ * Walks a loop from low to high frequency and collects the crossings of |T| = 1. The phase is followed by counting the
+ * passages of the negative real axis; only at a crossing is an angle computed.
+ */
 class LoopWalk {
   readonly crossings: Crossing[] = [];
   private readonly out: MutableComplex = { re: 0.5, im: 0.5 };
-  private at: Sample;
+  private turns = 0;
 
   constructor(
     private readonly loop: LoopFunction,
-    logHz: number,
-    re: number,
-    im: number,
-  ) {
-    this.at = { logHz, re, im, phase: Math.atan2(im, re), logPower: Math.log(re * re + im * im) };
-  }
+    private hz: number,
+    private re: number,
+    private im: number,
+  ) {}
 
   /** Goes on to the next known sample; `depth` > 0 cuts the interval that often whatever its ends look like. */
-  goTo(logHz: number, re: number, im: number, depth: number, turns = 0): void {
-    const from = this.at;
-    const to = sampleAfter(from, logHz, re, im);
-    const steep = Math.abs(to.phase - from.phase) > LARGEST_TURN && turns < DEEPEST_TURN;
-    if (depth > 0 || steep) {
-      const middle = (from.logHz + logHz) / 2;
-      this.loop(Math.exp(middle), this.out);
-      this.goTo(middle, this.out.re, this.out.im, depth - 1, turns + 1);
-      this.goTo(logHz, re, im, depth - 1, turns + 1);
+  goTo(hz: number, re: number, im: number, depth: number, halvings = 0): void {
+    const fromPower = this.re * this.re + this.im * this.im;
+    const toPower = re * re + im * im;
+    const dot = this.re * re + this.im * im;
+    const steep = dot < 0 || dot * dot < LARGEST_TURN_COS_SQUARED * fromPower * toPower;
+    if (depth > 0 || (steep && halvings < DEEPEST_TURN)) {
+      const middle = Math.sqrt(this.hz * hz);
+      this.loop(middle, this.out);
+      this.goTo(middle, this.out.re, this.out.im, depth - 1, halvings + 1);
+      this.goTo(hz, re, im, depth - 1, halvings + 1);
       return;
     }
-    if (from.logPower >= 0 !== to.logPower >= 0) this.cross(from, to);
-    this.at = to;
+    if (fromPower >= 1 !== toPower >= 1) this.cross(hz, fromPower, toPower);
+    this.turns += this.passage(re, im);
+    this.hz = hz;
+    this.re = re;
+    this.im = im;
   }
 
-  private cross(from: Sample, to: Sample): void {
+  /** Turns that the principal value misses on the way to a near point: −1 over the negative real axis downwards… */
+  private passage(re: number, im: number): number {
+    if (im >= 0 === this.im >= 0 || (re >= 0 && this.re >= 0)) return 0;
+    // The chord's place on the real axis decides where one end lies to the right of the imaginary axis.
+    const onRealAxis = this.re - (this.im * (re - this.re)) / (im - this.im);
+    if (onRealAxis > 0) return 0;
+    return im >= 0 ? -1 : 1;
+  }
+
+  private cross(toHz: number, fromPower: number, toPower: number): void {
     const { out } = this;
     const logPower = (logHz: number): number => {
       this.loop(Math.exp(logHz), out);
       return Math.log(out.re * out.re + out.im * out.im);
     };
-    const logHz = findRoot(logPower, from.logHz, from.logPower, to.logHz, to.logPower, TOLERANCE);
-    this.loop(Math.exp(logHz), out);
-    this.crossings.push({ frequencyHz: Math.exp(logHz), phase: sampleAfter(from, logHz, out.re, out.im).phase });
+    const from = Math.log(this.hz);
+    const logHz = findRoot(logPower, from, Math.log(fromPower), Math.log(toHz), Math.log(toPower), TOLERANCE);
+    const frequencyHz = Math.exp(logHz);
+    this.loop(frequencyHz, out);
+    const turns = this.turns + this.passage(out.re, out.im);
+    this.crossings.push({ frequencyHz, phase: Math.atan2(out.im, out.re) + 2 * Math.PI * turns });
   }
 }
 
@@ -110,10 +115,10 @@ export function marginFromSamples(samples: LoopSamples, loop: LoopFunction): Loo
   const { frequenciesHz, re, im, length } = samples;
   const power = new Float64Array(length);
   for (let i = 0; i < length; i++) power[i] = re[i] * re[i] + im[i] * im[i];
-  const walk = new LoopWalk(loop, Math.log(frequenciesHz[0]), re[0], im[0]);
+  const walk = new LoopWalk(loop, frequenciesHz[0], re[0], im[0]);
   for (let i = 1; i < length; i++) {
     const hidden = turnsTowardsOne(power, i - 1, length) || turnsTowardsOne(power, i, length);
-    walk.goTo(Math.log(frequenciesHz[i]), re[i], im[i], hidden ? EXTREMUM_DEPTH : 0);
+    walk.goTo(frequenciesHz[i], re[i], im[i], hidden ? EXTREMUM_DEPTH : 0);
   }
   return marginOf(walk.crossings);
 }
