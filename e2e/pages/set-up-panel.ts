@@ -15,7 +15,7 @@ export class SetUpPanel {
     this.wantedGain = this.panel.getByLabel('Wanted gain');
     this.feedbackResistor = this.panel.getByLabel('Feedback resistor Rf');
     this.needs = this.panel.getByRole('region', { name: 'What passes here' });
-    this.devices = this.panel.getByRole('region', { name: /^Devices in / });
+    this.devices = this.panel.getByRole('region', { name: 'Devices tried in this place' });
   }
 
   field(label: string): Locator {
