@@ -10,7 +10,7 @@ export function NameField({ stage, index }: { stage: Stage; index: number }) {
   const { error, set, disabled } = useStageForm(stage);
   const message = error('name') ?? (stage.name.trim() === '' ? 'Give a name.' : null);
   return (
-    <h3 className={styles.name}>
+    <h2 className={styles.name}>
       <span>S{index + 1}</span>
       <Input
         variant="borderless"
@@ -24,6 +24,6 @@ export function NameField({ stage, index }: { stage: Stage; index: number }) {
         title={message ?? 'Name of the stage'}
       />
       {message && <span className={styles.nameError}>{message}</span>}
-    </h3>
+    </h2>
   );
 }
