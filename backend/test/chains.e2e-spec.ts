@@ -2,7 +2,7 @@ import { randomUUID } from 'node:crypto';
 import { TestApp } from './create-test-app';
 import type { SignedIn } from './create-test-app';
 import { createChain, createProject, invertingStage, rcStage, specification } from './factories/chains';
-import { createDevice } from './factories/devices';
+import { createDevice, voltageFeedbackBody } from './factories/devices';
 
 describe('chains', () => {
   let testApp: TestApp;
@@ -158,17 +158,7 @@ describe('chains', () => {
       await buyer.agent.delete(`/api/devices/${device.id}/quote`).expect(204);
       expect((await summary()).cost).toMatchObject({ amountMicros: null, reason: expect.any(String) });
       const before = (await summary()).worstHeadroom.value;
-      const {
-        id,
-        version: _v,
-        can,
-        enteredBy,
-        verifiedBy,
-        verified,
-        updatedAt,
-        ...values
-      } = (await designer.agent.get(`/api/devices/${device.id}`)).body;
-      expect([id, can, enteredBy, verifiedBy, verified, updatedAt]).toHaveLength(6);
+      const values = voltageFeedbackBody({ partNumber: device.partNumber });
       const faster = { ...values, version: 1, gainBandwidthHz: { min: 150e6, typ: 200e6 } };
       await designer.agent.put(`/api/devices/${device.id}`).send(faster).expect(200);
       expect((await summary()).worstHeadroom.value).toBeCloseTo(2 * before, 6);

@@ -36,6 +36,7 @@ describe('devices', () => {
         ...body,
         id: expect.any(String),
         version: 1,
+        quoteVersion: 0,
         verified: false,
         enteredBy: { id: designer.user.id, name: designer.user.name },
         verifiedBy: null,

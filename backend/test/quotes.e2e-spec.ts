@@ -61,6 +61,21 @@ describe('quotes', () => {
     expect([reference, validUntil, supplier]).toEqual(['Q-4711', '2027-06-30', 'Invented Components']);
   });
 
+  it('answers a stale version with the device as it is now and stores nothing', async () => {
+    const { body: first } = await buyer.agent
+      .put(path)
+      .send({ ...quote(), version: 0 })
+      .expect(200);
+    expect(first.quoteVersion).toBe(1);
+    const late = { ...quote({ reference: 'late' }), version: 0 };
+    const response = await lead.agent.put(path).send(late).expect(409);
+    expect(response.body).toMatchObject({ code: 'stale_version', current: { quoteVersion: 1, quote: quote() } });
+    await lead.agent.delete(path).query({ version: 7 }).expect(409);
+    const { body: still } = await buyer.agent.get(`/api/devices/${deviceId}`).expect(200);
+    expect(still.quote).toEqual(quote());
+    await lead.agent.delete(path).query({ version: 1 }).expect(204);
+  });
+
   it('is for designers, buyers and leads', async () => {
     await testApp.anonymous().put(path).send(quote()).expect(401);
     await admin.agent.put(path).send(quote()).expect(403);

@@ -61,6 +61,8 @@ export const LIMITS = {
   channels: { unit: 'channels', minimum: 1, maximum: 64, integer: true },
   // Requests
   version: { unit: 'version', minimum: 1, maximum: 1e12, integer: true },
+  /** 0: there is none yet. */
+  quoteVersion: { unit: 'version', minimum: 0, maximum: 1e12, integer: true },
   page: { unit: 'page', minimum: 1, maximum: 1e6, integer: true },
   pageSize: { unit: 'rows', minimum: 1, maximum: 500, integer: true },
   curvePoints: { unit: 'points', minimum: 2, maximum: 2001, integer: true },

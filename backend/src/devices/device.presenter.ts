@@ -47,6 +47,7 @@ export function presentDevice(row: DeviceRow, user: SessionUser): LibraryDeviceD
   const device = {
     ...toEngineDevice(row),
     version: row.version,
+    quoteVersion: row.quoteVersion ?? 0,
     ...whenGiven('datasheet', datasheet),
     ...whenGiven('lifecycleDate', row.lifecycleDate),
     ...whenGiven('notes', row.notes),

@@ -1,9 +1,9 @@
-import { Body, Controller, Delete, HttpCode, Param, Put } from '@nestjs/common';
+import { Body, Controller, Delete, HttpCode, Param, Put, Query } from '@nestjs/common';
 import { ApiNoContentResponse, ApiOkResponse, ApiTags, getSchemaPath } from '@nestjs/swagger';
 import { CurrentUser } from '../common/decorators';
 import { EntityIdPipe } from '../common/entity-id.pipe';
 import type { SessionUser } from '../common/session-user';
-import { SetQuoteDto } from './dto/set-quote.dto';
+import { QuoteVersionQueryDto, SetQuoteDto } from './dto/set-quote.dto';
 import type { QuotedDeviceDto } from './dto/set-quote.dto';
 import { QuotesService } from './quotes.service';
 
@@ -25,7 +25,11 @@ export class QuotesController {
   @Delete()
   @HttpCode(204)
   @ApiNoContentResponse()
-  remove(@CurrentUser() user: SessionUser, @Param('id', EntityIdPipe) id: string): Promise<void> {
-    return this.quotes.remove(user, id);
+  remove(
+    @CurrentUser() user: SessionUser,
+    @Param('id', EntityIdPipe) id: string,
+    @Query() { version }: QuoteVersionQueryDto,
+  ): Promise<void> {
+    return this.quotes.remove(user, id, version);
   }
 }

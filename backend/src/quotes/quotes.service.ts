@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { InjectModel } from '@nestjs/sequelize';
 import type { Transaction } from 'sequelize';
 import { AuditService } from '../audit/audit.service';
-import { ForbiddenError, NotFoundError } from '../common/errors';
+import { ForbiddenError, NotFoundError, StaleVersionError } from '../common/errors';
 import type { SessionUser } from '../common/session-user';
 import { WriteQueue } from '../database/write-queue';
 import { DevicesService } from '../devices/devices.service';
@@ -22,41 +22,54 @@ export class QuotesService {
     private readonly audit: AuditService,
   ) {}
 
-  async set(user: SessionUser, deviceId: string, dto: SetQuoteDto): Promise<QuotedDeviceDto> {
-    const { quote: before } = await this.devices.findOne(user, deviceId);
-    if (!canSetQuote(user)) throw new ForbiddenError();
+  async set(user: SessionUser, deviceId: string, { version, ...quote }: SetQuoteDto): Promise<QuotedDeviceDto> {
     await this.queue.transaction(async (transaction) => {
-      await this.write(user.id, deviceId, dto, transaction);
+      const { quote: before } = await this.getCurrent(user, deviceId, version, transaction);
+      await this.write(user.id, deviceId, quote, transaction);
       const action = before ? 'quote.updated' : 'quote.created';
-      await this.audit.record(transaction, {
-        actorId: user.id,
-        action,
-        entity: 'quote',
-        entityId: deviceId,
-        before,
-        after: dto,
-      });
+      await this.record(user, action, deviceId, transaction, { before, after: quote });
     });
     return this.devices.findOne(user, deviceId);
   }
 
-  async remove(user: SessionUser, deviceId: string): Promise<void> {
-    const { quote: before } = await this.devices.findOne(user, deviceId);
-    if (!canSetQuote(user)) throw new ForbiddenError();
-    if (!before) throw new NotFoundError();
+  async remove(user: SessionUser, deviceId: string, version?: number): Promise<void> {
     await this.queue.transaction(async (transaction) => {
+      const { quote: before } = await this.getCurrent(user, deviceId, version, transaction);
+      if (!before) throw new NotFoundError();
       await this.quotes.destroy({ where: { deviceId }, transaction });
-      await this.audit.record(transaction, {
-        actorId: user.id,
-        action: 'quote.deleted',
-        entity: 'quote',
-        entityId: deviceId,
-        before,
-      });
+      await this.record(user, 'quote.deleted', deviceId, transaction, { before });
     });
   }
 
-  private async write(userId: string, deviceId: string, dto: SetQuoteDto, transaction: Transaction): Promise<void> {
+  /** The device with its quote, if `user` may change it and it is still as it was read. */
+  private async getCurrent(
+    user: SessionUser,
+    deviceId: string,
+    version: number | undefined,
+    transaction: Transaction,
+  ): Promise<QuotedDeviceDto> {
+    const device = await this.devices.findOne(user, deviceId, transaction);
+    if (!canSetQuote(user)) throw new ForbiddenError();
+    if (version !== undefined && version !== device.quoteVersion) throw new StaleVersionError(device);
+    return device;
+  }
+
+  private record(
+    user: SessionUser,
+    action: string,
+    entityId: string,
+    transaction: Transaction,
+    change: { before?: unknown; after?: unknown },
+  ): Promise<void> {
+    return this.audit.record(transaction, { actorId: user.id, action, entity: 'quote', entityId, ...change });
+  }
+
+  private async write(
+    userId: string,
+    deviceId: string,
+    dto: Omit<SetQuoteDto, 'version'>,
+    transaction: Transaction,
+  ): Promise<void> {
     const columns = {
       currency: dto.currency,
       reference: dto.reference ?? null,

@@ -332,6 +332,7 @@ export const API_LIMITS = {
     "breaks": {"minItems":1,"maxItems":20},
     "reference": {"minLength":1,"maxLength":120},
     "supplier": {"minLength":1,"maxLength":120},
+    "version": {"minimum":0,"maximum":1000000000000,"unit":"version"},
   },
   SetupDto: {
     "email": {"maxLength":254},

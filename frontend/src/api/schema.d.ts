@@ -829,6 +829,8 @@ export interface components {
             readonly version: number;
             readonly verified: boolean;
             readonly quote?: components["schemas"]["Quote"];
+            /** @description Version of the quote; 0 without one */
+            readonly quoteVersion: number;
             readonly datasheet?: components["schemas"]["Datasheet"];
             /** Format: date */
             readonly lifecycleDate?: string;
@@ -1256,6 +1258,8 @@ export interface components {
             readonly version: number;
             readonly verified: boolean;
             readonly quote?: components["schemas"]["Quote"];
+            /** @description Version of the quote; 0 without one */
+            readonly quoteVersion: number;
             readonly datasheet?: components["schemas"]["Datasheet"];
             /** Format: date */
             readonly lifecycleDate?: string;
@@ -1568,6 +1572,8 @@ export interface components {
              */
             readonly validUntil?: string;
             readonly supplier?: string;
+            /** @description The `quoteVersion` that was read; absent: not compared */
+            readonly version?: number;
         };
         readonly SetupDto: {
             /** @description SETUP_TOKEN, or the token that the server printed at its start */
@@ -1997,6 +2003,8 @@ export interface components {
             readonly version: number;
             readonly verified: boolean;
             readonly quote?: components["schemas"]["Quote"];
+            /** @description Version of the quote; 0 without one */
+            readonly quoteVersion: number;
             readonly datasheet?: components["schemas"]["Datasheet"];
             /** Format: date */
             readonly lifecycleDate?: string;
@@ -2526,7 +2534,10 @@ export interface operations {
     };
     readonly quotesRemove: {
         readonly parameters: {
-            readonly query?: never;
+            readonly query?: {
+                /** @description The `quoteVersion` that was read; absent: not compared */
+                readonly version?: number;
+            };
             readonly header?: never;
             readonly path: {
                 readonly id: string;

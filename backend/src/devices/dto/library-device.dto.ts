@@ -23,6 +23,7 @@ class LibraryRowDto {
   @ApiProperty({ type: 'integer' }) readonly version: number;
   @ApiProperty() readonly verified: boolean;
   @ApiProperty({ type: () => QuoteDto, required: false }) readonly quote?: QuoteDto;
+  @ApiProperty({ type: 'integer', description: 'Version of the quote; 0 without one' }) readonly quoteVersion: number;
   @ApiProperty({ type: () => DatasheetDto, required: false }) readonly datasheet?: DatasheetDto;
   @ApiProperty({ format: 'date', required: false }) readonly lifecycleDate?: string;
   @ApiProperty({ required: false }) readonly notes?: string;
