@@ -50,8 +50,9 @@ function cornerNeed(facts: ChainFacts, stage: StageFacts): StageNeed | null {
 function stableGainNeed(stage: StageFacts): StageNeed | null {
   const noiseGain = stage.analysis.noiseGain;
   if (stage.stage.kind !== 'voltage-feedback' || noiseGain === null) return null;
-  const atCrossing = stage.stability?.atMaximum.noiseGainAtCrossing ?? noiseGain;
-  const most = Math.min(noiseGain, atCrossing);
+  const { atMinimum, atMaximum } = stage.stability ?? {};
+  const atCrossings = [atMinimum?.noiseGainAtCrossing, atMaximum?.noiseGainAtCrossing];
+  const most = Math.min(noiseGain, ...atCrossings.filter((gain) => typeof gain === 'number'));
   const rounded = roundAway(most, Math.floor);
   return {
     id: 'minimum-stable-gain',

@@ -7,6 +7,7 @@ import { limitFigure } from '../report/figures';
 import { noiseUnit } from '../report/stage-figures';
 import { decimalAmount, typed } from '../text/si-format';
 import { cannotBeJudged, capitalised, decibelLimitText, decibelText, valueText } from '../text/phrases';
+import { isAbove } from '../text/deciding-digits';
 import { makeCheck, unknownCheck, verdictAtMost } from './make-check';
 
 /** A quantity that has to stay under a limit and tight within a share of it. */
@@ -146,7 +147,9 @@ export function costCheck(facts: ChainFacts): Check | null {
   if (amountMicros === null) {
     return unknownCheck('cost', 'cost', () => cannotBeJudged('the cost', reason ?? 'a price is missing'));
   }
-  const verdict = verdictAtMost(amountMicros, limitMicros, limitMicros * (1 - facts.policy.budgetMargin));
+  // Whole micro-units are exact: over by one of them is over.
+  const isTight = isAbove(amountMicros, limitMicros * (1 - facts.policy.budgetMargin));
+  const verdict = amountMicros > limitMicros ? 'over' : isTight ? 'tight' : 'clear';
   return makeCheck('cost', 'cost', verdict, () => costSentence(facts, amountMicros, limitMicros, verdict));
 }
 

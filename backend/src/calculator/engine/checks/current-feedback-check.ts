@@ -1,7 +1,8 @@
 import type { Check } from '../report';
 import type { ChainFacts, StageFacts } from '../report/facts';
+import { invertingInputResistanceFor } from '../devices/amplifier-values';
 import { figure, limitFigure } from '../report/figures';
-import type { CurrentFeedbackDevice, CurrentFeedbackStage, DatasheetValue } from '../types';
+import type { CurrentFeedbackDevice, CurrentFeedbackStage } from '../types';
 import { isBelow } from '../text/deciding-digits';
 import { atLeastText, valueText } from '../text/phrases';
 import { typed } from '../text/si-format';
@@ -10,13 +11,8 @@ import { makeCheck } from './make-check';
 /** Below this share of the reference circuit's Rf + NG·Rb the response peaks. Common practice. */
 export const LOWEST_FEEDBACK_SHARE = 0.95;
 
-/** A datasheet value by its typical column, else what there is. */
-export function typicalValue(value: DatasheetValue | undefined): number | null {
-  return value?.typ ?? value?.min ?? value?.max ?? null;
-}
-
 function referenceOhm(device: CurrentFeedbackDevice): number {
-  const buffer = typicalValue(device.invertingInputResistanceOhm) ?? 0;
+  const buffer = invertingInputResistanceFor(device).value;
   return device.referenceFeedbackOhm + device.referenceNoiseGain * buffer;
 }
 
@@ -25,7 +21,7 @@ export function feedbackResistorShare(stage: StageFacts): number | null {
   const { device } = stage;
   if (stage.stage.kind !== 'current-feedback' || device?.kind !== 'current-feedback') return null;
   if (stage.analysis.noiseGain === null) return null;
-  const buffer = typicalValue(device.invertingInputResistanceOhm) ?? 0;
+  const buffer = invertingInputResistanceFor(device).value;
   return (stage.stage.feedbackOhm + stage.analysis.noiseGain * buffer) / referenceOhm(device);
 }
 
@@ -50,7 +46,7 @@ export function feedbackResistorCheck(_facts: ChainFacts, stage: StageFacts): Ch
 }
 
 function smallResistorSentence(stage: StageFacts, set: CurrentFeedbackStage, device: CurrentFeedbackDevice): string {
-  const buffer = typicalValue(device.invertingInputResistanceOhm) ?? 0;
+  const buffer = invertingInputResistanceFor(device).value;
   const least = LOWEST_FEEDBACK_SHARE * referenceOhm(device) - (stage.analysis.noiseGain ?? 1) * buffer;
   return (
     `Its feedback resistor of ${typed(set.feedbackOhm, 'Ω')} is small for ${device.partNumber}: the response peaks. ` +

@@ -2,9 +2,11 @@ import type { Check, Verdict } from '../report';
 import { partName } from '../report/facts';
 import type { ChainFacts, StageFacts } from '../report/facts';
 import { figure, limitFigure } from '../report/figures';
+import { columnOf } from '../devices/used-values';
+import type { UsedValue } from '../analysis';
 import type { MatchedBlockDevice } from '../types';
-import { cannotBeJudged, decibelText, valueText } from '../text/phrases';
-import { typicalValue } from './current-feedback-check';
+import { isAbove, isBelow } from '../text/deciding-digits';
+import { cannotBeJudged, decibelLimitText, decibelText, valueText } from '../text/phrases';
 import { makeCheck, unknownCheck } from './make-check';
 
 const MILLIWATT = 1e-3;
@@ -18,8 +20,8 @@ function dbmOf(peakV: number, resistanceOhm: number): number {
 export function compressionCheck(facts: ChainFacts, stage: StageFacts): Check | null {
   const { device } = stage;
   if (device?.kind !== 'matched-block') return null;
-  const limitDbm = device.outputP1dbDbm?.min ?? typicalValue(device.outputP1dbDbm);
-  if (limitDbm === null) return null;
+  const limit = columnOf(device.outputP1dbDbm, ['min', 'typ', 'max']);
+  if (!limit) return null;
   const peak = stage.analysis.outputPeakV;
   if (peak.value === null) {
     const { reason } = peak;
@@ -27,14 +29,14 @@ export function compressionCheck(facts: ChainFacts, stage: StageFacts): Check | 
   }
   if (peak.value === 0) return makeCheck('compression', 'compression', 'clear', () => 'No signal: no compression.');
   const { value } = peak;
-  const marginDb = limitDbm - dbmOf(value, device.impedanceOhm);
+  const marginDb = limit.value - dbmOf(value, device.impedanceOhm);
   const { levelMarginDb } = facts.policy;
-  const verdict: Verdict = marginDb < 0 ? 'over' : marginDb < levelMarginDb ? 'tight' : 'clear';
+  const verdict = compressionVerdict(marginDb, levelMarginDb);
   return makeCheck(
     'compression',
     'compression',
     verdict,
-    () => compressionSentence(stage, device, value, limitDbm),
+    () => compressionSentence(stage, device, value, limit),
     () => ({
       actual: figure(marginDb, 'dB', { limits: [0, levelMarginDb] }),
       limit: limitFigure(levelMarginDb, 'dB'),
@@ -42,12 +44,20 @@ export function compressionCheck(facts: ChainFacts, stage: StageFacts): Check | 
   );
 }
 
-function compressionSentence(stage: StageFacts, device: MatchedBlockDevice, peakV: number, limitDbm: number): string {
+/** Levels that differ by rounding noise only are equal: a block driven just to its limit is not beyond it. */
+const EQUAL_DB = 1e-9;
+
+function compressionVerdict(marginDb: number, levelMarginDb: number): Verdict {
+  if (marginDb < -EQUAL_DB) return 'over';
+  return marginDb < levelMarginDb - EQUAL_DB ? 'tight' : 'clear';
+}
+
+function compressionSentence(stage: StageFacts, device: MatchedBlockDevice, peakV: number, limit: UsedValue): string {
+  const limitDbm = limit.value;
   const powerDbm = dbmOf(peakV, device.impedanceOhm);
-  const column = device.outputP1dbDbm?.min === undefined ? 'typical' : 'minimum';
   return (
     `At the largest input it gives ${decibelText(powerDbm, [limitDbm])}m; ${partName(stage)} compresses by 1 dB at ` +
-    `${decibelText(limitDbm)}m (${column}): ${decibelText(limitDbm - powerDbm, [0])} left.`
+    `${decibelLimitText(limitDbm)}m (${limit.text}): ${decibelText(limitDbm - powerDbm, [0])} left.`
   );
 }
 
@@ -64,9 +74,10 @@ export function supplyVoltageCheck(facts: ChainFacts, stage: StageFacts): Check 
       cannotBeJudged('the supply voltage', `Supply range of ${device.partNumber} is not entered.`);
     return unknownCheck('supply-voltage', 'supply voltage', sentence, () => figure(totalV, 'V'));
   }
+  const bounds = [min, max].filter((bound) => bound !== undefined);
   const broken = brokenBound(totalV, min, max);
   const sentence = (): string =>
-    `The supply is ${valueText(totalV, 'V')} in all; ${device.partNumber} takes ${rangeText(min, max)}.`;
+    `The supply is ${valueText(totalV, 'V', bounds)} in all; ${device.partNumber} takes ${rangeText(min, max)}.`;
   return makeCheck('supply-voltage', 'supply voltage', broken === null ? 'clear' : 'over', sentence, () => ({
     actual: figure(totalV, 'V', { limits: [min, max] }),
     limit: limitFigure([broken, max, min].find((bound) => typeof bound === 'number') ?? totalV, 'V'),
@@ -74,8 +85,8 @@ export function supplyVoltageCheck(facts: ChainFacts, stage: StageFacts): Check 
 }
 
 function brokenBound(totalV: number, least: number | undefined, most: number | undefined): number | null {
-  if (least !== undefined && totalV < least) return least;
-  return most !== undefined && totalV > most ? most : null;
+  if (least !== undefined && isBelow(totalV, least)) return least;
+  return most !== undefined && isAbove(totalV, most) ? most : null;
 }
 
 function rangeText(least: number | undefined, most: number | undefined): string {

@@ -94,8 +94,13 @@ export function swingCheck(facts: ChainFacts, stage: StageFacts): Check | null {
   const peak = outputPeakV.value ?? 0;
   const sides = (): string =>
     `Its output has to swing ${valueText(peak, 'V', [available])} peak; ` +
-    `${valueText(available, 'V', [peak])} peak is left between the rails`;
+    `${valueText(available, 'V', [peak])} peak is left between the rails${offsetRemark(stage)}`;
   return levelCheck(facts, { id: 'swing', title: 'output swing', headroom, sides, actual });
+}
+
+/** An offset that is not known is not in the swing: never left unsaid. */
+function offsetRemark(stage: StageFacts): string {
+  return stage.analysis.outputOffsetV.value === null ? ' (offset not known, taken as 0)' : '';
 }
 
 /** Peak output current into load and feedback against what the device gives. */

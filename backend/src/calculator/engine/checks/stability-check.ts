@@ -2,7 +2,7 @@ import type { StabilityAnalysis, StabilityPoint, UsedValue } from '../analysis';
 import type { Check, Figure, Verdict } from '../report';
 import { partName } from '../report/facts';
 import type { ChainFacts, StageFacts } from '../report/facts';
-import { limitFigure } from '../report/figures';
+import { figure, limitFigure } from '../report/figures';
 import { stageFigure, worsePoint } from '../report/stage-figures';
 import { isBelow } from '../text/deciding-digits';
 import { basisText, noiseGainText, setFrequency, setNumber, valueText } from '../text/phrases';
@@ -61,12 +61,19 @@ function noiseGainTooLow(each: Case): Check | null {
   const noiseGain = lowestNoiseGain(each);
   if (least === null || noiseGain === null || !isBelow(noiseGain, least)) return null;
   const sentence = (): string =>
-    `Its noise gain of ${noiseGainText(noiseGain)} is below ${noiseGainText(least)}, ` +
-    `the smallest at which ${partName(each.stage)} is stable.`;
+    `Its noise gain of ${noiseGainText(noiseGain, [least])}${whereLow(each, noiseGain)} is below ` +
+    `${noiseGainText(least)}, the smallest at which ${partName(each.stage)} is stable.`;
   return makeCheck('stability', TITLE, 'over', sentence, () => ({
-    actual: stageFigure(each.facts, each.stage, 'noiseGain'),
+    actual: figure(noiseGain, 'ratio', { plainGain: true, limits: [least] }),
     limit: limitFigure(least, 'ratio'),
   }));
+}
+
+/** Said only where capacitances make it another noise gain than the one of the resistors. */
+function whereLow(each: Case, noiseGain: number): string {
+  const { noiseGain: midband } = each.stage.analysis;
+  const isMidband = midband !== null && noiseGainText(midband) === noiseGainText(noiseGain);
+  return isMidband ? '' : ' where the loop gain crosses 1';
 }
 
 function marginTooSmall(each: Case): Check | null {
@@ -136,7 +143,7 @@ function silentCurrentFeedback(each: Case): Check {
   const share = feedbackResistorShare(each.stage);
   const { stage } = each.stage;
   const hasCapacitor = stage.kind === 'current-feedback' && (stage.feedbackF ?? 0) > 0;
-  if (share === null || share < LOWEST_FEEDBACK_SHARE || hasCapacitor) {
+  if (share === null || isBelow(share, LOWEST_FEEDBACK_SHARE) || hasCapacitor) {
     const why = hasCapacitor ? 'and there is a capacitor across Rf' : 'and Rf is smaller than in the reference circuit';
     const sentence = (): string =>
       `${partName(each.stage)} has no second pole entered ${why}: stability cannot be told. Enter it on its device page.`;

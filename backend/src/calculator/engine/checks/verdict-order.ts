@@ -1,5 +1,5 @@
 import { CHECK_IDS } from '../report';
-import type { Check, Verdict } from '../report';
+import type { Check, Unit, Verdict } from '../report';
 
 /** From best to worst. */
 const BADNESS: Readonly<Record<Verdict, number>> = { clear: 0, tight: 1, unknown: 2, over: 3 };
@@ -29,11 +29,19 @@ export function isWorse(a: Check, b: Check): boolean {
   return distance(a) > distance(b);
 }
 
-/** How far a check's figure is from its limit, as a ratio ≥ 1. */
+const LEVELS: ReadonlySet<Unit> = new Set<Unit>(['dB', 'dBΩ', 'deg']);
+
+/**
+ * How far a check's figure is on the wrong side of its limit or target; negative on the right side. Checks of one kind are
+ * compared, and all those that several stages have ask for at least their limit, a lower corner for at most.
+ */
 function distance(check: Check): number {
-  const actual = Math.abs(check.actual?.value ?? 0);
-  const limit = Math.abs(check.limit?.value ?? 0);
-  if (actual === 0 || limit === 0) return 0;
-  const ratio = Math.abs(Math.log(actual / limit));
-  return check.verdict === 'over' ? ratio : -ratio;
+  const actual = check.actual?.value ?? null;
+  const limit = check.limit?.value ?? null;
+  if (actual === null || limit === null) return 0;
+  if (LEVELS.has(check.actual?.unit ?? 'ratio')) return (limit - actual) / Math.max(Math.abs(limit), 1);
+  if (actual <= 0 || limit <= 0) return Number.POSITIVE_INFINITY;
+  const short = Math.log(limit / actual);
+  if (check.id === 'supply-voltage') return Math.abs(short);
+  return check.id === 'lower-corner' ? -short : short;
 }

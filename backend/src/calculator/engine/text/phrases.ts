@@ -18,9 +18,9 @@ export function gainText(gain: number): string {
   return quantity(gain, 'gain', digitsWithoutTrailingZeros(gain, 4));
 }
 
-/** A noise gain without sign or cross: "11", "4.162". */
-export function noiseGainText(noiseGain: number): string {
-  return trimmed(noiseGain, 4);
+/** A noise gain without sign or cross, with the digits that show its side of the limits: "11", "4.162", "6.99997". */
+export function noiseGainText(noiseGain: number, limits: readonly number[] = []): string {
+  return trimmed(noiseGain, decidingDigits(noiseGain, 4, limits));
 }
 
 /** A margin as a ratio, with the digits that show its side of the limits: "×0.974", "×3.38". */

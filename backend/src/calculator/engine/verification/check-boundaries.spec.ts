@@ -43,8 +43,8 @@ describe('which of several stages the chain names', () => {
     expect(report.verdict).toMatchObject({ verdict: 'tight', stageId: 's2' });
   });
 
-  it('of two phase margins under the limit the negative one', () => {
-    // 40 pF against 2 kΩ and, twenty times as much, 800 pF: the second has the lower margin.
+  it('of two phase margins under the limit the smaller one', () => {
+    // Crossings near √(100 MHz · f2): the lower the second pole, the smaller the margin.
     const poor = { secondPoleHz: 5e6 };
     const worse = { secondPoleHz: 0.2e6 };
     const stages = [tenfold('s1', 'poor'), tenfold('s2', 'worse')];
@@ -84,7 +84,7 @@ describe('a noise gain just under the minimum stable gain', () => {
 
 describe('supply voltage', () => {
   it.each([
-    // 5.1 − 12.1 in binary is a hair off 12.1 + … : exactly met is met.
+    // 3.3 + 1.8 is 5.1 but for the last binary digit: exactly met is met.
     [{ positiveV: 3.3, negativeV: -1.8 }, { min: 5.1, max: 12 }, 'clear'],
     [{ positiveV: 3.3, negativeV: -1.8 }, { min: 2.7, max: 5.1 }, 'clear'],
     [{ positiveV: 6.02, negativeV: -6.02 }, { min: 5, max: 12 }, 'over'],

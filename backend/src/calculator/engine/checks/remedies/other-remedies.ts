@@ -39,7 +39,7 @@ export function swingRemedies(trials: Trials, stage: StageFacts): readonly Found
   const headroom = swingHeadroom(stage).value;
   if (headroom === null || headroom <= 0) return [];
   const missing = trials.before.facts.policy.levelMarginDb - ratioToDb(headroom);
-  const sentence = `The level here has to come down by ${valueText(missing, 'dB')}, or the supply has to go up.`;
+  const sentence = `The level here has to come down by ${atLeastText(missing, 'dB')}, or the supply has to go up.`;
   return [hint(sentence)];
 }
 
