@@ -129,15 +129,19 @@ const nodeSpecs = (title, folder) =>
     plain,
   );
 
-const backendSpecs = suite(
-  'backend specs',
-  'jest',
-  20,
-  (file) => [bin('jest/bin/jest.js'), '--json', '--outputFile', file, '--silent'],
-  () => ({
-    cwd: fromRoot('backend'),
-  }),
-);
+const jest = (title, ...options) =>
+  suite(
+    title,
+    'jest',
+    25,
+    (file) => [bin('jest/bin/jest.js'), '--json', '--outputFile', file, '--silent', ...options],
+    () => ({ cwd: fromRoot('backend') }),
+  );
+
+/** What is measured in time runs alone: two suites at once would measure each other. */
+const SPEED_SPECS = 'src/bench\\.spec\\.ts$';
+const backendSpecs = jest('backend specs', '--testPathIgnorePatterns', SPEED_SPECS);
+const backendSpeed = jest('speed of the backend', '--runInBand', '--testPathPatterns', SPEED_SPECS);
 
 const frontendSpecs = suite(
   'frontend specs',
@@ -149,17 +153,16 @@ const frontendSpecs = suite(
   }),
 );
 
-const journeys = {
-  title: 'browser journeys',
+const playwright = (title, ...options) => ({
+  title,
   action: async (say) => {
     const chromium = await findChromium(say);
-    if (chromium.problem)
-      return { passed: 0, failed: 1, failures: [{ title: 'browser journeys', message: chromium.problem }] };
+    if (chromium.problem) return { passed: 0, failed: 1, failures: [{ title, message: chromium.problem }] };
     const step = suite(
-      'browser journeys',
+      title,
       'playwright',
-      20,
-      () => [bin('@playwright/test/cli.js'), 'test', '--reporter=json'],
+      30,
+      () => [bin('@playwright/test/cli.js'), 'test', '--reporter=json', ...options],
       (file) => ({
         cwd: fromRoot('e2e'),
         env: { ...process.env, CHROMIUM_PATH: chromium.path, PLAYWRIGHT_JSON_OUTPUT_NAME: file },
@@ -167,7 +170,10 @@ const journeys = {
     );
     return step.action();
   },
-};
+});
+
+const journeys = playwright('browser journeys', '--grep-invert', '@speed');
+const browserSpeed = playwright('speed in the browser', '--grep', '@speed', '--workers=1');
 
 /** Groups run one after the other, the steps of a group beside each other. */
 export const groups = [
@@ -178,6 +184,8 @@ export const groups = [
     nodeSpecs('launcher', '.tools/specs'),
   ],
   [backendSpecs],
+  [backendSpeed],
   [frontendSpecs],
   [journeys],
+  [browserSpeed],
 ];
