@@ -20,6 +20,8 @@ import type { ChainInput, Device } from './types';
 export { validateChain } from './chain/validate';
 export { EngineInputError, ENGINE_ISSUE_CODES } from './errors';
 export type { EngineIssue, EngineIssueCode } from './errors';
+export { RANGES } from './chain/issue-collector';
+export type { Range, RangeName } from './chain/issue-collector';
 export { DEFAULT_POLICY, policyFrom } from './policy';
 export { CUSTOMARY_TOLERANCE, nearestPreferred, preferredDecade, PREFERRED_SERIES } from './preferred-values';
 export type { PreferredSeries } from './preferred-values';
@@ -31,12 +33,13 @@ export * from './report';
  * Everything that is said of a chain: figures in three GBW cases, verdicts, sentences, remedies, lanes, cost.
  *
  * @param input specification, policy, stages and devices in SI units
+ * @param alternatives devices that remedies may propose beside those of the input, e.g. the library; only active ones are
  * @returns the report; every number finite, every missing one with its reason
  * @throws EngineInputError with all issues (stable code and path) when the input cannot be calculated
  * @example calculate(input).verdict.lead // 'S2 spends more than it has.'
  */
-export function calculate(input: ChainInput): ChainReport {
-  return buildReport(input);
+export function calculate(input: ChainInput, alternatives: readonly Device[] = []): ChainReport {
+  return buildReport(input, alternatives);
 }
 
 /**

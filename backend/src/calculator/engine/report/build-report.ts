@@ -7,7 +7,7 @@ import { frequencyAxis } from '../lanes/axis';
 import type { ChainCaseReport, ChainReport, HeadlineItem, StageCaseReport, StageReport } from '../report';
 import { basisText, because } from '../text/phrases';
 import { GBW_CASES } from '../types';
-import type { ChainInput, GbwCase, GainBasis } from '../types';
+import type { ChainInput, Device, GainBasis, GbwCase } from '../types';
 import { CALCULATOR_VERSION } from '../version';
 import { chainFigures } from './chain-figures';
 import { gbwMaybe, worstHeadroom, worstHeadroomStage } from './derived';
@@ -35,13 +35,14 @@ function byCase<T>(of: (gbwCase: GbwCase) => T): ByCase<T> {
  * case, lanes, headline, cost.
  *
  * @param input whole chain
+ * @param alternatives devices that may be proposed beside those of the input
  * @throws EngineInputError when the input is refused
  */
-export function buildReport(input: ChainInput): ChainReport {
+export function buildReport(input: ChainInput, alternatives: readonly Device[] = []): ChainReport {
   const analysis = analyzeChain(input);
   const facts = byCase((gbwCase) => factsOf(input, analysis, gbwCase));
   const judgement = judge(facts[input.policy.gbwCase]);
-  const checks = findRemedies(judgement);
+  const checks = findRemedies(judgement, alternatives);
   const stages = input.stages.map((_, index) => stageReport(facts, checks, index, input.policy.gbwCase));
   const cases = byCase((gbwCase) => chainCaseReport(facts[gbwCase], facts.typical));
   const { band, gainBasis } = input.specification;

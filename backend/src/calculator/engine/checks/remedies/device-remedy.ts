@@ -46,11 +46,12 @@ function mayPass(trials: Trials, stage: StageFacts, device: Device): boolean {
   return have >= used * facts.policy.headroomTarget * PREFILTER_SHARE && !tooUnstable;
 }
 
-/** Devices of the kind that fits, without the present one, cheapest first; those without a price last. */
+/** Active devices of the kind that fits, without the present one, cheapest first; those without a price last. */
 export function devicesByPrice(trials: Trials, stage: StageFacts): readonly Device[] {
   const { input } = trials.before.facts;
-  return input.devices
+  return trials.devices
     .filter((device) => device.id !== stage.device?.id && withDevice(stage.stage, device) !== null)
+    .filter((device) => (device.lifecycle ?? 'active') === 'active')
     .map((device) => ({ device, price: priceInPlace(input, stage.stage, device) ?? Number.POSITIVE_INFINITY }))
     .sort(
       (a, b) =>

@@ -1,5 +1,6 @@
 import type { Check, CheckId } from '../../report';
 import type { StageFacts } from '../../report/facts';
+import type { Device } from '../../types';
 import { flatnessContributions, gainContributions } from '../contributions';
 import type { Judgement } from '../judge';
 import { plainCheck } from '../make-check';
@@ -57,9 +58,10 @@ export interface ChecksWithRemedies {
  * on gain and flatness of a chain whose stages pass. Every figure named comes from the full model of the changed chain.
  *
  * @param judgement the chain as it is
+ * @param alternatives devices that may be proposed beside those of the input
  */
-export function findRemedies(judgement: Judgement): ChecksWithRemedies {
-  const trials = createTrials(judgement, MOST_EVALUATIONS);
+export function findRemedies(judgement: Judgement, alternatives: readonly Device[] = []): ChecksWithRemedies {
+  const trials = createTrials(judgement, MOST_EVALUATIONS, alternatives);
   const found = new Map<Check, readonly FoundRemedy[]>();
   const order = judgement.facts.stages
     .flatMap((stage) => judgement.stageChecks[stage.index].map((check) => ({ stage, check })))

@@ -146,4 +146,15 @@ describe('remedies by check, each holding what it says', () => {
     const actions = remediesOf(input, 'gbw').map((remedy) => remedy.action);
     expect(actions).toEqual([undefined]);
   });
+
+  it('devices beside those of the input are proposed, unless they are at the end of their life', () => {
+    const device = voltageFeedbackDevice('d', 50e6, { ...COMPLETE, phaseMarginDeg: 60 });
+    const input = chainInput([voltageFeedbackStage('s', 'd', 'non-inverting', 900, 100)], [device]);
+    const faster = { ...device, id: 'f', partNumber: 'FAST-1', gainBandwidthHz: { min: 500e6 } };
+    const actions = (alternatives: (typeof faster)[]) =>
+      calculate(input, alternatives).stages[0].checks.flatMap((check) => check.remedies.map((each) => each.action));
+    expect(actions([])).not.toContain('Use FAST-1');
+    expect(actions([faster])).toContain('Use FAST-1');
+    expect(actions([{ ...faster, lifecycle: 'obsolete' } as typeof faster])).not.toContain('Use FAST-1');
+  });
 });

@@ -22,21 +22,30 @@ export interface Trial {
 /** Runs replacements through the full model, up to a number of them for one report. */
 export interface Trials {
   readonly before: Judgement;
+  /** Devices that may be proposed: those of the input and the alternatives. */
+  readonly devices: readonly Device[];
   /** Null: refused by the model, or the budget of evaluations is spent. */
   replace(stageIndex: number, stages: readonly Stage[]): Trial | null;
 }
 
-/** @param mostEvaluations how many chains may be evaluated for the remedies of one report */
-export function createTrials(before: Judgement, mostEvaluations: number): Trials {
+/**
+ * @param before the chain as it is
+ * @param mostEvaluations how many chains may be evaluated for the remedies of one report
+ * @param alternatives devices beside those of the input
+ */
+export function createTrials(before: Judgement, mostEvaluations: number, alternatives: readonly Device[]): Trials {
   let left = mostEvaluations;
+  const given = new Set(before.facts.input.devices.map((device) => device.id));
+  const devices = [...before.facts.input.devices, ...alternatives.filter((device) => !given.has(device.id))];
   return {
     before,
+    devices,
     replace(stageIndex, stages) {
       if (left <= 0) return null;
       left -= 1;
       const { input } = before.facts;
       const all = [...input.stages.slice(0, stageIndex), ...stages, ...input.stages.slice(stageIndex + 1)];
-      const after = tryEvaluate({ ...input, stages: all, devices: devicesOf(all, input.devices) });
+      const after = tryEvaluate({ ...input, stages: all, devices: devicesOf(all, devices) });
       return after ? { before, after, firstIndex: stageIndex, stages } : null;
     },
   };
