@@ -102,12 +102,17 @@ function stabilityOf(response: ChainResponse, grid: Float64Array, scan: StageSca
     if (noiseGainAtCrossing === null || noiseGain < noiseGainAtCrossing) noiseGainAtCrossing = noiseGain;
     crossingPower = Math.max(crossingPower, response.power[scan.index]);
   }
+  let peak: number | undefined;
   return {
     noCrossing: margin.noCrossing,
     phaseMarginDeg: margin.phaseMarginDeg,
     crossingHz: margin.crossingHz,
     noiseGainAtCrossing,
-    peakingDb: peakingDb(response, samples, scan, crossingPower, margin.crossingHz),
+    // Searched for when it is read: trying hundreds of devices never asks for it.
+    get peakingDb() {
+      peak ??= peakingDb(response, samples, scan, crossingPower, margin.crossingHz);
+      return peak;
+    },
   };
 }
 
