@@ -2,7 +2,7 @@ import type { MutableComplex } from '../complex';
 import { AmplifierNoise, NoiseTransfers, currentFeedbackTransfers, feedbackNoise } from './feedback-noise';
 import { FeedbackPartValues, FeedbackParts } from './feedback-parts';
 import type { FeedbackLoop, NetworkStage, StageNoise } from './network-stage';
-import type { LoadPort, Port } from './port';
+import { LoadPort, Port, clonePort } from './port';
 
 /** The amplifier itself: Z(s) = Z0/((1 + s·Z0/K)(1 + s/ω2)), seen through Rb from the inverting node. */
 export interface CurrentFeedbackValues {
@@ -60,7 +60,7 @@ export class CurrentFeedbackNetwork implements NetworkStage, FeedbackLoop {
   advance(port: Port, omega: number): void {
     this.tune(omega);
     const { parts, zRe, zIm } = this;
-    parts.drive(port, omega);
+    parts.drive(port);
     const { zfRe, zfIm, ygRe, ygIm, ngRe, ngIm, vPlusRe, vPlusIm, jRe, jIm } = parts;
     const ro = parts.values.outputOhm;
     const rb = this.values.invertingInputOhm;
@@ -96,7 +96,7 @@ export class CurrentFeedbackNetwork implements NetworkStage, FeedbackLoop {
       load.admittanceRe = values.inputS;
       load.admittanceIm = omega * values.inputF;
     }
-    this.parts.leaveInput(load, omega);
+    this.parts.leaveInput(load);
   }
 
   /**
@@ -155,9 +155,9 @@ export class CurrentFeedbackNetwork implements NetworkStage, FeedbackLoop {
   }
 
   ownNoise(front: Readonly<Port>, omega: number): StageNoise {
-    const networkPort = { ...front };
-    this.advance({ ...front }, omega);
-    this.parts.input.advance(networkPort, omega);
+    const networkPort = clonePort(front);
+    this.advance(clonePort(front), omega);
+    this.parts.input.advance(networkPort);
     return feedbackNoise(this.parts, networkPort, front, omega, this.values.noise, this.transfers());
   }
 

@@ -142,7 +142,7 @@ function networkSources(
     ? invertingGain(parts, transfers)
     : plusGain(parts, atAmplifier, omega, transfers);
   const squared = magnitudeSquared(gain);
-  return parts.input.resistors(front, omega).map(({ label, resistanceOhm, transimpedanceSquared }) => ({
+  return parts.input.resistors(front).map(({ label, resistanceOhm, transimpedanceSquared }) => ({
     label,
     v2PerHzAtOutput: (fourKT / resistanceOhm) * transimpedanceSquared * squared,
   }));

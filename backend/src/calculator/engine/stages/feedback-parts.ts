@@ -29,6 +29,8 @@ export interface FeedbackPartValues {
  */
 export class FeedbackParts {
   readonly input: InputNetwork;
+  /** The tuned frequency. */
+  omega = 0.5;
   /** Zf at the tuned frequency. */
   zfRe = 0.5;
   zfIm = 0.5;
@@ -57,39 +59,42 @@ export class FeedbackParts {
 
   tune(omega: number): void {
     const { feedbackOhm, feedbackF } = this.values;
+    this.omega = omega;
+    this.input.omega = omega;
     const x = omega * feedbackOhm * feedbackF;
     this.zfRe = feedbackOhm / (1 + x * x);
     this.zfIm = -x * this.zfRe;
-    if (!this.values.inverting) this.setLeg(this.values.gainS, 0, omega);
+    if (this.values.inverting) return;
+    this.yLegRe = this.values.gainS;
+    this.yLegIm = 0;
+    this.setLeg();
   }
 
   /** Yleg → Yg = Yleg + s·Cn and NG = 1 + Zf·Yg. */
-  private setLeg(yRe: number, yIm: number, omega: number): void {
-    this.yLegRe = yRe;
-    this.yLegIm = yIm;
-    this.ygRe = yRe;
-    this.ygIm = yIm + omega * this.values.nodeF;
+  private setLeg(): void {
+    this.ygRe = this.yLegRe;
+    this.ygIm = this.yLegIm + this.omega * this.values.nodeF;
     this.ngRe = 1 + this.zfRe * this.ygRe - this.zfIm * this.ygIm;
     this.ngIm = this.zfRe * this.ygIm + this.zfIm * this.ygRe;
   }
 
   /** Leads the port through the parts in front and sets V₊, Zp, J, Yleg, Yg and NG from it. */
-  drive(port: Port, omega: number): void {
-    this.input.advance(port, omega);
+  drive(port: Port): void {
+    this.input.advance(port);
     const { emfRe, emfIm, impedanceRe, impedanceIm } = port;
     if (this.values.inverting) {
       const zRe = impedanceRe + this.values.seriesOhm;
       const squared = zRe * zRe + impedanceIm * impedanceIm;
-      const yRe = zRe / squared;
-      const yIm = -impedanceIm / squared;
-      this.setLeg(yRe, yIm, omega);
+      const yRe = (this.yLegRe = zRe / squared);
+      const yIm = (this.yLegIm = -impedanceIm / squared);
+      this.setLeg();
       this.vPlusRe = this.vPlusIm = this.zpRe = this.zpIm = 0;
       this.jRe = emfRe * yRe - emfIm * yIm;
       this.jIm = emfRe * yIm + emfIm * yRe;
       return;
     }
     const yRe = this.values.inputS;
-    const yIm = omega * this.values.inputF;
+    const yIm = this.omega * this.values.inputF;
     const dRe = 1 + impedanceRe * yRe - impedanceIm * yIm;
     const dIm = impedanceRe * yIm + impedanceIm * yRe;
     const squared = dRe * dRe + dIm * dIm;
@@ -114,8 +119,8 @@ export class FeedbackParts {
   }
 
   /** The parts in front of the amplifier's own input impedance, right to left. */
-  leaveInput(load: LoadPort, omega: number): void {
-    this.input.inputImpedance(load, omega);
+  leaveInput(load: LoadPort): void {
+    this.input.inputImpedance(load);
   }
 
   /** Ideal amplifier: Yg/NG (non-inverting), 1/Zf (inverting: virtual ground). Of the last `tune` and `drive`. */

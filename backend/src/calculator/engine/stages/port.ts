@@ -20,18 +20,38 @@ export interface LoadPort {
   admittanceIm: number;
 }
 
+/** One class, so that all ports have one shape for the compiler: a second one would make every store allocate. */
+class PortFields implements Port {
+  emfRe = 0.5;
+  emfIm = 0.5;
+  impedanceRe = 0.5;
+  impedanceIm = 0.5;
+}
+
+class LoadFields implements LoadPort {
+  admittanceRe = 0.5;
+  admittanceIm = 0.5;
+}
+
 /** A port of its own. */
 export function createPort(): Port {
-  return { emfRe: 1.5, emfIm: 0.5, impedanceRe: 0.5, impedanceIm: 0.5 };
+  return new PortFields();
 }
 
 /** A load port of its own. */
 export function createLoadPort(): LoadPort {
-  return { admittanceRe: 0.5, admittanceIm: 0.5 };
+  return new LoadFields();
+}
+
+/** A copy that may be changed. */
+export function clonePort(source: Readonly<Port>): Port {
+  const port = createPort();
+  copyPort(port, source);
+  return port;
 }
 
 /** target ← source. */
-export function copyPort(target: Port, source: Port): void {
+export function copyPort(target: Port, source: Readonly<Port>): void {
   target.emfRe = source.emfRe;
   target.emfIm = source.emfIm;
   target.impedanceRe = source.impedanceRe;

@@ -1,6 +1,6 @@
 import { BOLTZMANN_J_PER_K } from '../constants';
 import type { NetworkStage, NoiseSource, StageNoise } from './network-stage';
-import { LoadPort, Port, seriesLoad, shuntPort } from './port';
+import { LoadPort, Port, clonePort, seriesLoad, shuntPort } from './port';
 
 /** Parts of a passive section, left to right; 0 stands for a part that is not there (series C: shorted). */
 export interface RcSectionValues {
@@ -46,7 +46,9 @@ export class RcSectionNetwork implements NetworkStage {
     const { seriesOhm, shuntS, ambientK } = this.values;
     const fourKT = 4 * BOLTZMANN_J_PER_K * ambientK;
     // A unit EMF in series with R sees the same divider as the signal.
-    const port: Port = { ...front, emfRe: 1, emfIm: 0 };
+    const port = clonePort(front);
+    port.emfRe = 1;
+    port.emfIm = 0;
     this.advance(port, omega);
     const sources: NoiseSource[] = [];
     if (seriesOhm > 0) {

@@ -2,7 +2,7 @@ import type { MutableComplex } from '../complex';
 import { AmplifierNoise, feedbackNoise, voltageFeedbackTransfers } from './feedback-noise';
 import { FeedbackParts, FeedbackPartValues } from './feedback-parts';
 import type { FeedbackLoop, NetworkStage, StageNoise } from './network-stage';
-import type { LoadPort, Port } from './port';
+import { LoadPort, Port, clonePort } from './port';
 
 /** The amplifier itself: A(s) = A0/((1 + s/ω1)(1 + s/ω2)). */
 export interface VoltageFeedbackValues {
@@ -63,7 +63,7 @@ export class VoltageFeedbackNetwork implements NetworkStage, FeedbackLoop {
   advance(port: Port, omega: number): void {
     this.tune(omega);
     const { parts, aRe, aIm, yd } = this;
-    parts.drive(port, omega);
+    parts.drive(port);
     const { zfRe, zfIm, ygRe, ygIm, ngRe, ngIm, vPlusRe, vPlusIm, jRe, jIm } = parts;
     const ro = parts.values.outputOhm;
     const mRe = (this.mRe = 1 - parts.zpIm * yd);
@@ -103,8 +103,8 @@ export class VoltageFeedbackNetwork implements NetworkStage, FeedbackLoop {
     this.tune(omega);
     this.parts.loadOutput(load);
     if (this.parts.values.inverting) this.intoInvertingNode(load);
-    else this.intoPlusPin(load, omega);
-    this.parts.leaveInput(load, omega);
+    else this.intoPlusPin(load);
+    this.parts.leaveInput(load);
   }
 
   /** 1/(Rg + 1/(s·(Cn + Cdiff) + (1 + A)/(Zf + Ro))), A and Ro loaded. */
@@ -125,10 +125,10 @@ export class VoltageFeedbackNetwork implements NetworkStage, FeedbackLoop {
   }
 
   /** Yi + Yd·(NG + Ro·Yg)/(A + NG + Ro·Yg + (Zf + Ro)·Yd), A and Ro loaded. */
-  private intoPlusPin(load: LoadPort, omega: number): void {
+  private intoPlusPin(load: LoadPort): void {
     const { values } = this.parts;
     load.admittanceRe = values.inputS;
-    load.admittanceIm = omega * values.inputF;
+    load.admittanceIm = this.tunedOmega * values.inputF;
     const { yd, parts } = this;
     if (yd === 0) return;
     const bracketRe = parts.ngRe + parts.loadedRoRe * parts.ygRe - parts.loadedRoIm * parts.ygIm;
@@ -170,9 +170,9 @@ export class VoltageFeedbackNetwork implements NetworkStage, FeedbackLoop {
   }
 
   ownNoise(front: Readonly<Port>, omega: number): StageNoise {
-    const networkPort = { ...front };
-    this.advance({ ...front }, omega);
-    this.parts.input.advance(networkPort, omega);
+    const networkPort = clonePort(front);
+    this.advance(clonePort(front), omega);
+    this.parts.input.advance(networkPort);
     return feedbackNoise(this.parts, networkPort, front, omega, this.values.noise, this.transfers());
   }
 
