@@ -78,7 +78,7 @@ interface NumberRowProps {
 /** A row with one number, without columns. */
 export const NumberRow = memo(function NumberRow({ field, value, problems, onChange }: NumberRowProps) {
   return (
-    <div className={styles.row} role="group" aria-label={labelOf(field)}>
+    <div className={styles.row}>
       <RowLabel field={field} filled={value !== null} />
       <div className={styles.single}>
         <QuantityInput

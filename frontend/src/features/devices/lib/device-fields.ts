@@ -87,7 +87,7 @@ const STABILITY: DeviceFieldGroup = {
       SINGLE,
       'The minimum stable noise gain is taken, else 1.',
     ),
-    secondPole('Second pole (goes before the phase margin)', 'It follows from the phase margin, where that is given.'),
+    secondPole('Second pole', 'It follows from the phase margin; where both are given, the second pole counts.'),
     OUTPUT_RESISTANCE,
   ],
 };
