@@ -35,13 +35,17 @@ const LEVELS: ReadonlySet<Unit> = new Set<Unit>(['dB', 'dBΩ', 'deg']);
  * How far a check's figure is on the wrong side of its limit or target; negative on the right side. Checks of one kind are
  * compared, and all those that several stages have ask for at least their limit, a lower corner for at most.
  */
-function distance(check: Check): number {
-  const actual = check.actual?.value ?? null;
-  const limit = check.limit?.value ?? null;
-  if (actual === null || limit === null) return 0;
-  if (LEVELS.has(check.actual?.unit ?? 'ratio')) return (limit - actual) / Math.max(Math.abs(limit), 1);
+function distance({ id, actual, limit }: Check): number {
+  if (!actual || !limit || actual.value === null || limit.value === null) return 0;
+  return LEVELS.has(actual.unit)
+    ? (limit.value - actual.value) / Math.max(Math.abs(limit.value), 1)
+    : ratioShort(id, actual.value, limit.value);
+}
+
+/** By how much a ratio-like figure falls short of its limit, as a logarithm. */
+function ratioShort(id: Check['id'], actual: number, limit: number): number {
   if (actual <= 0 || limit <= 0) return Number.POSITIVE_INFINITY;
   const short = Math.log(limit / actual);
-  if (check.id === 'supply-voltage') return Math.abs(short);
-  return check.id === 'lower-corner' ? -short : short;
+  if (id === 'supply-voltage') return Math.abs(short);
+  return id === 'lower-corner' ? -short : short;
 }

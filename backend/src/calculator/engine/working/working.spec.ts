@@ -43,7 +43,10 @@ function expectEveryWorking(input: ChainInput, cases: readonly GbwCase[]): void 
 
 describe('working', () => {
   it('of every figure of the receiver ends in the figure printed', () => {
-    expectEveryWorking(receiver('Baseline', { phaseMarginDeg: 60, outputOhm: 30, gainOhm: 100, couplingHz: 159e3 }), GBW_CASES);
+    expectEveryWorking(
+      receiver('Baseline', { phaseMarginDeg: 60, outputOhm: 30, gainOhm: 100, couplingHz: 159e3 }),
+      GBW_CASES,
+    );
   });
 
   it('of every figure of random chains ends in the figure printed, computed a second way from what it substitutes', () => {
