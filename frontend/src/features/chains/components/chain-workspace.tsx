@@ -1,24 +1,28 @@
-import { useMemo, useState } from 'react';
+import { Suspense, useMemo, useState } from 'react';
 
 import type { Chain, OptionDto } from '../../../api/types';
 import { ErrorNotice } from '../../../components/error-notice';
 import { useSessionUser } from '../../../components/session-context';
 import { useShortcutHelp, type ShortcutGroup } from '../../../components/shortcuts';
 import { SkeletonRows } from '../../../components/skeleton-rows';
-import { ChainWorking, type OpenWorking } from './frame/chain-working';
-import { Conflict } from './frame/conflict';
+import type { OpenWorking } from './frame/chain-working';
 import styles from './frame/frame.module.css';
 import { HeadlineFigures } from './frame/headline-figures';
 import { KeptNotice } from './frame/kept-notice';
-import { LeaveDialog } from './frame/leave-dialog';
 import { LedgerSection } from './frame/ledger-section';
 import { PreviewProblem } from './frame/preview-problem';
 import { SectionBar } from './frame/section-bar';
 import { VerdictBanner } from './frame/verdict-banner';
 import { WorkspaceHeader } from './frame/workspace-header';
-import { ResponseSection } from './response/response-section';
-import { SetUpPanel } from './set-up/set-up-panel';
-import { SpecificationDrawer } from './specification/specification-drawer';
+import {
+  ChainWorking,
+  Conflict,
+  LeaveDialog,
+  ResponseSection,
+  SetUpPanel,
+  SpecificationDrawer,
+  useWarmUp,
+} from './lazy-parts';
 import { useDraft } from './use-draft';
 import { useLeaveGuard } from './use-leave-guard';
 import { usePreview } from './use-preview';
@@ -79,12 +83,16 @@ export function ChainWorkspace({ chain, option }: ChainWorkspaceProps) {
         <KeptNotice />
         <ErrorNotice error={save.error} title="The changes could not be saved." onRetry={() => void save.save()} />
         <WorkspaceBody />
-        {address.section === 'ledger' && <SetUpPanel />}
+        <Suspense fallback={null}>
+          {address.section === 'ledger' && address.stageId !== null && <SetUpPanel />}
+        </Suspense>
       </div>
-      <ChainWorking open={working} onClose={() => setWorking(null)} />
-      <SpecificationDrawer open={specifying} onClose={() => setSpecifying(false)} />
-      <Conflict save={save} />
-      <LeaveDialog blocker={blocker} save={save} />
+      <Suspense fallback={null}>
+        {working && <ChainWorking open={working} onClose={() => setWorking(null)} />}
+        {specifying && <SpecificationDrawer onClose={() => setSpecifying(false)} />}
+        {save.conflict && <Conflict save={save} />}
+        {blocker.state === 'blocked' && <LeaveDialog blocker={blocker} save={save} />}
+      </Suspense>
     </WorkspaceContext>
   );
 }
@@ -92,6 +100,7 @@ export function ChainWorkspace({ chain, option }: ChainWorkspaceProps) {
 function WorkspaceBody() {
   const { preview, address, control } = useWorkspace();
   const ready = preview.report !== null && control.draft.stages.length > 0;
+  useWarmUp(ready);
   return (
     <div className={styles.body}>
       {ready && <VerdictBanner />}
@@ -99,7 +108,9 @@ function WorkspaceBody() {
       {ready && <HeadlineFigures />}
       <SectionBar />
       {!preview.report && !preview.error && <SkeletonRows />}
-      {address.section === 'ledger' ? <LedgerSection /> : <ResponseSection />}
+      <Suspense fallback={<SkeletonRows />}>
+        {address.section === 'ledger' ? <LedgerSection /> : <ResponseSection />}
+      </Suspense>
     </div>
   );
 }

@@ -11,8 +11,8 @@ export interface OpenWorking {
 }
 
 /** The working of one figure, of the very draft that is on the screen. */
-export function ChainWorking({ open, onClose }: { open: OpenWorking | null; onClose: () => void }) {
-  return open && <WorkingOf key={`${open.stageId}.${open.figure}`} open={open} onClose={onClose} />;
+export function ChainWorking({ open, onClose }: { open: OpenWorking; onClose: () => void }) {
+  return <WorkingOf key={`${open.stageId}.${open.figure}`} open={open} onClose={onClose} />;
 }
 
 function WorkingOf({ open, onClose }: { open: OpenWorking; onClose: () => void }) {

@@ -11,7 +11,7 @@ export function Conflict({ save }: { save: SaveControl }) {
   const lines = conflict ? draftDifferences(control.draft, conflict.draft) : [];
   return (
     <ConflictDialog
-      open={conflict !== null}
+      open
       what={`The option ${control.draft.name}`}
       saving={save.saving}
       onKeepMine={() => void save.keepMine()}

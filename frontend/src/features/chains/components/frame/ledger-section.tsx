@@ -1,12 +1,12 @@
 import PlusOutlined from '@ant-design/icons/es/icons/PlusOutlined';
 import Button from 'antd/es/button';
-import { useState } from 'react';
+import { Suspense, useState } from 'react';
 
 import { MAXIMUM_STAGES } from '../../../../api/types';
 import { LaneLegend } from '../ledger/lane-legend';
 import { Ledger } from '../ledger/ledger';
 import { LedgerCards } from '../ledger/ledger-cards';
-import { AddStage } from '../set-up/add-stage';
+import { AddStage } from '../lazy-parts';
 import { useNarrow } from '../use-narrow';
 import { useWorkspace } from '../workspace-context';
 import { EmptyChain } from './empty-chain';
@@ -29,7 +29,7 @@ export function LedgerSection() {
           <LaneLegend headroomTarget={headroomTarget} bandwidthTarget={bandwidthTarget} />
         </>
       )}
-      {adding && <AddStage onClose={() => setAdding(false)} />}
+      <Suspense fallback={null}>{adding && <AddStage onClose={() => setAdding(false)} />}</Suspense>
     </>
   );
 }

@@ -1,10 +1,11 @@
+import { Suspense } from 'react';
 import { Link } from 'react-router-dom';
 
 import { VerdictIcon } from '../../../../components/verdict-mark';
 import type { ChainOptionRow } from '../../../../api/types';
+import { OptionMenu } from '../lazy-parts';
 import { useWorkspace } from '../workspace-context';
 import styles from './frame.module.css';
-import { OptionMenu } from './option-menu';
 
 /** All options side by side; the one on the screen is solid. */
 export function OptionBar() {
@@ -14,7 +15,7 @@ export function OptionBar() {
       {chain.options.map((row) => (
         <OptionLink key={row.id} row={row} current={row.id === option.id} />
       ))}
-      {editable && <OptionMenu />}
+      <Suspense fallback={null}>{editable && <OptionMenu />}</Suspense>
     </nav>
   );
 }

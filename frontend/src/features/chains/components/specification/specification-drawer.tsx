@@ -4,10 +4,10 @@ import { useWorkspace } from '../workspace-context';
 import { SpecificationForm, specificationMessages } from './specification-form';
 
 /** The specification is edited like the stages: figures follow, undo works, saving keeps it. */
-export function SpecificationDrawer({ open, onClose }: { open: boolean; onClose: () => void }) {
+export function SpecificationDrawer({ onClose }: { onClose: () => void }) {
   const { control, edits, preview, chain, editable } = useWorkspace();
   return (
-    <Drawer open={open} onClose={onClose} title="Specification" size={620} mask={false} destroyOnHidden>
+    <Drawer open onClose={onClose} title="Specification" size={620} mask={false} destroyOnHidden>
       <p className="soft" style={{ marginBottom: 16 }}>
         It belongs to the chain: all {chain.options.length} options are held to it.
       </p>
