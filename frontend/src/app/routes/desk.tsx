@@ -26,9 +26,13 @@ export function Component() {
               <WaitingList items={desk.waiting} />
             </Section>
           )}
-          <Section title="Over a limit">
-            {desk.overChains.length > 0 ? <OverChains chains={desk.overChains} /> : <FirstSteps counts={desk.counts} />}
-          </Section>
+          {desk.overChains.length > 0 ? (
+            <Section title="Over a limit">
+              <OverChains chains={desk.overChains} />
+            </Section>
+          ) : (
+            <FirstSteps counts={desk.counts} />
+          )}
         </>
       )}
     </Page>

@@ -26,7 +26,7 @@ export function SetUpForm({ initialToken }: { initialToken: string }) {
   };
   const general = setUp.error && Object.keys(messages).length === 0 ? setUp.error : null;
   return (
-    <form className={styles.form} onSubmit={submit}>
+    <form className={styles.form} onSubmit={submit} noValidate>
       <p className="soft">The setup token stands in the server’s output. It works once, for the first administrator.</p>
       {isApiError(general, 404) ? (
         <p role="alert" className={styles.refused}>

@@ -20,7 +20,7 @@ export function WelcomeForm({ token, link }: { token: string; link: OneTimeLink 
     setOnServer.mutate(password.first);
   };
   return (
-    <form className={styles.form} onSubmit={submit}>
+    <form className={styles.form} onSubmit={submit} noValidate>
       <p>
         Welcome, {link.name}. Choose a password for <strong>{link.email}</strong>; you are signed in right after.
       </p>
