@@ -21,9 +21,9 @@ function plain(
   return { value, basis, text, page: source?.page, condition: source?.condition };
 }
 
-/** Digits that a factor prints with: 0.7, 1.3. */
+/** Digits that a factor prints with: 0.7, 1.3, 0.6667 — enough for a working to multiply with. */
 function factorText(factor: number): string {
-  return String(Number(factor.toPrecision(3)));
+  return String(Number(factor.toPrecision(6)));
 }
 
 /** The lower end of a spread: `min`, else typ × derating (assumed). `sheet` needs min or typ. */

@@ -5,7 +5,7 @@ import { referenceBandwidthFor } from '../devices/used-values';
 import { gbwMaybe, gbwUsed, worstHeadroom } from '../report/derived';
 import { fullLabel, isFeedbackStage } from '../report/facts';
 import type { StageFacts } from '../report/facts';
-import type { WorkingStep } from '../report';
+import type { Unit, WorkingStep } from '../report';
 import { setFrequency } from '../text/phrases';
 import { bandData, derivedDatum, deviceDatum, networkData, policyDatum } from './data';
 import { complexText, lastStep, magnitude, num, probeAt, step } from './scope';
@@ -39,7 +39,8 @@ function noiseGainSteps(scope: StageScope): readonly WorkingStep[] {
     return [lastStep(scope, 'no feedback around an amplifier', '—', null)];
   const rf = set.feedbackOhm;
   const rg = set.gainOhm ?? 0;
-  if (set.topology === 'follower') return [lastStep(scope, '1', '1', 1)];
+  if (set.topology === 'follower' || (set.topology === 'non-inverting' && rg === 0))
+    return [lastStep(scope, '1', '1', 1)];
   if (set.topology === 'non-inverting') {
     return [lastStep(scope, '1 + Rf/Rg', `1 + ${num(rf, 'Ω')} / ${num(rg, 'Ω')}`, 1 + rf / rg)];
   }
@@ -81,7 +82,7 @@ export function gbwHaveWorking(scope: StageScope): Draft {
   const { gbw } = scope.stage.analysis;
   const title = `GBW of ${scope.stage.device?.partNumber ?? fullLabel(scope.stage)}`;
   if (!gbw) return { title, steps: [lastStep(scope, 'none', '—', null)], data: [], source: COMMON_PRACTICE };
-  const { formula, substituted } = usedFormula(gbw, 'GBW');
+  const { formula, substituted } = usedFormula(gbw, 'GBW', 'Hz');
   return {
     title,
     steps: [lastStep(scope, formula, substituted, gbw.value)],
@@ -97,14 +98,14 @@ export function gbwHaveWorking(scope: StageScope): Draft {
 }
 
 /** How a device value came from its column. */
-export function usedFormula(used: UsedValue, name: string): { formula: string; substituted: string } {
+export function usedFormula(used: UsedValue, name: string, unit: Unit): { formula: string; substituted: string } {
   const factors = used.text
     .split('×')
     .slice(1)
     .map((part) => Number.parseFloat(part));
   const known = factors.filter((factor) => Number.isFinite(factor) && factor !== 0);
   const base = known.reduce((value, factor) => value / factor, used.value);
-  const substituted = [num(base), ...known.map((factor) => num(factor))].join(' × ');
+  const substituted = [num(base, unit), ...known.map((factor) => num(factor))].join(' × ');
   return { formula: `${name}: ${used.text}`, substituted };
 }
 

@@ -1,10 +1,11 @@
 import { sourcePeak } from '../chain/levels';
-import { headroomNegativeFor, headroomPositiveFor } from '../devices/amplifier-values';
+import type { UsedValue } from '../analysis';
+import { headroomNegativeFor, headroomPositiveFor, upperWorst } from '../devices/amplifier-values';
 import { outputCurrentAvailable } from '../report/derived';
 import { fullLabel, isFeedbackStage } from '../report/facts';
 import type { ChainFacts } from '../report/facts';
 import type { WorkingDatum, WorkingStep } from '../report';
-import type { Source } from '../types';
+import type { DatasheetValue, Source } from '../types';
 import { derivedDatum, deviceDatum, networkData, specified } from './data';
 import { lastStep, num, step } from './scope';
 import type { Draft, StageScope } from './scope';
@@ -223,32 +224,12 @@ export function outputOffsetWorking(scope: StageScope): Draft {
 function offsetData(scope: StageScope): readonly WorkingDatum[] {
   const { device } = scope.stage;
   if (!device || device.kind === 'matched-block') return [];
-  const offset = device.inputOffsetVoltageV;
-  const bias = device.inputBiasCurrentA;
-  const column = (value: { max?: number; typ?: number; min?: number }): number =>
-    value.max ?? value.typ ?? value.min ?? 0;
+  const used = (sheet: DatasheetValue | undefined): UsedValue | null => upperWorst(sheet, scope.facts.gbwCase);
   return [
-    ...(offset
-      ? [
-          {
-            label: 'Vos',
-            value: num(column(offset), 'V'),
-            origin: `${device.partNumber}, datasheet`,
-            assumed: false,
-            page: offset.page,
-          },
-        ]
-      : []),
-    ...(bias
-      ? [
-          {
-            label: 'Ib',
-            value: num(column(bias), 'A'),
-            origin: `${device.partNumber}, datasheet`,
-            assumed: false,
-            page: bias.page,
-          },
-        ]
+    ...deviceDatum(scope.stage, 'Vos', used(device.inputOffsetVoltageV), 'V'),
+    ...deviceDatum(scope.stage, 'Ib', used(device.inputBiasCurrentA), 'A'),
+    ...(device.kind === 'current-feedback'
+      ? deviceDatum(scope.stage, 'Ib of the inverting input', used(device.invertingBiasCurrentA), 'A')
       : []),
     ...networkData(scope.stage),
   ];

@@ -1,11 +1,12 @@
 import { noiseDensity } from '../report/derived';
 import { fullLabel } from '../report/facts';
-import type { StageFacts } from '../report/facts';
 import { noiseUnit } from '../report/stage-figures';
 import { BOLTZMANN_J_PER_K, REFERENCE_TEMPERATURE_K } from '../constants';
 import { setFrequency } from '../text/phrases';
-import type { WorkingDatum } from '../report';
-import { bandData, derivedDatum, networkData, specified } from './data';
+import { upperWorst } from '../devices/amplifier-values';
+import type { DatasheetValue } from '../types';
+import type { Unit, WorkingDatum } from '../report';
+import { bandData, derivedDatum, deviceDatum, networkData, specified } from './data';
 import { lastStep, magnitude, num, probeAt, step } from './scope';
 import type { ChainScope, Draft, StageScope } from './scope';
 import { LINEAR_NETWORK, NOISE_FIGURE_SOURCE, NOISE_SOURCE } from './sources';
@@ -38,42 +39,27 @@ export function noiseAddedWorking(scope: StageScope): Draft {
         density === null ? null : atOutput / gain,
       ),
     ],
-    data: [...noiseData(scope.stage), ...networkData(scope.stage), ...bandData(scope.facts), ...ambient(scope)],
+    data: [...noiseData(scope), ...networkData(scope.stage), ...bandData(scope.facts), ...ambient(scope)],
     assumptions: ['Sources are uncorrelated.'],
     validity: [LINEAR_NETWORK],
     source: NOISE_SOURCE,
   };
 }
 
-function noiseData(stage: StageFacts): readonly WorkingDatum[] {
+function noiseData(scope: StageScope): readonly WorkingDatum[] {
+  const { stage, facts } = scope;
   const { device } = stage;
   if (!device) return [];
-  if (device.kind === 'matched-block') return sheetDatum(device.partNumber, 'noise figure', device.noiseFigureDb, 'dB');
+  const datum = (label: string, sheet: DatasheetValue | undefined, unit: Unit): readonly WorkingDatum[] =>
+    deviceDatum(stage, label, upperWorst(sheet, facts.gbwCase), unit);
+  if (device.kind === 'matched-block') return datum('noise figure', device.noiseFigureDb, 'dB');
   return [
-    ...sheetDatum(device.partNumber, 'voltage noise', device.voltageNoiseVPerRtHz, 'V/√Hz'),
-    ...sheetDatum(device.partNumber, 'current noise', device.currentNoiseAPerRtHz, 'A/√Hz'),
+    ...datum('voltage noise', device.voltageNoiseVPerRtHz, 'V/√Hz'),
+    ...datum('current noise', device.currentNoiseAPerRtHz, 'A/√Hz'),
     ...(device.kind === 'current-feedback'
-      ? sheetDatum(device.partNumber, 'inverting current noise', device.invertingCurrentNoiseAPerRtHz, 'A/√Hz')
+      ? datum('inverting current noise', device.invertingCurrentNoiseAPerRtHz, 'A/√Hz')
       : []),
   ];
-}
-
-function sheetDatum(
-  part: string,
-  label: string,
-  sheet: { typ?: number; max?: number; min?: number; page?: string; condition?: string } | undefined,
-  unit: 'V/√Hz' | 'A/√Hz' | 'dB',
-): readonly WorkingDatum[] {
-  if (!sheet) return [];
-  const columns = (['typ', 'max', 'min'] as const).filter((column) => sheet[column] !== undefined);
-  return columns.slice(0, 2).map((column) => ({
-    label: `${label}, ${{ typ: 'typical', max: 'maximum', min: 'minimum' }[column]}`,
-    value: num(sheet[column] ?? 0, unit),
-    origin: `${part}, datasheet`,
-    assumed: false,
-    ...(sheet.page === undefined ? {} : { page: sheet.page }),
-    ...(sheet.condition === undefined ? {} : { condition: sheet.condition }),
-  }));
 }
 
 function ambient(scope: ChainScope): readonly WorkingDatum[] {
@@ -153,7 +139,7 @@ export function noiseFigureWorking(scope: ChainScope): Draft {
       ...(isKnown
         ? [
             step(
-              '√(4kT0·Re Zs), T0 = 290 K',
+              source.kind === 'current' ? '√(4kT0·Re(1/Zs)), T0 = 290 K' : '√(4kT0·Re Zs), T0 = 290 K',
               source.kind === 'current' ? 'as a current' : `Rs ${num(ohm, 'Ω')}`,
               num(reference, unit),
             ),

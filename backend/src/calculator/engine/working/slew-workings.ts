@@ -61,10 +61,10 @@ export function slewAvailableWorking(scope: StageScope): Draft {
   const used = scope.stage.analysis.slewAvailable;
   const title = `Slew rate of ${fullLabel(scope.stage)}`;
   if (!used) return { title, steps: [lastStep(scope, 'not known', '—', null)], data: [], source: SLEW_SOURCE };
-  const { formula, substituted } = usedFormula({ ...used, value: used.value / 1e6 }, 'slew rate');
+  const { formula, substituted } = usedFormula(used, 'slew rate', 'V/s');
   return {
     title,
-    steps: [lastStep(scope, formula, `${substituted} V/µs`, used.value)],
+    steps: [lastStep(scope, formula, substituted, used.value)],
     data: [
       ...deviceDatum(scope.stage, 'slew rate', used, 'V/s'),
       ...(used.basis === 'typ-derated' ? policyDatum('slew derating', num(scope.facts.policy.slewDerating)) : []),

@@ -70,7 +70,7 @@ describe('working', () => {
     const each = working(input, { stageId: 'S2', figure: 'slewAvailable', gbwCase: 'minimum' });
     expect(each.steps[0]).toEqual({
       formula: 'slew rate: typical × 0.7',
-      substituted: '55 × 0.7 V/µs',
+      substituted: '55 V/µs × 0.7',
       result: '38.5 V/µs',
     });
     expect(each.data).toContainEqual(expect.objectContaining({ label: 'slew rate', assumed: true }));

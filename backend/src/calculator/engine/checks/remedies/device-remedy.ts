@@ -73,16 +73,22 @@ export function deviceRemedy(trials: Trials, stage: StageFacts, checkId: CheckId
     if (!trial) continue;
     const verdict = trialVerdict(trial);
     if (verdict === 'clear') return found(trial, device, checkId);
-    const isClearHere = verdict === 'unknown' && trialCheckVerdict(trial, checkId) === 'clear';
-    if (isClearHere) second ??= found(trial, device, checkId);
+    if (isSecondBest(trial, stage, checkId)) second ??= found(trial, device, checkId);
   }
   return second;
+}
+
+/** Clear in the check that decides now and over in none; with data missing it is no remedy for what is only tight. */
+function isSecondBest(trial: Trial, stage: StageFacts, checkId: CheckId): boolean {
+  const isOverNow = trial.before.stageVerdicts[stage.index] === 'over';
+  return isOverNow && trialVerdict(trial) === 'unknown' && trialCheckVerdict(trial, checkId) === 'clear';
 }
 
 function found(trial: Trial, device: Device, checkId: CheckId): FoundRemedy {
   const { signalGain } = trialStages(trial)[0].analysis;
   const at = device.kind === 'matched-block' ? 'in its place' : `at ${gainText(signalGain)}`;
-  const brief = `${device.partNumber} ${at} would ${benefit(trial, checkId)}${priceDifferenceText(trial)}.`;
+  const missing = trialVerdict(trial) === 'unknown' ? '; it cannot be judged fully, data of it is missing' : '';
+  const brief = `${device.partNumber} ${at} would ${benefit(trial, checkId)}${priceDifferenceText(trial)}${missing}.`;
   return proposal(trial, brief, `Use ${device.partNumber}`);
 }
 
@@ -98,5 +104,5 @@ function benefit(trial: Trial, checkId: CheckId): string {
   const ratio = bandwidthRatio(facts, stage).value;
   if (checkId === 'bandwidth' && ratio !== null)
     return `reach ${ratioText(ratio, [1, facts.policy.bandwidthTarget])} the top of the band`;
-  return 'pass every check here';
+  return trialVerdict(trial) === 'clear' ? 'pass every check here' : 'pass this check';
 }

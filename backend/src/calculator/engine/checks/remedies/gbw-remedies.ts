@@ -4,7 +4,15 @@ import type { ChainFacts, StageFacts } from '../../report/facts';
 import { atLeastText, gainText, ratioText, roundAway, targetText, valueText } from '../../text/phrases';
 import { badness } from '../verdict-order';
 import { asNonInverting, isRatioStage, resistorGain, splitInTwo, withGain } from './replacement-stages';
-import { hint, priceDifferenceText, proposal, trialCheckVerdict, trialStages, turnsPolarity } from './trials';
+import {
+  hint,
+  isNoWorse,
+  priceDifferenceText,
+  proposal,
+  trialCheckVerdict,
+  trialStages,
+  turnsPolarity,
+} from './trials';
 import type { FoundRemedy, Trial, Trials } from './trials';
 
 const MOST_GAIN_STEPS = 4;
@@ -42,10 +50,14 @@ function headroomOf(trial: Trial, stage: StageFacts): number {
   return worstHeadroom(trial.after.facts, stage).headroom.value ?? 0;
 }
 
-/** A change that leaves the GBW check as bad as it is is no remedy. */
+/** A change that leaves the GBW check as bad as it is, or makes another check fail worse, is no remedy. */
 function helps(trial: Trial, stage: StageFacts): boolean {
   const before = trial.before.stageChecks[stage.index].find((check) => check.id === 'gbw');
-  return before !== undefined && badness(trialCheckVerdict(trial, 'gbw')) < badness(before.verdict);
+  return (
+    isNoWorse(trial, stage) &&
+    before !== undefined &&
+    badness(trialCheckVerdict(trial, 'gbw')) < badness(before.verdict)
+  );
 }
 
 function nonInvertingRemedy(trials: Trials, stage: StageFacts): FoundRemedy | null {
@@ -88,7 +100,8 @@ function lessGainRemedy(trials: Trials, stage: StageFacts): FoundRemedy | null {
     if (!trial || !replacement) return null;
     feedbackOhm = replacement.feedbackOhm;
     spent = spentBy(trial.after.facts, trialStages(trial)[0]);
-    if (spent.headroom >= target) return magnitude < 1 ? null : lessGain(trial, magnitude, stage);
+    if (spent.headroom >= target)
+      return magnitude < 1 || !isNoWorse(trial, stage) ? null : lessGain(trial, magnitude, stage);
   }
   return null;
 }

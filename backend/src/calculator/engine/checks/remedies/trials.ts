@@ -91,6 +91,16 @@ export function trialVerdict(trial: Trial): Remedy['verdict'] {
   return worstVerdict(own);
 }
 
+/** True when no check is over that was not before: less gain can cost a device its stability. */
+export function isNoWorse(trial: Trial, stage: StageFacts): boolean {
+  const before = trial.before.stageChecks[stage.index];
+  const after = trial.after.stageChecks.slice(trial.firstIndex, trial.firstIndex + trial.stages.length).flat();
+  return after.every((check) => {
+    const same = before.find((each) => each.id === check.id);
+    return check.verdict !== 'over' || same?.verdict === 'over';
+  });
+}
+
 /** True when the chain's polarity is another one afterwards: never left unsaid. */
 export function turnsPolarity(trial: Trial): boolean {
   return trial.before.facts.chain.inverted !== trial.after.facts.chain.inverted;
