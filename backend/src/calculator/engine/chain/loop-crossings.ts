@@ -17,9 +17,9 @@ export type LoopFunction = (frequencyHz: number, out: MutableComplex) => void;
 
 /** Loop gains already known on an ascending grid. */
 export interface LoopSamples {
-  readonly frequenciesHz: Float64Array;
-  readonly re: Float64Array;
-  readonly im: Float64Array;
+  readonly frequenciesHz: readonly number[];
+  readonly re: readonly number[];
+  readonly im: readonly number[];
   /** How many of them count. */
   readonly length: number;
 }
@@ -99,7 +99,7 @@ class LoopWalk {
 }
 
 /** |T| has an extremum at sample i that points towards 1: a local minimum above it or a local maximum below it. */
-function turnsTowardsOne(power: Float64Array, i: number, length: number): boolean {
+function turnsTowardsOne(power: readonly number[], i: number, length: number): boolean {
   if (i <= 0 || i >= length - 1) return false;
   const dip = power[i] < power[i - 1] && power[i] < power[i + 1];
   const rise = power[i] > power[i - 1] && power[i] > power[i + 1];
@@ -113,8 +113,8 @@ function turnsTowardsOne(power: Float64Array, i: number, length: number): boolea
  */
 export function marginFromSamples(samples: LoopSamples, loop: LoopFunction): LoopMargin {
   const { frequenciesHz, re, im, length } = samples;
-  const power = new Float64Array(length);
-  for (let i = 0; i < length; i++) power[i] = re[i] * re[i] + im[i] * im[i];
+  const power: number[] = [];
+  for (let i = 0; i < length; i++) power.push(re[i] * re[i] + im[i] * im[i]);
   const walk = new LoopWalk(loop, frequenciesHz[0], re[0], im[0]);
   for (let i = 1; i < length; i++) {
     const hidden = turnsTowardsOne(power, i - 1, length) || turnsTowardsOne(power, i, length);
@@ -149,20 +149,11 @@ export function smallestPhaseMargin(
   pointsPerDecade = 60,
 ): LoopMargin {
   const length = Math.max(2, Math.ceil(Math.log10(toHz / fromHz) * pointsPerDecade) + 1);
-  const samples = {
-    frequenciesHz: new Float64Array(length),
-    re: new Float64Array(length),
-    im: new Float64Array(length),
-    length,
-  };
-  for (let i = 0; i < length; i++) {
-    const frequencyHz = fromHz * (toHz / fromHz) ** (i / (length - 1));
-    const value = loop(frequencyHz);
-    samples.frequenciesHz[i] = frequencyHz;
-    samples.re[i] = value.re;
-    samples.im[i] = value.im;
-  }
-  return marginFromSamples(samples, (frequencyHz, out) => {
+  const frequenciesHz = Array.from({ length }, (_, i) => fromHz * (toHz / fromHz) ** (i / (length - 1)));
+  const values = frequenciesHz.map(loop);
+  const re = values.map((value) => value.re);
+  const im = values.map((value) => value.im);
+  return marginFromSamples({ frequenciesHz, re, im, length }, (frequencyHz, out) => {
     const value = loop(frequencyHz);
     out.re = value.re;
     out.im = value.im;
