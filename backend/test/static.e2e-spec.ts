@@ -15,6 +15,7 @@ describe('the screens', () => {
     mkdirSync(path.join(frontendDir, 'assets'));
     writeFileSync(path.join(frontendDir, 'index.html'), PAGE);
     writeFileSync(path.join(frontendDir, 'assets', 'index-abc123.js'), 'export {};');
+    writeFileSync(path.join(frontendDir, 'assets', 'large-abc123.js'), 'export const x = 1;\n'.repeat(500));
     writeFileSync(path.join(frontendDir, '.hidden'), 'hidden');
     testApp = await TestApp.create({ FRONTEND_DIR: frontendDir });
   });
@@ -40,6 +41,15 @@ describe('the screens', () => {
     const response = await get('/assets/index-abc123.js', '*/*').expect(200);
     expect(response.headers['cache-control']).toBe('public, max-age=31536000, immutable');
     expect(response.headers['content-type']).toMatch(/javascript/);
+  });
+
+  it('come compressed to who takes it; answers of the API do not', async () => {
+    const large = await get('/assets/large-abc123.js', '*/*').set('Accept-Encoding', 'gzip').expect(200);
+    expect(large.headers['content-encoding']).toBe('gzip');
+    const plain = await get('/assets/large-abc123.js', '*/*').set('Accept-Encoding', 'identity').expect(200);
+    expect(plain.headers['content-encoding']).toBeUndefined();
+    const health = await get('/api/health', 'application/json').set('Accept-Encoding', 'gzip').expect(200);
+    expect(health.headers['content-encoding']).toBeUndefined();
   });
 
   it.each([

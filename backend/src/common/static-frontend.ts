@@ -1,5 +1,6 @@
 import { existsSync } from 'node:fs';
 import path from 'node:path';
+import compression from 'compression';
 import { NotFoundError } from './errors';
 import express, { type RequestHandler, type Response } from 'express';
 
@@ -17,6 +18,11 @@ function wantsPage(method: string, requestPath: string, acceptsHtml: boolean): b
   return (method === 'GET' || method === 'HEAD') && acceptsHtml && !path.basename(requestPath).includes('.');
 }
 
+/** Scripts and styles shrink to a third; answers of the API are short-lived and not worth the time. */
+const compressed = compression({
+  filter: (request, response) => !isApi(request.path) && compression.filter(request, response),
+});
+
 /** The built frontend: its files, and its one page for every address that belongs to the router in the browser. */
 export function staticFrontend(frontendDir: string): RequestHandler[] {
   const page = path.join(frontendDir, 'index.html');
@@ -32,5 +38,5 @@ export function staticFrontend(frontendDir: string): RequestHandler[] {
       response.status(503).type('text').send('The screens have not been built yet: run npm run build.\n');
     }
   };
-  return [files, fallback];
+  return [compressed, files, fallback];
 }
