@@ -45,6 +45,18 @@ describe('calculations', () => {
       expect(body.working).toBeNull();
     });
 
+    it('marks a quote whose last day has passed, and only that one', async () => {
+      const until = (validUntil: string) => ({
+        devices: HAND_DEVICES.map((device) => ({ ...device, quote: { ...device.quote, validUntil } })),
+      });
+      const marksOf = async (validUntil: string) => {
+        const { body } = await calculate(handReceiver(until(validUntil))).expect(200);
+        return body.report.stages[1].marks.map((mark: { kind: string }) => mark.kind);
+      };
+      expect(await marksOf('2020-01-31')).toContain('quote-lapsed');
+      expect(await marksOf('2999-01-31')).not.toContain('quote-lapsed');
+    });
+
     it('includes curves and one working on request', async () => {
       const stages = handReceiver().stages;
       const include = {

@@ -1,9 +1,10 @@
 import { Injectable } from '@nestjs/common';
+import { Clock } from '../common/clock';
 import { InvalidError } from '../common/errors';
 import { DeviceLibraryService } from '../devices/device-library.service';
 import { CalculatorThreads } from './calculator-threads';
 import { chainInputOf, libraryDeviceIds } from './chain-input';
-import type { CalculationRequestDto, CandidatesRequestDto } from './dto/calculation.dto';
+import type { CalculationRequestDto, CandidatesRequestDto, ChainInputDto } from './dto/calculation.dto';
 import type { ChainInput, Device, DeviceKind, Stage } from './engine';
 
 /** The calculator for requests: stateless; only devices are looked up. */
@@ -12,11 +13,12 @@ export class CalculatorService {
   constructor(
     private readonly library: DeviceLibraryService,
     private readonly threads: CalculatorThreads,
+    private readonly clock: Clock,
   ) {}
 
   /** JSON text of a CalculationResult. */
   async calculate(request: CalculationRequestDto): Promise<string> {
-    const input = chainInputOf(request, await this.library.findForCalculation(libraryDeviceIds(request)));
+    const input = await this.inputOf(request);
     return this.threads.calculate({ input, ...request.include });
   }
 
@@ -27,10 +29,14 @@ export class CalculatorService {
     if (kind === null) {
       throw new InvalidError([{ path: 'stageId', code: 'stage_unknown', message: 'names no stage with a device' }]);
     }
-    const used = await this.library.findForCalculation(libraryDeviceIds(request));
-    const input = chainInputOf(request, used);
+    const input = await this.inputOf(request);
     const candidates = await this.candidatesFor(request, kind, input);
     return this.threads.tryDevices({ input, stageId: request.stageId, candidates });
+  }
+
+  private async inputOf(request: ChainInputDto): Promise<ChainInput> {
+    const devices = await this.library.findForCalculation(libraryDeviceIds(request));
+    return { ...chainInputOf(request, devices), today: this.clock.now().toISOString().slice(0, 10) };
   }
 
   private async candidatesFor(
