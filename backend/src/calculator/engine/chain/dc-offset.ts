@@ -14,6 +14,16 @@ export interface DcOffsets {
   readonly load: Maybe;
 }
 
+/** What the offset of a feedback stage is made of, for its working. */
+export interface DcTerms {
+  /** 1 + Rf·(conductance from the inverting node to the left or to ground) at DC. */
+  readonly noiseGain: number;
+  /** What the bias current of the + pin flows through, Ω. */
+  readonly plusOhm: number;
+  /** Offset of the stages in front, as it stands at this output, V. */
+  readonly carriedV: number;
+}
+
 interface DcPort {
   volt: number;
   /** Infinity: nothing conducts to the left. */
@@ -47,7 +57,7 @@ function advanceFeedback(
   values: FeedbackPartValues,
   device: AmplifierDevice,
   corner: DeviceCorner,
-): void {
+): DcTerms {
   shunt(port, conductance(values.terminationOhm));
   if (values.couplingF) block(port);
   let missing = port.missing;
@@ -70,9 +80,10 @@ function advanceFeedback(
     contribution('Bias current of the inverting input', minusBias, values.feedbackOhm);
   port.ohm = values.isolationOhm;
   port.missing = missing;
+  return { noiseGain, plusOhm, carriedV: signal };
 }
 
-function advance(port: DcPort, stage: PreparedStage, corner: DeviceCorner): void {
+function advance(port: DcPort, stage: PreparedStage, corner: DeviceCorner): DcTerms | null {
   const { section, block: matched, feedback, device } = stage;
   if (section) {
     port.ohm += section.seriesOhm;
@@ -83,8 +94,20 @@ function advance(port: DcPort, stage: PreparedStage, corner: DeviceCorner): void
     port.volt = port.ohm === Infinity ? 0 : (2 * matched.gain * matched.impedanceOhm * port.volt) / sum(port, matched);
     port.ohm = matched.impedanceOhm;
   } else if (feedback && device && device.kind !== 'matched-block') {
-    advanceFeedback(port, feedback, device, corner);
+    return advanceFeedback(port, feedback, device, corner);
   }
+  return null;
+}
+
+/** The terms of one stage's offset; null for a stage without feedback. */
+export function dcTerms(
+  input: ChainInput,
+  stages: readonly PreparedStage[],
+  corner: DeviceCorner,
+  index: number,
+): DcTerms | null {
+  const port = sourcePort(input);
+  return stages.slice(0, index + 1).reduce<DcTerms | null>((_, stage) => advance(port, stage, corner), null);
 }
 
 const sum = (port: DcPort, { impedanceOhm }: { impedanceOhm: number }): number => port.ohm + impedanceOhm;

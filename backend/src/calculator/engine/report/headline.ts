@@ -1,6 +1,6 @@
 import type { Check, CheckId, Figure, HeadlineItem, Verdict } from '../report';
 import { requiredGainText } from '../checks/gain-checks';
-import { worstVerdict } from '../checks/verdict-order';
+import { badness, worstVerdict } from '../checks/verdict-order';
 import { isAbove, isBelow } from '../text/deciding-digits';
 import { decibelLimitText, setFrequency, targetText } from '../text/phrases';
 import { decimalAmount, typed } from '../text/si-format';
@@ -122,7 +122,7 @@ function headroomItem(facts: ChainFacts, checks: HeadlineChecks): HeadlineItem {
 
 function noiseItem(facts: ChainFacts, checks: HeadlineChecks): HeadlineItem {
   const { inputNoise, noiseFigureDb } = facts.input.specification.requirements;
-  const showsFigure = noiseFigureDb !== undefined && inputNoise === undefined;
+  const showsFigure = noiseFigureDb !== undefined && (inputNoise === undefined || figureIsWorse(checks));
   const densityLimit = inputNoise === undefined ? NOTHING_REQUIRED : `limit ${typed(inputNoise, noiseUnit(facts))}`;
   return {
     key: 'noise',
@@ -133,6 +133,12 @@ function noiseItem(facts: ChainFacts, checks: HeadlineChecks): HeadlineItem {
     requirement: showsFigure ? `limit ${decibelLimitText(noiseFigureDb)}` : densityLimit,
     chainFigure: showsFigure ? 'noiseFigure' : 'inputNoise',
   };
+}
+
+/** Where density and noise figure are both limited, the worse one is shown: the verdict has to be of what stands beside it. */
+function figureIsWorse(checks: HeadlineChecks): boolean {
+  const of = (id: CheckId): number => badness(verdictOf(checks, [id]) ?? 'clear');
+  return of('noise-figure') > of('input-noise');
 }
 
 function costItem(facts: ChainFacts, checks: HeadlineChecks): HeadlineItem {

@@ -95,3 +95,34 @@ describe('remedies never make another check fail', () => {
     expect(sentences(input).join('\n')).not.toContain('B at ×10');
   });
 });
+
+describe('working(input, request) of an output offset', () => {
+  it('adds what the first stage carries into the second', () => {
+    // S1: 1 mV·10 + 1 µA·50 Ω·10 + 1 µA·900 Ω = 11.4 mV; S2 behind 0 Ω: 11.4·10 + 1·10 + 0.9 = 124.9 mV.
+    const sized = amplifier('a', { inputOffsetVoltageV: { max: 1e-3 }, inputBiasCurrentA: { max: 1e-6 } });
+    const input = chainInput([tenfold, { ...tenfold, id: 's2' }], [sized]);
+    const at = (stageId: string) => working(input, { stageId, figure: 'outputOffset', gbwCase: 'minimum' });
+    expect(at('s1').steps.at(-1)).toEqual({
+      formula: 'Vos·NG + Ib·Rp·NG + Ib−·Rf + carried',
+      substituted: '1 mV · 10 + 1 µA · 50 Ω · 10 + 1 µA · 900 Ω + 0 V',
+      result: '11.4 mV',
+    });
+    expect(at('s2').steps.at(-1)).toMatchObject({
+      substituted: '1 mV · 10 + 1 µA · 0 Ω · 10 + 1 µA · 900 Ω + 114 mV',
+      result: '125 mV',
+    });
+  });
+});
+
+describe('headline', () => {
+  it('shows the noise figure where it fails and the density passes', () => {
+    // √(3² + …) nV behind 50 Ω is far above 3 dB; a density of 1 µV/√Hz is kept.
+    const requirements = { inputNoise: 1e-6, noiseFigureDb: 3 };
+    const report = calculate(chainInput([tenfold], [amplifier('a')], { requirements }));
+    expect(report.headline.minimum.find((item) => item.key === 'noise')).toMatchObject({
+      label: 'Noise figure',
+      verdict: 'over',
+      requirement: 'limit 3.00 dB',
+    });
+  });
+});

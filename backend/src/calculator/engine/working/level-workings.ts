@@ -1,15 +1,14 @@
 import { sourcePeak } from '../chain/levels';
-import type { UsedValue } from '../analysis';
-import { headroomNegativeFor, headroomPositiveFor, upperWorst } from '../devices/amplifier-values';
+import { headroomNegativeFor, headroomPositiveFor } from '../devices/amplifier-values';
 import { outputCurrentAvailable } from '../report/derived';
 import { fullLabel, isFeedbackStage } from '../report/facts';
 import type { ChainFacts } from '../report/facts';
 import type { WorkingDatum, WorkingStep } from '../report';
-import type { DatasheetValue, Source } from '../types';
+import type { Source } from '../types';
 import { derivedDatum, deviceDatum, networkData, specified } from './data';
 import { lastStep, num, step } from './scope';
 import type { Draft, StageScope } from './scope';
-import { COMMON_PRACTICE, DATASHEET_CONDITIONS, FEEDBACK_SOURCE, NETWORK_SOURCE } from './sources';
+import { COMMON_PRACTICE, DATASHEET_CONDITIONS, NETWORK_SOURCE } from './sources';
 
 /** The source's peak EMF (or peak current) at its largest level, with the formula that reads the level. */
 export interface PeakLevel {
@@ -197,40 +196,4 @@ function loadDatum(facts: ChainFacts, scope: StageScope): readonly WorkingDatum[
 /** Output current that the device gives. */
 export function currentHave(scope: StageScope): number | null {
   return outputCurrentAvailable(scope.stage).value;
-}
-
-/** DC at the amplifier's output. */
-export function outputOffsetWorking(scope: StageScope): Draft {
-  const { device, analysis } = scope.stage;
-  const offset = analysis.outputOffsetV.value;
-  const isAmplifier = device !== null && device.kind !== 'matched-block';
-  return {
-    title: `Output offset of ${fullLabel(scope.stage)}`,
-    steps: [
-      lastStep(
-        scope,
-        'Vos·NG(0) + bias currents × resistances × their gain, plus what comes DC-coupled from the stages in front',
-        offset === null ? '—' : 'worst case, sizes added',
-        offset,
-      ),
-    ],
-    data: isAmplifier ? offsetData(scope) : [],
-    assumptions: ['A coupling capacitor stops the DC of everything in front of it.'],
-    validity: [DATASHEET_CONDITIONS],
-    source: FEEDBACK_SOURCE,
-  };
-}
-
-function offsetData(scope: StageScope): readonly WorkingDatum[] {
-  const { device } = scope.stage;
-  if (!device || device.kind === 'matched-block') return [];
-  const used = (sheet: DatasheetValue | undefined): UsedValue | null => upperWorst(sheet, scope.facts.gbwCase);
-  return [
-    ...deviceDatum(scope.stage, 'Vos', used(device.inputOffsetVoltageV), 'V'),
-    ...deviceDatum(scope.stage, 'Ib', used(device.inputBiasCurrentA), 'A'),
-    ...(device.kind === 'current-feedback'
-      ? deviceDatum(scope.stage, 'Ib of the inverting input', used(device.invertingBiasCurrentA), 'A')
-      : []),
-    ...networkData(scope.stage),
-  ];
 }

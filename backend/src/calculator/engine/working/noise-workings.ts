@@ -4,7 +4,7 @@ import { noiseUnit } from '../report/stage-figures';
 import { BOLTZMANN_J_PER_K, REFERENCE_TEMPERATURE_K } from '../constants';
 import { setFrequency } from '../text/phrases';
 import { upperWorst } from '../devices/amplifier-values';
-import type { DatasheetValue } from '../types';
+import type { DatasheetValue, Source } from '../types';
 import type { Unit, WorkingDatum } from '../report';
 import { bandData, derivedDatum, deviceDatum, networkData, specified } from './data';
 import { lastStep, magnitude, num, probeAt, step } from './scope';
@@ -123,6 +123,10 @@ export function inputNoiseWorking(scope: ChainScope): Draft {
   };
 }
 
+function referenceFormula({ kind }: Source): string {
+  return kind === 'current' ? '√(4kT0·Re(1/Zs)), T0 = 290 K' : '√(4kT0·Re Zs), T0 = 290 K';
+}
+
 /** Noise figure against the thermal noise of the source at 290 K. */
 export function noiseFigureWorking(scope: ChainScope): Draft {
   const { source, band } = scope.facts.input.specification;
@@ -139,7 +143,7 @@ export function noiseFigureWorking(scope: ChainScope): Draft {
       ...(isKnown
         ? [
             step(
-              source.kind === 'current' ? '√(4kT0·Re(1/Zs)), T0 = 290 K' : '√(4kT0·Re Zs), T0 = 290 K',
+              referenceFormula(source),
               source.kind === 'current' ? 'as a current' : `Rs ${num(ohm, 'Ω')}`,
               num(reference, unit),
             ),

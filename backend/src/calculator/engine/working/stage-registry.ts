@@ -17,13 +17,7 @@ import {
   noiseGainAtWorking,
   noiseGainWorking,
 } from './gbw-workings';
-import {
-  currentHave,
-  outputCurrentWorking,
-  outputLevelWorking,
-  outputOffsetWorking,
-  swingAvailableWorking,
-} from './level-workings';
+import { currentHave, outputCurrentWorking, outputLevelWorking, swingAvailableWorking } from './level-workings';
 import { fullPowerWorking, ratioWorking, slewAvailableWorking, slewNeededWorking } from './slew-workings';
 import {
   bandwidthRatioWorking,
@@ -34,6 +28,7 @@ import {
   riseTimeWorking,
   vectorErrorWorking,
 } from './loop-workings';
+import { outputOffsetWorking } from './offset-workings';
 import { noiseAddedWorking, noiseShareWorking } from './noise-workings';
 import type { Draft, StageScope } from './scope';
 import { num } from './scope';

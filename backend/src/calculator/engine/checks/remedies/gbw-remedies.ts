@@ -100,8 +100,7 @@ function lessGainRemedy(trials: Trials, stage: StageFacts): FoundRemedy | null {
     if (!trial || !replacement) return null;
     feedbackOhm = replacement.feedbackOhm;
     spent = spentBy(trial.after.facts, trialStages(trial)[0]);
-    if (spent.headroom >= target)
-      return magnitude < 1 || !isNoWorse(trial, stage) ? null : lessGain(trial, magnitude, stage);
+    if (spent.headroom >= target) return lessGain(trial, magnitude, stage);
   }
   return null;
 }
@@ -119,7 +118,7 @@ function spentBy(facts: ChainFacts, stage: StageFacts): Spent {
 }
 
 function lessGain(trial: Trial, magnitude: number, stage: StageFacts): FoundRemedy | null {
-  if (!isRatioStage(stage.stage)) return null;
+  if (!isRatioStage(stage.stage) || magnitude < 1 || !isNoWorse(trial, stage)) return null;
   const gain = gainText(stage.stage.topology === 'inverting' ? -magnitude : magnitude);
   const missing = Math.abs(resistorGain(stage.stage)) / magnitude;
   const target = targetText(trial.before.facts.policy.headroomTarget);
