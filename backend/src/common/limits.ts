@@ -49,7 +49,7 @@ export const LIMITS = {
   temperatureK: { unit: 'K', minimum: 1, maximum: 1000 },
   // Policy
   derating: { unit: 'ratio', minimum: 0.05, maximum: 1 },
-  temperatureFactor: { unit: 'ratio', minimum: 0.05, maximum: 2 },
+  temperatureFactor: { unit: 'ratio', minimum: 0.05, maximum: 1 },
   headroomTarget: { unit: 'ratio', minimum: 1, maximum: 1000 },
   marginDb: { unit: 'dB', minimum: 0, maximum: 60 },
   marginFraction: { unit: 'fraction', minimum: 0, maximum: 0.99 },

@@ -276,7 +276,7 @@ export const API_LIMITS = {
     "phaseMarginTightDeg": {"minimum":0,"maximum":90,"unit":"deg"},
     "slewDerating": {"minimum":0.05,"maximum":1,"unit":"ratio"},
     "slewTarget": {"minimum":1,"maximum":1000,"unit":"ratio"},
-    "temperatureFactor": {"minimum":0.05,"maximum":2,"unit":"ratio"},
+    "temperatureFactor": {"minimum":0.05,"maximum":1,"unit":"ratio"},
     "toleranceMargin": {"minimum":0,"maximum":0.99,"unit":"fraction"},
   },
   PolicyChange: {
@@ -290,7 +290,7 @@ export const API_LIMITS = {
     "phaseMarginTightDeg": {"minimum":0,"maximum":90,"unit":"deg"},
     "slewDerating": {"minimum":0.05,"maximum":1,"unit":"ratio"},
     "slewTarget": {"minimum":1,"maximum":1000,"unit":"ratio"},
-    "temperatureFactor": {"minimum":0.05,"maximum":2,"unit":"ratio"},
+    "temperatureFactor": {"minimum":0.05,"maximum":1,"unit":"ratio"},
     "toleranceMargin": {"minimum":0,"maximum":0.99,"unit":"fraction"},
   },
   PriceBreak: {

@@ -25,7 +25,6 @@ export const RANGES = {
   decibelOrZero: { from: 0, to: 400, unit: 'dB' },
   fraction: { from: 0, to: 1, unit: '' },
   derating: { above: 0, to: 1, unit: '' },
-  factor: { above: 0, to: 10, unit: '' },
   target: { from: 1, to: 1e6, unit: '' },
   degrees: { from: 0, to: 90, unit: '°' },
   kelvin: { above: 0, to: 2000, unit: 'K' },

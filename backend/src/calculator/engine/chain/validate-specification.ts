@@ -79,7 +79,7 @@ export function validateSpecification(found: IssueCollector, specification: Spec
 
 const POLICY_RANGES: Readonly<Record<Exclude<keyof Policy, 'gbwCase'>, RangeName>> = {
   gbwDerating: 'derating',
-  temperatureFactor: 'factor',
+  temperatureFactor: 'derating',
   slewDerating: 'derating',
   headroomTarget: 'target',
   bandwidthTarget: 'target',

@@ -42,6 +42,14 @@ describe('validateChain(input)', () => {
     expect(codes(withSpecification({ band: { lowHz: 5e6, operatingHz: 5e6, highHz: 5e6 } }))).toEqual([]);
   });
 
+  it('a hot device is not better than a cold one', () => {
+    const receiver = handReceiver([]);
+    const hot = (temperatureFactor: number) =>
+      codes({ ...receiver, policy: { ...receiver.policy, temperatureFactor } });
+    expect(hot(1)).toEqual([]);
+    expect(hot(1.01)).toEqual(['out_of_range policy.temperatureFactor']);
+  });
+
   it.each([
     ['Rf missing', { ...amplifier, feedbackOhm: undefined }, 'feedback_resistor_missing stages.0.feedbackOhm'],
     ['Rf 0 inverting', { ...inverting('s', 'MRWG-G072', 0) }, 'feedback_resistor_missing stages.0.feedbackOhm'],

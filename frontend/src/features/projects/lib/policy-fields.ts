@@ -62,7 +62,7 @@ export const POLICY_GROUPS: readonly { readonly title: string; readonly fields: 
     fields: [
       factorField('gbwDerating', 'GBW from typical', 'Minimum = typical × this, marked as assumed.', 1),
       factorField('slewDerating', 'Slew rate from typical', 'Minimum = typical × this, marked as assumed.', 1),
-      factorField('temperatureFactor', 'Hot case', 'Further factor on GBW in the case “minimum, hot”.', 2),
+      factorField('temperatureFactor', 'Hot case', 'Further factor on GBW in the case “minimum, hot”.', 1),
     ],
   },
   {
