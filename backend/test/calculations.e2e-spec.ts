@@ -242,6 +242,28 @@ describe('calculations', () => {
       expect(JSON.stringify(body)).not.toMatch(/NaN|Infinity/);
     });
 
+    it('keeps one order however many threads share the devices', async () => {
+      const stages = handReceiver().stages;
+      const many = Array.from({ length: 130 }, (_, index) => ({
+        ...HAND_DEVICES[1]!,
+        id: `many-${index}`,
+        partNumber: `MANY-${index}`,
+        gainBandwidthHz: { min: (50 + 10 * ((index * 37) % 130)) * 1e6 },
+        quote: { currency: 'USD', breaks: [{ quantity: 1, unitPriceMicros: 10_000 * (1 + ((index * 53) % 130)) }] },
+      }));
+      const request = handReceiver({ stages, devices: [...HAND_DEVICES, ...many] });
+      const { body } = await tryDevices({ ...request, stageId: stages[1]!.id }).expect(200);
+      const tried = body.candidates.filter(({ deviceId }: { deviceId: string }) => deviceId.startsWith('many-'));
+      expect(new Set(tried.map(({ deviceId }: { deviceId: string }) => deviceId)).size).toBe(130);
+      const order = ['clear', 'tight', 'unknown', 'over'];
+      const keys = body.candidates.map(
+        ({ verdict, unitCost }: { verdict: string; unitCost: { amountMicros: number | null } }) =>
+          order.indexOf(verdict) * 1e12 + (unitCost.amountMicros ?? 1e11),
+      );
+      expect(keys).toEqual([...keys].sort((a: number, b: number) => a - b));
+      expect(new Set(body.candidates.map(({ verdict }: { verdict: string }) => verdict)).size).toBeGreaterThan(1);
+    });
+
     it('keeps to the devices that are named', async () => {
       const { id } = await createDevice(designer.agent);
       const stages = handReceiver().stages;

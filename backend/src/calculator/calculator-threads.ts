@@ -3,6 +3,8 @@ import path from 'node:path';
 import { Injectable, Logger } from '@nestjs/common';
 import type { OnApplicationBootstrap, OnApplicationShutdown } from '@nestjs/common';
 import { Piscina } from 'piscina';
+import { compareCandidates } from './engine';
+import type { CandidatesReport } from './engine';
 import { InvalidError, TooManyRequestsError } from '../common/errors';
 import runCalculation from './calculation.worker';
 import type { CalculationAnswer, CalculationTask, Refusal } from './calculation.worker';
@@ -63,7 +65,7 @@ class LazyPool<Task, Answer> {
 @Injectable()
 export class CalculatorThreads implements OnApplicationBootstrap, OnApplicationShutdown {
   private readonly previews = new LazyPool<CalculationTask, CalculationAnswer>('calculation.worker.js', THREADS);
-  private readonly trials = new LazyPool<CandidatesTask, CandidatesAnswer>('candidates.worker.js', 1);
+  private readonly trials = new LazyPool<CandidatesTask, CandidatesAnswer>('candidates.worker.js', THREADS);
 
   onApplicationBootstrap(): void {
     if (!RUNS_FROM_SOURCES) this.previews.start();
@@ -78,12 +80,31 @@ export class CalculatorThreads implements OnApplicationBootstrap, OnApplicationS
 
   /** The answer as JSON text. */
   async tryDevices(task: CandidatesTask): Promise<string> {
-    return accepted(await this.trials.run(task));
+    const parts = partsOf(task.candidates, THREADS);
+    const answers = await Promise.all(parts.map((candidates) => this.trials.run({ ...task, candidates })));
+    return merged(answers.map(accepted));
   }
 
   async onApplicationShutdown(): Promise<void> {
     await Promise.all([this.previews.destroy(), this.trials.destroy()]);
   }
+}
+
+/** Fewer devices than this in one thread are done before another thread has been asked. */
+const WORTH_A_THREAD = 40;
+
+/** The devices dealt out in turn, so that every thread gets as many of each sort. */
+function partsOf<T>(all: readonly T[], most: number): T[][] {
+  const count = Math.max(1, Math.min(most, Math.ceil(all.length / WORTH_A_THREAD)));
+  return Array.from({ length: count }, (_, part) => all.filter((_each, index) => index % count === part));
+}
+
+/** The answers of several threads about one stage as one. */
+function merged(answers: readonly string[]): string {
+  if (answers.length === 1) return answers[0];
+  const reports = answers.map((answer) => JSON.parse(answer) as CandidatesReport);
+  const candidates = reports.flatMap((report) => report.candidates).sort(compareCandidates);
+  return JSON.stringify({ ...reports[0], candidates });
 }
 
 /** What the calculator refuses is the request's fault: 422 with the fields that it names. */

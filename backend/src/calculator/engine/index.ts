@@ -17,6 +17,7 @@ import type {
 } from './report';
 import type { ChainInput, Device } from './types';
 
+export { compareCandidates } from './candidates/try-devices';
 export { validateChain } from './chain/validate';
 export { EngineInputError, ENGINE_ISSUE_CODES } from './errors';
 export type { EngineIssue, EngineIssueCode } from './errors';

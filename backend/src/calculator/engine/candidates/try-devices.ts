@@ -32,11 +32,16 @@ export function tryDevicesInStage(input: ChainInput, stageId: string, devices: r
   const candidates = devices
     .map((device) => candidate(input, index, device, withDevice(stage, device)))
     .filter((each) => each !== null)
-    .sort(byVerdictAndPrice);
+    .sort(compareCandidates);
   return { stageId, needs: stageNeeds(present.facts, present.facts.stages[index]), candidates };
 }
 
-function byVerdictAndPrice(a: CandidateReport, b: CandidateReport): number {
+/**
+ * Order of tried devices: clear, tight, unknown, over; the cheaper first, without a price last; then by part number.
+ *
+ * @example [...candidates].sort(compareCandidates)[0] // the cheapest that passes
+ */
+export function compareCandidates(a: CandidateReport, b: CandidateReport): number {
   const price = (each: CandidateReport): number => each.unitCost.amountMicros ?? Number.POSITIVE_INFINITY;
   const verdicts = badness(a.verdict) - badness(b.verdict);
   if (verdicts !== 0) return verdicts;
