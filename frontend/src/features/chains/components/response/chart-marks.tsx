@@ -1,4 +1,4 @@
-import type { Curves } from '../../../../api/types';
+import type { Curves, Figure } from '../../../../api/types';
 import { formatFigure, formatSignificant } from '../../../../lib/format-figure';
 import type { PlotBox, PlotScales } from '../../lib/response-geometry';
 import { useReport, useWorkspace } from '../workspace-context';
@@ -62,29 +62,42 @@ function RequiredWindow({ scales, from, to }: { scales: PlotScales; from: number
   );
 }
 
+/** A label needs this much room beside its mark. */
+const LABEL_WIDTH = 100;
+
 function CornerMarks({ scales, gainDb, box }: { scales: PlotScales; gainDb: number; box: PlotBox }) {
   const { gbwCase } = useWorkspace();
-  const { figures } = useReport().cases[gbwCase];
+  const { cornerLower, cornerUpper } = useReport().cases[gbwCase].figures;
   return (
     <>
-      {[figures.cornerLower, figures.cornerUpper].map((figure, index) => {
-        if (figure.value === null) return null;
-        const x = scales.x(figure.value);
-        if (x <= box.left || x >= box.width - box.right) return null;
-        return (
-          <g key={index}>
-            <line className={styles.corner} x1={x} x2={x} y1={scales.y(gainDb) - 12} y2={scales.y(gainDb) + 12} />
-            <text
-              className={styles.markText}
-              x={index === 0 ? x - 7 : x + 7}
-              y={scales.y(gainDb) - 8}
-              textAnchor={index === 0 ? 'end' : 'start'}
-            >
-              −3 dB {formatFigure(figure).text}
-            </text>
-          </g>
-        );
-      })}
+      <CornerMark figure={cornerLower} labelAt="left" y={scales.y(gainDb)} scales={scales} box={box} />
+      <CornerMark figure={cornerUpper} labelAt="right" y={scales.y(gainDb)} scales={scales} box={box} />
     </>
+  );
+}
+
+interface CornerMarkProps {
+  figure: Figure;
+  labelAt: 'left' | 'right';
+  y: number;
+  scales: PlotScales;
+  box: PlotBox;
+}
+
+/** The label stands on the outer side, where the curve has gone down, unless it would run out of the plot. */
+function CornerMark({ figure, labelAt, y, scales, box }: CornerMarkProps) {
+  if (figure.value === null) return null;
+  const x = scales.x(figure.value);
+  if (x <= box.left || x >= box.width - box.right) return null;
+  const roomLeft = x - box.left > LABEL_WIDTH;
+  const roomRight = box.width - box.right - x > LABEL_WIDTH;
+  const left = labelAt === 'left' ? roomLeft : !roomRight;
+  return (
+    <g>
+      <line className={styles.corner} x1={x} x2={x} y1={y - 12} y2={y + 12} />
+      <text className={styles.markText} x={left ? x - 7 : x + 7} y={y - 8} textAnchor={left ? 'end' : 'start'}>
+        −3 dB {formatFigure(figure).text}
+      </text>
+    </g>
   );
 }

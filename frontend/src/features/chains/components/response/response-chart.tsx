@@ -42,7 +42,9 @@ function useGainRange({ curves, shownStages, closeUp }: ResponseChartProps): [nu
     return [Math.max(Math.floor(lowest - 1), Math.floor(target - 3 * reach)), Math.ceil(target + reach / 2)];
   }
   const stages = curves.stages.filter((stage) => shownStages.includes(stage.stageId));
-  return gainRange([chain, ...stages.map((stage) => stage.cases[gbwCase].gainDb)]);
+  const { gainDb } = requirements;
+  const required = gainDb ? [gainDb.target - gainDb.tolerance, gainDb.target + gainDb.tolerance] : [];
+  return gainRange([chain, ...stages.map((stage) => stage.cases[gbwCase].gainDb)], required);
 }
 
 export function ResponseChart(props: ResponseChartProps) {

@@ -26,23 +26,28 @@ export function FeedbackForm({ stage }: { stage: FeedbackStage }) {
       <div className={styles.fields}>
         <TopologyField stage={stage} series={series} />
         <GainField stage={stage} series={series} />
-        <div>
-          <div className={styles.label}>Resistors from</div>
-          <Segmented<ResistorSeries>
-            block
-            aria-label="Resistors from"
-            className={styles.series}
-            disabled={disabled}
-            value={series}
-            onChange={changeSeries}
-            options={[...RESISTOR_SERIES]}
-          />
-        </div>
+        {!disabled && <SeriesChoice series={series} onChange={changeSeries} />}
         <ResistorFields stage={stage} series={series} />
         <PartsFields stage={stage} />
       </div>
       <ResultLine stage={stage} />
     </>
+  );
+}
+
+function SeriesChoice({ series, onChange }: { series: ResistorSeries; onChange: (series: ResistorSeries) => void }) {
+  return (
+    <div>
+      <div className={styles.label}>Resistors from</div>
+      <Segmented<ResistorSeries>
+        block
+        aria-label="Resistors from"
+        className={styles.series}
+        value={series}
+        onChange={onChange}
+        options={[...RESISTOR_SERIES]}
+      />
+    </div>
   );
 }
 

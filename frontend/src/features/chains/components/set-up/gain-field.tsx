@@ -70,8 +70,8 @@ function RatioField({ stage, series }: GainFieldProps) {
       onChange={change}
       disabled={disabled}
       error={problem ?? error('wantedGain')}
-      suffix={`× = ${decibelText(stage.wantedGain ?? actual)}`}
-      placeholder={actual === null ? '' : `${formatSignificant(actual, 4)} by resistors`}
+      suffix={`= ${decibelText(stage.wantedGain ?? actual)}`}
+      placeholder={actual === null ? '' : formatSignificant(actual, 4)}
     />
   );
 }
