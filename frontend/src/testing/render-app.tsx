@@ -1,9 +1,10 @@
-import { QueryClient } from '@tanstack/react-query';
 import { render, type RenderResult } from '@testing-library/react';
 import { createMemoryRouter, RouterProvider } from 'react-router-dom';
 
 import { Providers } from '../app/providers';
+import { createQueryClient } from '../app/query-client';
 import { routes } from '../app/router';
+import { signedOutStore } from '../app/signed-out-store';
 
 export interface RenderedApp extends RenderResult {
   /** Where the program is: path and query. */
@@ -12,7 +13,9 @@ export interface RenderedApp extends RenderResult {
 
 /** The whole program at an address, as main.tsx mounts it; only failed requests are not repeated. */
 export function renderApp(address: string): RenderedApp {
-  const queryClient = new QueryClient({ defaultOptions: { queries: { retry: false, gcTime: 0 } } });
+  signedOutStore.set(false);
+  const queryClient = createQueryClient(() => signedOutStore.set(true));
+  queryClient.setDefaultOptions({ queries: { retry: false, gcTime: 0 } });
   const router = createMemoryRouter(routes, { initialEntries: [address] });
   const rendered = render(
     <Providers queryClient={queryClient}>

@@ -1,5 +1,6 @@
 import { EmptyState } from '../../components/empty-state';
 import { Page } from '../../components/page';
+import { PageHeader } from '../../components/page-header';
 import { useHasRole } from '../../components/session-context';
 import { PeoplePage } from '../../features/administration/components/people-page';
 
@@ -10,7 +11,10 @@ export function Component() {
       {administrates ? (
         <PeoplePage />
       ) : (
-        <EmptyState title="Only administrators manage people">Ask one of them for an account or a role.</EmptyState>
+        <>
+          <PageHeader title="Administration" />
+          <EmptyState title="Only administrators manage people">Ask one of them for an account or a role.</EmptyState>
+        </>
       )}
     </Page>
   );
