@@ -21,7 +21,12 @@ export const killAll = (signal) => running.forEach((child) => killGroup(child, s
  */
 export function run(command, args, { env = process.env, cwd = root, timeoutMs = 0, echo = false } = {}) {
   return new Promise((resolve) => {
-    const child = spawn(command, args, { cwd, env, detached: true, stdio: ['ignore', 'pipe', 'pipe'] });
+    const child = spawn(command, args, {
+      cwd,
+      env: { ...env, NO_COLOR: '1', FORCE_COLOR: undefined },
+      detached: true,
+      stdio: ['ignore', 'pipe', 'pipe'],
+    });
     running.add(child);
     let output = '';
     let timedOut = false;
