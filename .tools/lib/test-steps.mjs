@@ -77,7 +77,7 @@ async function drift() {
   if (openapi.code !== 0) return verdict('API description', openapi);
   const schema = await run(
     process.execPath,
-    [bin('openapi-typescript/bin/cli.js'), file('openapi.json'), '-o', file('schema.d.ts')],
+    [bin('openapi-typescript/bin/cli.js'), file('openapi.json'), '--immutable', '-o', file('schema.d.ts')],
     { timeoutMs: MINUTE_MS },
   );
   const limits = await run(process.execPath, [
