@@ -1,3 +1,4 @@
+import { API_LIMITS } from '../../../api/limits';
 import type { Policy } from '../../../api/types';
 import type { QuantityUnit } from '../../../lib/quantity-units';
 
@@ -16,101 +17,58 @@ export interface PolicyField {
   readonly factor: number;
 }
 
-const factorField = (key: PolicyNumber, label: string, hint: string, maximum: number): PolicyField => ({
-  key,
-  label,
-  hint,
-  unit: 'number',
-  suffix: '×',
-  minimum: 0.05,
-  maximum,
-  factor: 1,
-});
+/** A field with the server's limits, shown as `factor` times what is stored. */
+function policyField(
+  key: PolicyNumber,
+  label: string,
+  hint: string,
+  shown: Pick<PolicyField, 'unit' | 'suffix'> & { readonly factor?: number },
+): PolicyField {
+  const { factor = 1, ...rest } = shown;
+  const { minimum, maximum } = API_LIMITS.Policy[key];
+  return { key, label, hint, ...rest, factor, minimum: minimum * factor, maximum: maximum * factor };
+}
 
-const targetField = (key: PolicyNumber, label: string, hint: string): PolicyField => ({
-  key,
-  label,
-  hint,
-  unit: 'number',
-  suffix: '×',
-  minimum: 1,
-  maximum: 1000,
-  factor: 1,
-});
-
-const percentField = (key: PolicyNumber, label: string, hint: string): PolicyField => ({
-  key,
-  label,
-  hint,
-  unit: '%',
-  minimum: 0,
-  maximum: 99,
-  factor: 100,
-});
+const times = (key: PolicyNumber, label: string, hint: string): PolicyField =>
+  policyField(key, label, hint, { unit: 'number', suffix: '×' });
+const decibels = (key: PolicyNumber, label: string, hint: string): PolicyField =>
+  policyField(key, label, hint, { unit: 'dB' });
+const percent = (key: PolicyNumber, label: string, hint: string): PolicyField =>
+  policyField(key, label, hint, { unit: '%', factor: 100 });
+const degrees = (key: PolicyNumber, label: string, hint: string): PolicyField =>
+  policyField(key, label, hint, { unit: '°' });
 
 export const POLICY_GROUPS: readonly { readonly title: string; readonly fields: readonly PolicyField[] }[] = [
   {
     title: 'Targets',
     fields: [
-      targetField('headroomTarget', 'GBW headroom', 'Below this a stage is tight; below ×1 it is over.'),
-      targetField('bandwidthTarget', 'Closed-loop bandwidth', 'Of the band’s top edge; below this tight.'),
-      targetField('slewTarget', 'Slew headroom', 'Below this tight; below ×1 over.'),
+      times('headroomTarget', 'GBW headroom', 'Below this a stage is tight; below ×1 it is over.'),
+      times('bandwidthTarget', 'Closed-loop bandwidth', 'Of the band’s top edge; below this tight.'),
+      times('slewTarget', 'Slew headroom', 'Below this tight; below ×1 over.'),
     ],
   },
   {
     title: 'When the datasheet gives no minimum',
     fields: [
-      factorField('gbwDerating', 'GBW from typical', 'Minimum = typical × this, marked as assumed.', 1),
-      factorField('slewDerating', 'Slew rate from typical', 'Minimum = typical × this, marked as assumed.', 1),
-      factorField('temperatureFactor', 'Hot case', 'Further factor on GBW in the case “minimum, hot”.', 1),
+      times('gbwDerating', 'GBW from typical', 'Minimum = typical × this, marked as assumed.'),
+      times('slewDerating', 'Slew rate from typical', 'Minimum = typical × this, marked as assumed.'),
+      times('temperatureFactor', 'Hot case', 'Further factor on GBW in the case “minimum, hot”.'),
     ],
   },
   {
     title: 'Tight before the limit',
     fields: [
-      {
-        key: 'levelMarginDb',
-        label: 'Levels',
-        hint: 'Swing, compression and output current.',
-        unit: 'dB',
-        minimum: 0,
-        maximum: 60,
-        factor: 1,
-      },
-      {
-        key: 'noiseMarginDb',
-        label: 'Noise figure',
-        hint: 'Within this of the limit.',
-        unit: 'dB',
-        minimum: 0,
-        maximum: 60,
-        factor: 1,
-      },
-      percentField('budgetMargin', 'Noise density, power, cost', 'Within this part of the limit.'),
-      percentField('toleranceMargin', 'Gain, flatness, corners', 'Within this part of the tolerance or limit.'),
+      decibels('levelMarginDb', 'Levels', 'Swing, compression and output current.'),
+      decibels('noiseMarginDb', 'Noise figure', 'Within this of the limit.'),
+      percent('budgetMargin', 'Noise density, power, cost', 'Within this part of the limit.'),
+      percent('toleranceMargin', 'Gain, flatness, corners', 'Within this part of the tolerance or limit.'),
     ],
   },
   {
     title: 'Phase margin',
     fields: [
-      {
-        key: 'phaseMarginOverDeg',
-        label: 'Over below',
-        hint: 'At minimum and maximum GBW, the worse counts.',
-        unit: '°',
-        minimum: 0,
-        maximum: 90,
-        factor: 1,
-      },
-      {
-        key: 'phaseMarginTightDeg',
-        label: 'Tight below',
-        hint: 'Not below the limit for over.',
-        unit: '°',
-        minimum: 0,
-        maximum: 90,
-        factor: 1,
-      },
+      degrees('phaseMarginOverDeg', 'Over below', 'At minimum and maximum GBW, the worse counts.'),
+      degrees('phaseMarginTightDeg', 'Tight below', 'Not below the limit for over.'),
     ],
   },
 ];
