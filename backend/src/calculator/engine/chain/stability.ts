@@ -1,60 +1,14 @@
 import type { StabilityPoint } from '../analysis';
 import type { MutableComplex } from '../complex';
 import { LoopSamples, marginFromSamples } from './loop-crossings';
-import { stageSpan, StageSpan } from './stage-span';
+import { scanStages, StageScan } from './loop-scan';
 import type { ChainResponse } from './response';
 import { powerToDb } from '../units';
 
-const COARSE_PER_DECADE = 2;
-const FINE_PER_DECADE = 6;
-const LOWEST_HZ = 1;
 /** Below this relative power above ideal (0.002 dB) a peak is not looked for more finely. */
 const WORTH_REFINING = 1.0005;
 const GOLDEN = (Math.sqrt(5) - 1) / 2;
 const GOLDEN_STEPS = 14;
-
-/** Ascending grid from 1 Hz: coarse where every loop still has much gain, fine up to the highest limit. */
-function scanGrid(fineFromHz: number, toHz: number): number[] {
-  const coarse = Math.max(0, Math.ceil(Math.log10(fineFromHz / LOWEST_HZ) * COARSE_PER_DECADE));
-  const startHz = coarse > 0 ? fineFromHz : LOWEST_HZ;
-  const fine = Math.max(1, Math.ceil(Math.log10(toHz / startHz) * FINE_PER_DECADE));
-  const grid: number[] = [];
-  for (let i = 0; i < coarse; i++) grid.push(LOWEST_HZ * (startHz / LOWEST_HZ) ** (i / coarse));
-  for (let i = 0; i <= fine; i++) grid.push(startHz * (toHz / startHz) ** (i / fine));
-  return grid;
-}
-
-interface StageScan {
-  readonly index: number;
-  readonly span: StageSpan;
-  /** Plain arrays: short typed arrays live outside the heap and cost more to collect than to fill. */
-  readonly re: number[];
-  readonly im: number[];
-  readonly power: number[];
-}
-
-/** Loop gain and relative gain of all feedback stages over one grid, every point solved once for all of them. */
-function scanStages(response: ChainResponse): { grid: number[]; scans: StageScan[] } {
-  const { network } = response;
-  const spans = network.prepared.map(stageSpan);
-  const known = spans.filter((span) => span !== null);
-  const fineFromHz = Math.min(...known.map((span) => span.cornerHz)) * 1e-3;
-  const grid = scanGrid(fineFromHz, Math.max(...known.map((span) => span.limitHz)));
-  const scans = spans.flatMap((span, k): StageScan[] =>
-    span ? [{ index: k + 1, span, re: [], im: [], power: [] }] : [],
-  );
-  const out: MutableComplex = { re: 0.5, im: 0.5 };
-  for (const frequencyHz of grid) {
-    response.solve(frequencyHz);
-    for (const scan of scans) {
-      network.stages[scan.index - 1].loop?.loadedLoopGain(out);
-      scan.re.push(out.re);
-      scan.im.push(out.im);
-      scan.power.push(response.power[scan.index]);
-    }
-  }
-  return { grid, scans };
-}
 
 /** The grid up to a stage's own limit, the limit itself as its end. */
 function samplesOf(response: ChainResponse, grid: readonly number[], scan: StageScan, loop: LoopAt): LoopSamples {

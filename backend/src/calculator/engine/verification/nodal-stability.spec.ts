@@ -47,7 +47,8 @@ function walk(input: ChainInput, k: number): { readonly marginDeg: number; reado
 
 /** Phase margins that are reported, against a walk along the nodal return ratio of the complete chain. */
 describe('phase margin of every loop of random chains against the nodal return ratio', () => {
-  const seeds = Array.from({ length: 12 }, (_, i) => 3001 + i);
+  // Chain 175 has a pair of crossings within a fifth of a decade.
+  const seeds = [175, ...Array.from({ length: 12 }, (_, i) => 3001 + i)];
 
   it.each(seeds)('chain %i', (seed) => {
     const input = randomChain(seed);
