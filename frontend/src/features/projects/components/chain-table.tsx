@@ -22,13 +22,13 @@ export function ChainTable({ projectId, chains }: { projectId: string; chains: r
             <th scope="col" className="number">
               Worst headroom
             </th>
-            <th scope="col" className="number">
+            <th scope="col" className={`number ${styles.secondary}`}>
               Gain
             </th>
             <th scope="col" className="number">
               Cost
             </th>
-            <th scope="col" className="number">
+            <th scope="col" className={`number ${styles.secondary}`}>
               Limit
             </th>
           </tr>
@@ -79,13 +79,13 @@ function SummaryCells({ summary }: { summary: OptionSummary }) {
         <FigureText figure={worstHeadroom} />
         {worstHeadroomStage && <div className="soft">{worstHeadroomStage}</div>}
       </td>
-      <td className="number">
+      <td className={`number ${styles.secondary}`}>
         <FigureText figure={gain} />
       </td>
       <td className="number">
         <MoneyText money={cost} />
       </td>
-      <td className="number soft">{costLimit ? <MoneyText money={costLimit} /> : 'none set'}</td>
+      <td className={`number soft ${styles.secondary}`}>{costLimit ? <MoneyText money={costLimit} /> : 'none set'}</td>
     </>
   );
 }
