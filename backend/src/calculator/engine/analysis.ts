@@ -55,6 +55,8 @@ export interface StageAnalysis {
   readonly riseTimeS: Maybe;
   /** With ideal gain at the largest input. */
   readonly outputPeakV: Maybe;
+  /** What a block would give into its own impedance, half its EMF: its available output. Null for other stages. */
+  readonly matchedPeakV: Maybe | null;
   readonly outputNominalPeakV: Maybe;
   /** What the output can swing around its DC point, offset taken off. */
   readonly swingAvailableV: Maybe;

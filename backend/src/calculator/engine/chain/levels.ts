@@ -27,6 +27,8 @@ export function inputPeak(source: Source, which: 'largest' | 'nominal'): Maybe {
 /** Levels of one stage. All V and A peak. */
 export interface StageLevels {
   readonly outputPeakV: Maybe;
+  /** A block's into its own impedance. */
+  readonly matchedPeakV: Maybe | null;
   readonly outputNominalPeakV: Maybe;
   readonly swingAvailableV: Maybe;
   readonly slewNeededVPerS: Maybe;
@@ -87,10 +89,15 @@ export function stageLevels(input: ChainInput, response: ChainResponse, offsets:
     const outputPeakV = mapMaybe(largest, (peak) => peak * gain);
     const outputNominalPeakV = mapMaybe(nominal, (peak) => peak * gain);
     const device = amplifierOf(stage);
-    if (!device) return passiveLevels(outputPeakV, outputNominalPeakV);
+    if (!device) {
+      const halfEmf = Math.abs(response.ideal.emf[index + 1]) / 2;
+      const matchedPeakV = stage.block ? mapMaybe(largest, (peak) => peak * halfEmf) : null;
+      return passiveLevels(outputPeakV, outputNominalPeakV, matchedPeakV);
+    }
     const admittance = drivenAdmittance(response, index + 1, omega);
     return {
       outputPeakV,
+      matchedPeakV: null,
       outputNominalPeakV,
       swingAvailableV: swingAvailable(device, supply, offsets[index]),
       ...slewLevels(device, input.policy, outputPeakV, omega),
@@ -110,9 +117,10 @@ function slewLevels(device: AmplifierDevice, policy: Policy, outputPeakV: Maybe,
   };
 }
 
-function passiveLevels(outputPeakV: Maybe, outputNominalPeakV: Maybe): StageLevels {
+function passiveLevels(outputPeakV: Maybe, outputNominalPeakV: Maybe, matchedPeakV: Maybe | null): StageLevels {
   return {
     outputPeakV,
+    matchedPeakV,
     outputNominalPeakV,
     swingAvailableV: NOT_AN_AMPLIFIER,
     slewNeededVPerS: NOT_AN_AMPLIFIER,

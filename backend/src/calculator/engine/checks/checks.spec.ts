@@ -251,10 +251,10 @@ describe('current feedback', () => {
 
 describe('compression of a block', () => {
   // 1 V peak EMF from 50 Ω into 50 Ω: 0.5 V peak, ×10 dB: 1.581 V peak in 50 Ω = +13.98 dBm.
-  const block = (dbm: number | undefined) => {
+  const block = (dbm: number | undefined, loadOhm: number | null = 50) => {
     const source = { kind: 'voltage', resistanceOhm: 50, levelKind: 'peak-emf', largestLevel: 1 } as const;
     const device = matchedBlockDevice('d', 50, 10, dbm === undefined ? {} : { outputP1dbDbm: { min: dbm } });
-    const specification = { source, load: { resistanceOhm: 50 } };
+    const specification = { source, load: { resistanceOhm: loadOhm } };
     return find(calculate(chainInput([matchedBlockStage('s', 'd')], [device], specification)), 'compression');
   };
 
@@ -264,6 +264,11 @@ describe('compression of a block', () => {
     [15, 'clear'],
   ] as const)('P1dB of %s dBm is %s', (dbm, verdict) => {
     expect(block(dbm)?.verdict).toBe(verdict);
+  });
+
+  it.each([[null], [5]])('counts what is available, not what a load of %s Ω makes of the voltage', (loadOhm) => {
+    expect(block(14.9, loadOhm)?.sentence).toBe(block(14.9)?.sentence);
+    expect(block(15, loadOhm)?.verdict).toBe('clear');
   });
 
   it('is no check where the block states no compression point', () => {

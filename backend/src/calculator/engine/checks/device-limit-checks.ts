@@ -22,7 +22,8 @@ export function compressionCheck(facts: ChainFacts, stage: StageFacts): Check | 
   if (device?.kind !== 'matched-block') return null;
   const limit = columnOf(device.outputP1dbDbm, ['min', 'typ', 'max']);
   if (!limit) return null;
-  const peak = stage.analysis.outputPeakV;
+  // The datasheet's point is measured into the block's own impedance, whatever it drives here.
+  const peak = stage.analysis.matchedPeakV ?? stage.analysis.outputPeakV;
   if (peak.value === null) {
     const { reason } = peak;
     return unknownCheck('compression', 'compression', () => cannotBeJudged('the output level', reason));
@@ -56,7 +57,7 @@ function compressionSentence(stage: StageFacts, device: MatchedBlockDevice, peak
   const limitDbm = limit.value;
   const powerDbm = dbmOf(peakV, device.impedanceOhm);
   return (
-    `At the largest input it gives ${decibelText(powerDbm, [limitDbm])}m; ${partName(stage)} compresses by 1 dB at ` +
+    `At the largest input it has ${decibelText(powerDbm, [limitDbm])}m available; ${partName(stage)} compresses by 1 dB at ` +
     `${decibelLimitText(limitDbm)}m (${limit.text}): ${decibelText(limitDbm - powerDbm, [0])} left.`
   );
 }
