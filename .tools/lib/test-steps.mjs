@@ -139,7 +139,7 @@ const jest = (title, ...options) =>
   );
 
 /** What is measured in time runs alone: two suites at once would measure each other. */
-const SPEED_SPECS = 'src/bench\\.spec\\.ts$';
+const SPEED_SPECS = '(bench|performance-shape)\\.spec\\.ts$';
 const backendSpecs = jest('backend specs', '--testPathIgnorePatterns', SPEED_SPECS);
 const backendSpeed = jest('speed of the backend', '--runInBand', '--testPathPatterns', SPEED_SPECS);
 

@@ -15,7 +15,7 @@ import { bootApp } from './boot';
 import { readEnvironment } from './config/environment';
 
 /** The measurements that need a running server, on a demo of their own. */
-export async function measureServer(): Promise<Measured[]> {
+async function measureServer(): Promise<Measured[]> {
   const dataDir = mkdtempSync(path.join(tmpdir(), 'bandledger-bench-'));
   const booted = await bootApp(
     readEnvironment({
@@ -45,9 +45,7 @@ async function main(): Promise<void> {
   process.exit(0);
 }
 
-if (require.main === module) {
-  main().catch((error: unknown) => {
-    process.stderr.write(`${error instanceof Error ? error.stack : String(error)}\n`);
-    process.exit(1);
-  });
-}
+main().catch((error: unknown) => {
+  process.stderr.write(`${error instanceof Error ? error.stack : String(error)}\n`);
+  process.exit(1);
+});
