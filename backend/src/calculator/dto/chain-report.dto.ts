@@ -1,5 +1,5 @@
 import { ApiProperty, ApiSchema } from '@nestjs/swagger';
-import { CHAIN_FIGURES, STAGE_FIGURES } from '../engine';
+import { CHAIN_FIGURES, STAGE_FIGURES, STAGE_KINDS } from '../engine';
 import type {
   ChainCaseReport,
   ChainFigureKey,
@@ -49,7 +49,7 @@ export class StageReportDto implements StageReport {
   @ApiProperty() readonly stageId: string;
   @ApiProperty({ description: 'S1, S2 …' }) readonly label: string;
   @ApiProperty() readonly name: string;
-  @ApiProperty({ enum: ['voltage-feedback', 'current-feedback', 'rc-section', 'matched-block'], enumName: 'StageKind' })
+  @ApiProperty({ enum: STAGE_KINDS, enumName: 'StageKind' })
   readonly kind: StageKind;
   @ApiProperty(nullable('string')) readonly topology: string | null;
   @ApiProperty(nullable('string')) readonly deviceId: string | null;

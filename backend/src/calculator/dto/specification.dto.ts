@@ -10,6 +10,7 @@ import type {
   LevelKind,
   Load,
   Requirements,
+  Source,
   Specification,
   Supply,
   VoltageSource,
@@ -54,7 +55,10 @@ export class CurrentSourceDto implements CurrentSource {
   readonly dcCurrentA?: number;
 }
 
-export const SOURCE = declareUnion('Source', 'kind', { voltage: VoltageSourceDto, current: CurrentSourceDto });
+export const SOURCE = declareUnion<Source['kind']>('Source', 'kind', {
+  voltage: VoltageSourceDto,
+  current: CurrentSourceDto,
+});
 
 @ApiSchema({ name: 'Load' })
 export class LoadDto implements Load {

@@ -10,6 +10,7 @@ import type {
   CurrentFeedbackTopology,
   MatchedBlockStage,
   RcSectionStage,
+  StageKind,
   VoltageFeedbackStage,
   VoltageFeedbackTopology,
 } from '../engine';
@@ -112,7 +113,7 @@ export class MatchedBlockStageDto extends DeviceStageDto implements MatchedBlock
 
 export type StageDto = VoltageFeedbackStageDto | CurrentFeedbackStageDto | RcSectionStageDto | MatchedBlockStageDto;
 
-export const STAGE = declareUnion('Stage', 'kind', {
+export const STAGE = declareUnion<StageKind>('Stage', 'kind', {
   'voltage-feedback': VoltageFeedbackStageDto,
   'current-feedback': CurrentFeedbackStageDto,
   'rc-section': RcSectionStageDto,

@@ -9,7 +9,8 @@ export const GBW_CASES: readonly GbwCase[] = ['typical', 'minimum', 'minimumHot'
 
 export type Grade = 'general-purpose' | 'rf';
 export type Lifecycle = 'active' | 'not-recommended' | 'last-time-buy' | 'obsolete';
-export type DeviceKind = 'voltage-feedback' | 'current-feedback' | 'matched-block';
+export const DEVICE_KINDS = ['voltage-feedback', 'current-feedback', 'matched-block'] as const;
+export type DeviceKind = (typeof DEVICE_KINDS)[number];
 
 /** A datasheet value with the columns that the datasheet gives; at least one of them. Unit as the owning name says. */
 export interface DatasheetValue {
@@ -125,7 +126,8 @@ export type AmplifierDevice = VoltageFeedbackDevice | CurrentFeedbackDevice;
 
 // --- Stages ---------------------------------------------------------------------------------------------------------
 
-export type StageKind = 'voltage-feedback' | 'current-feedback' | 'rc-section' | 'matched-block';
+export const STAGE_KINDS = ['voltage-feedback', 'current-feedback', 'rc-section', 'matched-block'] as const;
+export type StageKind = (typeof STAGE_KINDS)[number];
 export type VoltageFeedbackTopology = 'non-inverting' | 'follower' | 'inverting' | 'transimpedance';
 export type CurrentFeedbackTopology = 'non-inverting' | 'inverting';
 

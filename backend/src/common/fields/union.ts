@@ -14,7 +14,12 @@ export interface Union {
 
 const declared = new Map<string, Union>();
 
-export function declareUnion(name: string, property: string, shapes: Readonly<Record<string, Class<unknown>>>): Union {
+/** With its words given as a type argument, a shape that is missing does not compile. */
+export function declareUnion<Word extends string>(
+  name: string,
+  property: string,
+  shapes: Readonly<Record<Word, Class<unknown>>>,
+): Union {
   class UnknownShape {}
   Choice(Object.keys(shapes))(UnknownShape.prototype, property);
   const union = { name, property, shapes, unknownShape: UnknownShape };

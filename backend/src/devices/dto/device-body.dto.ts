@@ -1,4 +1,5 @@
 import { ApiSchema, IntersectionType } from '@nestjs/swagger';
+import type { DeviceKind } from '../../calculator/engine';
 import { Nested } from '../../common/fields/nested';
 import { Quantity } from '../../common/fields/quantity';
 import { PlainDate, Text } from '../../common/fields/text';
@@ -54,13 +55,13 @@ export type DeviceBodyDto = VoltageFeedbackDeviceBodyDto | CurrentFeedbackDevice
 export type DeviceUpdateDto =
   VoltageFeedbackDeviceUpdateDto | CurrentFeedbackDeviceUpdateDto | MatchedBlockDeviceUpdateDto;
 
-export const DEVICE_BODY = declareUnion('DeviceBody', 'kind', {
+export const DEVICE_BODY = declareUnion<DeviceKind>('DeviceBody', 'kind', {
   'voltage-feedback': VoltageFeedbackDeviceBodyDto,
   'current-feedback': CurrentFeedbackDeviceBodyDto,
   'matched-block': MatchedBlockDeviceBodyDto,
 });
 
-export const DEVICE_UPDATE = declareUnion('DeviceUpdate', 'kind', {
+export const DEVICE_UPDATE = declareUnion<DeviceKind>('DeviceUpdate', 'kind', {
   'voltage-feedback': VoltageFeedbackDeviceUpdateDto,
   'current-feedback': CurrentFeedbackDeviceUpdateDto,
   'matched-block': MatchedBlockDeviceUpdateDto,

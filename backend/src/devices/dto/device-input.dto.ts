@@ -1,5 +1,10 @@
 import { ApiSchema, IntersectionType } from '@nestjs/swagger';
-import type { CurrentFeedbackDevice, MatchedBlockDevice, VoltageFeedbackDevice } from '../../calculator/engine';
+import type {
+  CurrentFeedbackDevice,
+  DeviceKind,
+  MatchedBlockDevice,
+  VoltageFeedbackDevice,
+} from '../../calculator/engine';
 import { Flag } from '../../common/fields/choice';
 import { Nested } from '../../common/fields/nested';
 import { Text } from '../../common/fields/text';
@@ -38,7 +43,7 @@ export class MatchedBlockDeviceDto
 export type DeviceInputDto = VoltageFeedbackDeviceDto | CurrentFeedbackDeviceDto | MatchedBlockDeviceDto;
 
 /** A device as the calculator takes it. */
-export const DEVICE = declareUnion('Device', 'kind', {
+export const DEVICE = declareUnion<DeviceKind>('Device', 'kind', {
   'voltage-feedback': VoltageFeedbackDeviceDto,
   'current-feedback': CurrentFeedbackDeviceDto,
   'matched-block': MatchedBlockDeviceDto,

@@ -1,4 +1,5 @@
 import { ApiProperty, ApiSchema, getSchemaPath } from '@nestjs/swagger';
+import { DEVICE_KINDS } from '../../calculator/engine';
 import type { DeviceKind, Grade, Lifecycle } from '../../calculator/engine';
 import { Choice, QueryFlag } from '../../common/fields/choice';
 import { QueryQuantity } from '../../common/fields/quantity';
@@ -7,7 +8,6 @@ import { TEXT_LIMITS } from '../../common/limits';
 import { GRADES, LIFECYCLES } from './device-fields.dto';
 import type { LibraryDeviceDto } from './library-device.dto';
 
-export const DEVICE_KINDS: readonly DeviceKind[] = ['voltage-feedback', 'current-feedback', 'matched-block'];
 export const DEVICE_SORTS = ['partNumber', 'gbw', 'price', 'updated'] as const;
 export type DeviceSort = (typeof DEVICE_SORTS)[number];
 

@@ -1,4 +1,5 @@
 import { ApiProperty, ApiSchema, IntersectionType } from '@nestjs/swagger';
+import type { DeviceKind } from '../../calculator/engine';
 import { declareUnion } from '../../common/fields/union';
 import { DatasheetDto } from './device-body.dto';
 import { CurrentFeedbackFieldsDto, MatchedBlockFieldsDto, VoltageFeedbackFieldsDto } from './device-fields.dto';
@@ -46,7 +47,7 @@ export type LibraryDeviceDto =
   VoltageFeedbackLibraryDeviceDto | CurrentFeedbackLibraryDeviceDto | MatchedBlockLibraryDeviceDto;
 
 /** A device of the library as it is answered. */
-export const LIBRARY_DEVICE = declareUnion('LibraryDevice', 'kind', {
+export const LIBRARY_DEVICE = declareUnion<DeviceKind>('LibraryDevice', 'kind', {
   'voltage-feedback': VoltageFeedbackLibraryDeviceDto,
   'current-feedback': CurrentFeedbackLibraryDeviceDto,
   'matched-block': MatchedBlockLibraryDeviceDto,

@@ -1,3 +1,4 @@
+import { DEVICE_KINDS } from '../types';
 import type {
   CurrentFeedbackDevice,
   DatasheetValue,
@@ -118,7 +119,7 @@ export function validateDevice(found: IssueCollector, path: string, device: Devi
     matchedBlock(found, path, device);
     return;
   }
-  if (!found.oneOf(`${path}.kind`, device.kind, ['voltage-feedback', 'current-feedback', 'matched-block'])) return;
+  if (!found.oneOf(`${path}.kind`, device.kind, DEVICE_KINDS)) return;
   amplifier(found, path, device);
   if (device.kind === 'voltage-feedback') voltageFeedback(found, path, device);
   else currentFeedback(found, path, device);

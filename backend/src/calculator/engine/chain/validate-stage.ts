@@ -1,4 +1,5 @@
-import type { Device, FeedbackStage, RcSectionStage, Stage } from '../types';
+import { STAGE_KINDS } from '../types';
+import type { Device, DeviceKind, FeedbackStage, RcSectionStage, Stage } from '../types';
 import type { IssueCollector } from './issue-collector';
 
 /** What a stage sees in front of it, as far as refusals depend on it. */
@@ -9,11 +10,11 @@ export interface Front {
   readonly dcReturn: boolean;
 }
 
-const KIND_TEXT = {
+const KIND_TEXT: Readonly<Record<DeviceKind, string>> = {
   'voltage-feedback': 'a voltage-feedback amplifier',
   'current-feedback': 'a current-feedback amplifier',
   'matched-block': 'a matched block',
-} as const;
+};
 
 const TOPOLOGIES = {
   'voltage-feedback': ['non-inverting', 'follower', 'inverting', 'transimpedance'],
@@ -121,11 +122,7 @@ export function validateStage(
   devices: readonly Device[],
   front: Front,
 ): Front {
-  if (
-    !found.oneOf(`${path}.kind`, stage.kind, ['rc-section', 'matched-block', 'voltage-feedback', 'current-feedback'])
-  ) {
-    return front;
-  }
+  if (!found.oneOf(`${path}.kind`, stage.kind, STAGE_KINDS)) return front;
   if (stage.kind === 'rc-section') return section(found, path, stage, front);
   const device = deviceOf(found, path, stage, devices);
   if (stage.kind === 'matched-block') {
