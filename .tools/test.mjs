@@ -6,6 +6,9 @@ import { killAll } from './lib/process.mjs';
 const MESSAGE_LINES = 30;
 /** Frames of a stack that lie in other people's code. */
 const FOREIGN_FRAME = /^\s+at .*(node_modules|node:internal)/;
+/** Colours that a runner put into its messages. */
+// eslint-disable-next-line no-control-regex -- the escape character is what is looked for
+const COLOURS = /\u001b\[[0-9;]*m/g;
 const AT_ONCE = 2;
 const say = (text) => console.log(`Bandledger: ${text} …`);
 const startedAt = Date.now();
@@ -13,6 +16,7 @@ const elapsed = () => `${((Date.now() - startedAt) / 1000).toFixed(0).padStart(4
 
 function show({ title, message }) {
   const lines = message
+    .replace(COLOURS, '')
     .trimEnd()
     .split('\n')
     .filter((text) => !FOREIGN_FRAME.test(text));

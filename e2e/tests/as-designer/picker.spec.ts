@@ -34,5 +34,5 @@ test('figures follow what is typed, in engineering notation', async ({ page, api
   await expect(ledger.figure('S2', 'headroom')).toHaveText(/^×1\.07/);
   await expect(ledger.row('S2')).toHaveAccessibleName(/tight$/);
   await panel.feedbackResistor.fill('4k7');
-  await expect(panel.panel).toContainText('4.70 kΩ');
+  await expect(panel.panel).toContainText('= 4.7 kΩ');
 });
