@@ -14,6 +14,7 @@ interface ErrorBody {
   readonly requestId?: string;
   readonly current?: unknown;
   readonly where?: unknown;
+  readonly hiddenCount?: unknown;
 }
 
 /** Every failed request becomes one of these; `status` 0 = no answer came. */
@@ -26,8 +27,8 @@ export class ApiError extends Error {
     message: string,
     readonly fieldErrors: readonly FieldError[] = [],
     readonly requestId: string | null = null,
-    /** 409 stale_version: the row as it is now. 409 in_use: where. */
-    readonly details: { readonly current?: unknown; readonly where?: unknown } = {},
+    /** 409 stale_version: the row as it is now. 409 in_use: where, and how many places are hidden from the person. */
+    readonly details: { readonly current?: unknown; readonly where?: unknown; readonly hiddenCount?: unknown } = {},
   ) {
     super(message);
   }
@@ -62,7 +63,7 @@ export function toApiError(error: unknown): unknown {
     body.message ?? messageFor(status),
     body.fieldErrors ?? [],
     body.requestId ?? null,
-    { current: body.current, where: body.where },
+    { current: body.current, where: body.where, hiddenCount: body.hiddenCount },
   );
 }
 

@@ -90,6 +90,7 @@ export function buildDevice(changes: Partial<DeviceDto> = {}): DeviceDto {
     verified: false,
     gainBandwidthHz: { min: 75e6, typ: 100e6, page: '4' },
     version: 3,
+    quoteVersion: 0,
     enteredBy: { id: 'user-2', name: 'Teo Marsh' },
     verifiedBy: null,
     updatedAt: '2026-01-05T10:00:00.000Z',

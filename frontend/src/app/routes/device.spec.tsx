@@ -2,7 +2,7 @@ import { screen, waitFor, within } from '@testing-library/react';
 import { describe, expect, it } from 'vitest';
 
 import { buildDevice, buildSession } from '../../testing/builders';
-import { Refusal, standInForHttp } from '../../testing/http-stand-in';
+import { Refusal, standInForHttp, type StandInRequest } from '../../testing/http-stand-in';
 import { renderApp } from '../../testing/render-app';
 import { fill, setupUser } from '../../testing/user';
 
@@ -49,6 +49,7 @@ describe('a device', () => {
     await user.click(screen.getByRole('button', { name: 'Save the quote' }));
     await waitFor(() =>
       expect(server.current.sent('PUT', '/devices/device-1/quote')[0]?.body).toEqual({
+        version: 0,
         currency: 'USD',
         breaks: [
           { quantity: 1, unitPriceMicros: 1_350_000 },
@@ -58,17 +59,40 @@ describe('a device', () => {
     );
   });
 
+  it('asks before a quote that somebody else saved meanwhile is replaced', async () => {
+    const user = setupUser();
+    const quoteOf = (unitPriceMicros: number) => ({ currency: 'USD', breaks: [{ quantity: 1, unitPriceMicros }] });
+    open(buildDevice({ quote: quoteOf(1_000_000), quoteVersion: 4 }));
+    const current = buildDevice({ quote: quoteOf(2_000_000), quoteVersion: 5 });
+    const stale = new Refusal(409, { code: 'stale_version', message: 'Changed meanwhile.', current });
+    server.current.on('PUT /devices/device-1/quote', ({ body }: StandInRequest) =>
+      (body as { version: number }).version === 5 ? current : stale,
+    );
+    await user.click(await screen.findByRole('button', { name: 'Edit the quote' }));
+    await fill(user, screen.getByLabelText('Line 1, price of one'), '3');
+    await user.click(screen.getByRole('button', { name: 'Save the quote' }));
+    await user.click(await screen.findByRole('button', { name: 'Save mine over it' }));
+    await waitFor(() =>
+      expect(server.current.sent('PUT', '/devices/device-1/quote').map(({ body }) => body)).toEqual([
+        { version: 4, ...quoteOf(3_000_000) },
+        { version: 5, ...quoteOf(3_000_000) },
+      ]),
+    );
+  });
+
   it('names where it is used when it cannot be deleted', async () => {
     const user = setupUser();
     const app = open();
     server.current.on(
       'DELETE /devices/device-1',
-      new Refusal(409, { code: 'in_use', message: 'It is in use.', where: { where: [use], hiddenCount: 0 } }),
+      new Refusal(409, { code: 'in_use', message: 'It is in use.', where: [use], hiddenCount: 3 }),
     );
     await user.click(await screen.findByRole('button', { name: 'Delete' }));
     await user.click(within(await screen.findByRole('dialog')).getByRole('button', { name: 'Delete' }));
     const refusal = await screen.findByText('MRWG-G072 was not deleted');
-    expect(within(refusal.closest<HTMLElement>('[role="dialog"]')!).getByText(/S2 Gain/)).toBeInTheDocument();
+    const dialog = within(refusal.closest<HTMLElement>('[role="dialog"]')!);
+    expect(dialog.getByText(/S2 Gain/)).toBeInTheDocument();
+    expect(dialog.getByText(/And in 3 stages of projects that you cannot see/)).toBeInTheDocument();
     expect(app.address()).toBe('/devices/device-1');
   });
 });

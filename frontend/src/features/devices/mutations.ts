@@ -23,6 +23,12 @@ function useRefreshed(): (device: DeviceDto) => Promise<void> {
   };
 }
 
+/** After a stale save: what somebody else saved is on the screen at once. */
+export function useShowNewerDevice(): (device: DeviceDto) => void {
+  const refreshed = useRefreshed();
+  return (device) => void refreshed(device);
+}
+
 export function useCreateDevice() {
   const refreshed = useRefreshed();
   return useMutation({
@@ -63,7 +69,8 @@ export function useVerifyDevice(deviceId: string) {
 export function useSetQuote(deviceId: string) {
   const refreshed = useRefreshed();
   return useMutation({
-    mutationFn: (quote: QuoteBody) => putJson<DeviceDto>(`/devices/${deviceId}/quote`, quote),
+    mutationFn: ({ quote, version }: { readonly quote: QuoteBody; readonly version: number }) =>
+      putJson<DeviceDto>(`/devices/${deviceId}/quote`, { version, ...quote }),
     onSuccess: refreshed,
   });
 }
@@ -71,8 +78,9 @@ export function useSetQuote(deviceId: string) {
 export function useRemoveQuote(deviceId: string) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: () => deleteJson(`/devices/${deviceId}/quote`),
-    onSuccess: () => refreshFigures(client),
+    mutationFn: (version: number) => deleteJson(`/devices/${deviceId}/quote`, { version }),
+    // Also after a refusal: the quote may have been changed by somebody else.
+    onSettled: () => refreshFigures(client),
   });
 }
 

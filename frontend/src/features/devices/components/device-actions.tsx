@@ -10,12 +10,12 @@ import { UseList } from './device-uses';
 
 const messageOf = (error: unknown): string => (isApiError(error) ? error.message : 'It did not work. Try again.');
 
-/** 409 in_use says where: in the error itself, as a list of stages. */
+/** 409 in_use says where: in the error itself, as a list of stages and the number of those that are hidden. */
 function usesOf(error: unknown): DeviceUses | null {
   if (!isApiError(error) || error.code !== 'in_use') return null;
-  const { where } = error.details;
-  if (Array.isArray(where)) return { where: where as DeviceUses['where'], hiddenCount: 0 };
-  return typeof where === 'object' && where !== null && 'where' in where ? (where as DeviceUses) : null;
+  const { where, hiddenCount } = error.details;
+  if (!Array.isArray(where)) return null;
+  return { where: where as DeviceUses['where'], hiddenCount: typeof hiddenCount === 'number' ? hiddenCount : 0 };
 }
 
 export function DeviceActions({ device }: { device: DeviceDto }) {

@@ -1,7 +1,7 @@
 import { Button } from 'antd';
 import { useCallback, useMemo, useState, type FormEvent } from 'react';
 
-import { fieldMessages, isApiError } from '../../../api/api-error';
+import { fieldMessages } from '../../../api/api-error';
 import type { DeviceDto } from '../../../api/types';
 import { ConflictDialog } from '../../../components/conflict-dialog';
 import { ErrorNotice } from '../../../components/error-notice';
@@ -13,6 +13,7 @@ import { TextField } from '../../../components/text-field';
 import { deviceProblems, draftOf, type DeviceDraft, type SheetDraft } from '../lib/device-draft';
 import { FIELD_GROUPS } from '../lib/device-fields';
 import type { DeviceFieldGroup } from '../lib/device-field';
+import { newerDevice } from '../lib/newer-device';
 import { NumberRow, SheetRow } from './datasheet-row';
 import styles from './device-form.module.css';
 import { DeviceIdentity } from './device-identity';
@@ -30,10 +31,6 @@ interface DeviceFormProps {
   onSaveOver?: (draft: DeviceDraft, newer: DeviceDto) => void;
   onTakeTheirs?: (newer: DeviceDto) => void;
   onCloseConflict?: () => void;
-}
-
-function newerDevice(error: unknown): DeviceDto | null {
-  return isApiError(error) && error.isStale ? ((error.details.current as DeviceDto | undefined) ?? null) : null;
 }
 
 type Problems = Readonly<Record<string, string>>;

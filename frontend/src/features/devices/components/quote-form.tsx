@@ -3,35 +3,56 @@ import { useState, type FormEvent } from 'react';
 
 import { fieldMessages } from '../../../api/api-error';
 import type { DeviceDto } from '../../../api/types';
+import { ConflictDialog } from '../../../components/conflict-dialog';
 import { ErrorNotice } from '../../../components/error-notice';
 import { focusFirstProblem } from '../../../components/form-problems';
 import { LeaveGuard } from '../../../components/leave-guard';
 import { TextField } from '../../../components/text-field';
 import { addBreak, quoteBody, quoteDraftOf, quoteProblems, type BreakDraft, type QuoteDraft } from '../lib/quote-draft';
-import { useSetQuote } from '../mutations';
+import { newerDevice } from '../lib/newer-device';
+import { useSetQuote, useShowNewerDevice } from '../mutations';
 import styles from './quote-section.module.css';
 
 const MAXIMUM_BREAKS = 20;
 
 export function QuoteForm({ device, onClose }: { device: DeviceDto; onClose: () => void }) {
-  const [initial] = useState(() => quoteDraftOf(device.quote));
+  // As they were read when the form opened: a refetch behind it must not hide a conflict.
+  const [{ initial, version }] = useState(() => ({
+    initial: quoteDraftOf(device.quote),
+    version: device.quoteVersion,
+  }));
   const [draft, setDraft] = useState<QuoteDraft>(initial);
   const [tried, setTried] = useState(false);
   const save = useSetQuote(device.id);
   const own = quoteProblems(draft);
   const problems = { ...fieldMessages(save.error), ...(tried ? own : {}) };
+  const newer = newerDevice(save.error);
+  const showNewer = useShowNewerDevice();
+  const takeTheirs = (theirs: DeviceDto): void => {
+    showNewer(theirs);
+    onClose();
+  };
+  const saveOver = (of: number): void => save.mutate({ quote: quoteBody(draft), version: of }, { onSuccess: onClose });
   const submit = (event: FormEvent<HTMLFormElement>): void => {
     event.preventDefault();
     setTried(true);
     if (focusFirstProblem(event.currentTarget, Object.keys(own).length > 0)) return;
-    save.mutate(quoteBody(draft), { onSuccess: onClose });
+    saveOver(version);
   };
   return (
     <form className={styles.form} onSubmit={submit} noValidate aria-label="Quote">
       <LeaveGuard when={draft !== initial && !save.isPending} />
+      <ConflictDialog
+        open={newer !== null}
+        what={`The quote of ${device.partNumber}`}
+        saving={save.isPending}
+        onKeepMine={() => newer && saveOver(newer.quoteVersion)}
+        onTakeTheirs={() => newer && takeTheirs(newer)}
+        onClose={() => save.reset()}
+      />
       <BreakLines draft={draft} onChange={setDraft} problems={problems} />
       <QuoteDetails draft={draft} onChange={setDraft} problems={problems} />
-      <ErrorNotice error={save.error} title="The quote was not saved." />
+      <ErrorNotice error={newer ? null : save.error} title="The quote was not saved." />
       <div className={styles.buttons}>
         <Button type="primary" htmlType="submit" loading={save.isPending}>
           Save the quote

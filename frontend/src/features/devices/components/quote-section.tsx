@@ -83,7 +83,7 @@ function RemoveQuote({ device }: { device: DeviceDto }) {
       okText: 'Remove',
       okButtonProps: { danger: true },
       onOk: () =>
-        remove.mutate(undefined, {
+        remove.mutate(device.quoteVersion, {
           onError: (error) => void message.error(isApiError(error) ? error.message : 'It did not work. Try again.'),
         }),
     });
