@@ -1,12 +1,10 @@
-const PER_LN10 = 20 / Math.LN10;
-
 /**
  * Amplitude ratio (> 0) in dB.
  *
  * @example ratioToDb(10) // 20
  */
 export function ratioToDb(ratio: number): number {
-  return PER_LN10 * Math.log(ratio);
+  return 20 * Math.log10(ratio);
 }
 
 /**
@@ -15,7 +13,7 @@ export function ratioToDb(ratio: number): number {
  * @example powerToDb(2) // 3.0103
  */
 export function powerToDb(power: number): number {
-  return (PER_LN10 / 2) * Math.log(power);
+  return 10 * Math.log10(power);
 }
 
 /**

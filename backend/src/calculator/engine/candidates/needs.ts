@@ -3,7 +3,7 @@ import { gbwUsed } from '../report/derived';
 import { isFeedbackStage } from '../report/facts';
 import type { ChainFacts, StageFacts } from '../report/facts';
 import { figure } from '../report/figures';
-import { dbToRatio } from '../report/maybe';
+import { dbToRatio } from '../units';
 import { atLeastText, atMostText, noiseGainText, roundAway } from '../text/phrases';
 import { decimalAmount, typed } from '../text/si-format';
 

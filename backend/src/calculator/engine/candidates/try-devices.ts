@@ -6,7 +6,7 @@ import { EngineInputError } from '../errors';
 import type { CandidateReport, CandidatesReport, Check, Money } from '../report';
 import { evaluate } from '../report/evaluate';
 import { figureOf } from '../report/figures';
-import { unknown } from '../report/maybe';
+import { unknown } from '../maybe';
 import { stageFigure } from '../report/stage-figures';
 import { decimalAmount, formatFigure } from '../text/si-format';
 import { capitalised, listText } from '../text/phrases';

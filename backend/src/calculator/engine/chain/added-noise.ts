@@ -5,7 +5,7 @@ import type { NoiseSource } from '../stages/network-stage';
 import type { ChainInput } from '../types';
 import { powerToDb } from '../units';
 import type { ChainNetwork } from './chain-network';
-import { known, notEntered, unknown } from './maybe';
+import { known, notEntered, unknown } from '../maybe';
 
 /** Noise that one stage adds at one frequency. */
 export interface StageAddedNoise {

@@ -8,7 +8,7 @@ import { bandExtremes } from './band';
 import { Corners, findCorners } from './corners';
 import { DcOffsets, dcOffsets } from './dc-offset';
 import { inputPeak, stageLevels } from './levels';
-import { known, mapMaybe, unknown } from './maybe';
+import { known, mapMaybe, unknown } from '../maybe';
 import type { ChainResponse } from './response';
 import { CaseParts, GainsAt, analyzeStage, gainsAt, riseTime, supplyPowerOf } from './stage-analysis';
 

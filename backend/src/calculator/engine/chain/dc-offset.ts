@@ -4,7 +4,7 @@ import type { DeviceCorner } from '../devices/used-values';
 import type { FeedbackPartValues } from '../stages/feedback-parts';
 import type { PreparedStage } from '../stages/prepare-stage';
 import type { AmplifierDevice, ChainInput } from '../types';
-import { known, unknown } from './maybe';
+import { known, unknown } from '../maybe';
 
 /** Offsets, worst case: the magnitudes of all contributions add, because their signs are not known. */
 export interface DcOffsets {

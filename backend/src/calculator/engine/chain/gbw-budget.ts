@@ -4,7 +4,7 @@ import { DeviceCorner, gbwFor } from '../devices/used-values';
 import { findRoot } from '../root';
 import type { PreparedStage } from '../stages/prepare-stage';
 import type { ChainInput } from '../types';
-import { known, unknown } from './maybe';
+import { known, unknown } from '../maybe';
 import type { ChainResponse } from './response';
 
 /** What a stage has and spends of its gain-bandwidth product. */

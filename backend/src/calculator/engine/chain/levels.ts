@@ -6,7 +6,7 @@ import { slewFor } from '../devices/used-values';
 import type { PreparedStage } from '../stages/prepare-stage';
 import type { AmplifierDevice, ChainInput, Policy, Source, Supply } from '../types';
 import { availablePowerToPeakEmf } from '../units';
-import { known, mapMaybe, notEntered, unknown } from './maybe';
+import { known, mapMaybe, notEntered, unknown } from '../maybe';
 import type { ChainResponse } from './response';
 
 /** Peak source EMF in V (current source: peak current in A) at a level as the source states it. */

@@ -9,7 +9,7 @@ import type { StageAddedNoise } from './added-noise';
 import type { Corners } from './corners';
 import { gbwBudget } from './gbw-budget';
 import type { StageLevels } from './levels';
-import { known, mapMaybe, notEntered, unknown } from './maybe';
+import { known, mapMaybe, notEntered, unknown } from '../maybe';
 import type { ChainResponse } from './response';
 
 /** What was read off the network at one frequency: per stage (index k), complex gains node to node and running. */

@@ -2,7 +2,7 @@ import type { Check, CheckId, Figure, Verdict } from '../report';
 import { chainFigure, chainGainUnit } from '../report/chain-figures';
 import type { ChainFacts } from '../report/facts';
 import { limitFigure } from '../report/figures';
-import { ratioToDb } from '../report/maybe';
+import { ratioToDb } from '../units';
 import { isAbove, isBelow } from '../text/deciding-digits';
 import {
   because,

@@ -4,7 +4,7 @@ import { outputCurrentHeadroom, slewAvailable, slewHeadroom, swingHeadroom } fro
 import { isFeedbackStage, partName } from '../report/facts';
 import type { ChainFacts, StageFacts } from '../report/facts';
 import { limitFigure } from '../report/figures';
-import { dbToRatio, ratioToDb } from '../report/maybe';
+import { dbToRatio, ratioToDb } from '../units';
 import { stageFigure } from '../report/stage-figures';
 import {
   cannotBeJudged,

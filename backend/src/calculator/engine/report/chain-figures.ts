@@ -5,7 +5,7 @@ import { droop, worstHeadroom, worstHeadroomStage } from './derived';
 import type { ChainFacts } from './facts';
 import { figureOf } from './figures';
 import { noiseUnit } from './stage-figures';
-import { unknown } from './maybe';
+import { unknown } from '../maybe';
 
 type Builder = (facts: ChainFacts) => Figure;
 

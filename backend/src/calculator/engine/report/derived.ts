@@ -1,7 +1,8 @@
 import type { Maybe } from '../analysis';
 import { capitalised } from '../text/phrases';
 import type { ChainFacts, StageFacts } from './facts';
-import { combine, known, ratioToDb, unknown } from './maybe';
+import { combine, known, unknown } from '../maybe';
+import { ratioToDb } from '../units';
 
 /** A frequency of the band at which the lower headroom is found. */
 export interface WorstHeadroom {

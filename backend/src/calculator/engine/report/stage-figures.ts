@@ -19,7 +19,8 @@ import {
 import type { ChainFacts, StageFacts } from './facts';
 import { figureOf } from './figures';
 import type { FigureOptions } from './figures';
-import { combine, dbToRatio, known, unknown } from './maybe';
+import { combine, known, unknown } from '../maybe';
+import { dbToRatio } from '../units';
 
 type Builder = (facts: ChainFacts, stage: StageFacts) => Figure;
 

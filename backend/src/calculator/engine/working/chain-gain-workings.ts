@@ -1,6 +1,6 @@
 import type { Maybe } from '../analysis';
 import { chainGainUnit } from '../report/chain-figures';
-import { ratioToDb } from '../report/maybe';
+import { ratioToDb } from '../units';
 import { setFrequency } from '../text/phrases';
 import type { ChainProbe } from '../chain/probe';
 import { bandData, derivedDatum, terminalData } from './data';

@@ -1,6 +1,7 @@
 import type { Maybe } from '../analysis';
 import { fullLabel, isFeedbackStage } from '../report/facts';
-import { combine, ratioToDb } from '../report/maybe';
+import { combine } from '../maybe';
+import { ratioToDb } from '../units';
 import type { WorkingStep } from '../report';
 import { decibelText, setFrequency } from '../text/phrases';
 import { bandData, derivedDatum, loopData, networkData, terminalData } from './data';

@@ -1,6 +1,6 @@
 import { worsePoint } from '../report/stage-figures';
 import { fullLabel } from '../report/facts';
-import { ratioToDb } from '../report/maybe';
+import { ratioToDb } from '../units';
 import type { WorkingStep } from '../report';
 import { basisText, setFrequency } from '../text/phrases';
 import { bandData, derivedDatum, deviceDatum, loopData, networkData, policyDatum } from './data';

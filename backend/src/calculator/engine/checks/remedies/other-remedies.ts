@@ -1,7 +1,7 @@
 import { bandwidthRatio, slewAvailable, swingHeadroom } from '../../report/derived';
 import { isFeedbackStage, partName } from '../../report/facts';
 import type { StageFacts } from '../../report/facts';
-import { ratioToDb } from '../../report/maybe';
+import { ratioToDb } from '../../units';
 import { worsePoint } from '../../report/stage-figures';
 import { atLeastText, atMostText, noiseGainText, setFrequency, targetText, valueText } from '../../text/phrases';
 import { typed } from '../../text/si-format';
