@@ -1,17 +1,23 @@
 import type { Device, FeedbackStage, Stage, StageKind } from '../../../api/types';
 import { pairHoldingFeedback } from './resistors';
 
-export const STAGE_KINDS: readonly { readonly kind: StageKind; readonly label: string; readonly note: string }[] = [
-  { kind: 'voltage-feedback', label: 'Voltage-feedback amplifier', note: 'spends gain-bandwidth' },
-  { kind: 'current-feedback', label: 'Current-feedback amplifier', note: 'has no gain-bandwidth; Rf sets its corner' },
-  { kind: 'rc-section', label: 'RC section', note: 'passive: series and shunt parts' },
-  { kind: 'matched-block', label: 'Matched block', note: 'gain block, attenuator or filter in a 50 Ω system' },
-];
+interface StageKindText {
+  readonly label: string;
+  readonly note: string;
+}
 
-export const STAGE_KIND_LABELS = Object.fromEntries(STAGE_KINDS.map(({ kind, label }) => [kind, label])) as Record<
-  StageKind,
-  string
->;
+const STAGE_KIND_TEXTS: Readonly<Record<StageKind, StageKindText>> = {
+  'voltage-feedback': { label: 'Voltage-feedback amplifier', note: 'spends gain-bandwidth' },
+  'current-feedback': { label: 'Current-feedback amplifier', note: 'has no gain-bandwidth; Rf sets its corner' },
+  'rc-section': { label: 'RC section', note: 'passive: series and shunt parts' },
+  'matched-block': { label: 'Matched block', note: 'gain block, attenuator or filter in a 50 Ω system' },
+};
+
+/** In the order in which they are offered. */
+export const STAGE_KINDS = (Object.keys(STAGE_KIND_TEXTS) as StageKind[]).map((kind) => ({
+  kind,
+  ...STAGE_KIND_TEXTS[kind],
+}));
 
 const NAMES: Readonly<Record<StageKind, string>> = {
   'voltage-feedback': 'Gain',
@@ -71,10 +77,6 @@ export function newStage(id: string, kind: StageKind, device: Device | null, atC
   return kind === 'matched-block'
     ? { id, name: NAMES[kind], kind, deviceId: device.id }
     : amplifierStage(id, device, atCurrentSource);
-}
-
-export function isFeedbackStage(stage: Stage): stage is FeedbackStage {
-  return stage.kind === 'voltage-feedback' || stage.kind === 'current-feedback';
 }
 
 export function deviceIdOf(stage: Stage): string | null {

@@ -5,11 +5,10 @@ import CopyOutlined from '@ant-design/icons/es/icons/CopyOutlined';
 import DeleteOutlined from '@ant-design/icons/es/icons/DeleteOutlined';
 import Button from 'antd/es/button';
 import Drawer from 'antd/es/drawer';
-import type { KeyboardEvent } from 'react';
+import type { KeyboardEvent, ReactElement } from 'react';
 
 import type { Stage } from '../../../../api/types';
 import { neighbourOf, stageIndex } from '../../lib/draft';
-import { isFeedbackStage } from '../../lib/stage-defaults';
 import { rowOf } from '../ledger/row-of';
 import { useNarrow } from '../use-narrow';
 import { useWorkspace } from '../workspace-context';
@@ -70,9 +69,7 @@ function PanelBody({ stage, onClose }: PanelProps) {
     <div key={stage.id} className={styles.grid} onBlur={control.settle}>
       <section className={styles.column} aria-label="Set-up">
         <PanelHead stage={stage} onClose={onClose} />
-        {isFeedbackStage(stage) && <FeedbackForm stage={stage} />}
-        {stage.kind === 'rc-section' && <RcForm stage={stage} />}
-        {stage.kind === 'matched-block' && <BlockForm stage={stage} />}
+        <StageForm stage={stage} />
       </section>
       {stage.kind === 'rc-section' ? (
         <section className={styles.column} aria-label="Checks">
@@ -84,6 +81,19 @@ function PanelBody({ stage, onClose }: PanelProps) {
       )}
     </div>
   );
+}
+
+/** A kind without a form does not compile. */
+function StageForm({ stage }: { stage: Stage }): ReactElement {
+  switch (stage.kind) {
+    case 'voltage-feedback':
+    case 'current-feedback':
+      return <FeedbackForm stage={stage} />;
+    case 'rc-section':
+      return <RcForm stage={stage} />;
+    case 'matched-block':
+      return <BlockForm stage={stage} />;
+  }
 }
 
 function PanelHead({ stage, onClose }: PanelProps) {
