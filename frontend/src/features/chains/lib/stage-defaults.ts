@@ -1,4 +1,4 @@
-import type { Device, FeedbackStage, Stage, StageKind } from '../../../api/types';
+import type { Device, DeviceKind, FeedbackStage, Stage, StageKind } from '../../../api/types';
 import { pairHoldingFeedback } from './resistors';
 
 interface StageKindText {
@@ -63,7 +63,7 @@ function amplifierStage(id: string, device: Device, atCurrentSource: boolean): F
   };
 }
 
-export function needsDevice(kind: StageKind): boolean {
+export function needsDevice(kind: StageKind): kind is DeviceKind {
   return kind !== 'rc-section';
 }
 
@@ -77,6 +77,15 @@ export function newStage(id: string, kind: StageKind, device: Device | null, atC
   return kind === 'matched-block'
     ? { id, name: NAMES[kind], kind, deviceId: device.id }
     : amplifierStage(id, device, atCurrentSource);
+}
+
+const WITHOUT_TOPOLOGY: Readonly<Record<Exclude<Stage, FeedbackStage>['kind'], string>> = {
+  'rc-section': 'passive',
+  'matched-block': 'matched',
+};
+
+export function topologyText(stage: Stage): string {
+  return 'topology' in stage ? stage.topology : WITHOUT_TOPOLOGY[stage.kind];
 }
 
 export function deviceIdOf(stage: Stage): string | null {

@@ -2,7 +2,7 @@ import type { ReactNode } from 'react';
 
 import type { Stage, StageReport } from '../../../../api/types';
 import { GradeMark } from '../../../../components/data-marks';
-import { deviceIdOf } from '../../lib/stage-defaults';
+import { deviceIdOf, topologyText } from '../../lib/stage-defaults';
 import { useWorkspace } from '../workspace-context';
 import styles from './ledger.module.css';
 
@@ -24,7 +24,6 @@ function usePartNumber(stage: Stage, report: StageReport | null): string | null 
 
 export function StageCell({ stage, index, report, children }: StageCellProps) {
   const partNumber = usePartNumber(stage, report);
-  const topology = 'topology' in stage ? stage.topology : stage.kind === 'rc-section' ? 'passive' : 'matched';
   return (
     <th scope="row" className={styles.stage}>
       <div className={styles.stageCell}>
@@ -36,7 +35,7 @@ export function StageCell({ stage, index, report, children }: StageCellProps) {
           <div className={styles.stageDevice}>
             {partNumber && <span title={partNumber}>{partNumber}</span>} <GradeMark grade={report?.grade ?? null} />
             {partNumber ? ' · ' : ''}
-            {topology}
+            {topologyText(stage)}
           </div>
         </div>
       </div>

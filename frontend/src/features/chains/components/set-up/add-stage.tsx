@@ -55,7 +55,7 @@ export function AddStage({ onClose }: { onClose: () => void }) {
           </Radio>
         ))}
       </Radio.Group>
-      {needsDevice(kind) && <DeviceChoice key={kind} kind={kind as DeviceKind} device={device} onChange={setChosen} />}
+      {needsDevice(kind) && <DeviceChoice key={kind} kind={kind} device={device} onChange={setChosen} />}
       <p className="soft">
         {address.stageId === null ? 'It goes to the end of the chain.' : 'It goes behind the selected stage.'}
       </p>
@@ -65,7 +65,7 @@ export function AddStage({ onClose }: { onClose: () => void }) {
 
 /** The chosen device, or the cheapest to begin with. */
 function useDeviceChoice(kind: StageKind, chosen: DeviceDto | null): DeviceDto | null {
-  const deviceKind = kind === 'rc-section' ? 'voltage-feedback' : kind;
+  const deviceKind = needsDevice(kind) ? kind : 'voltage-feedback';
   const { data } = useQuery(devicesOfKindQuery(deviceKind));
   if (!needsDevice(kind)) return null;
   return chosen?.kind === kind ? chosen : (data?.items.find((each) => each.kind === kind) ?? null);
