@@ -3,6 +3,7 @@ import { useParams } from 'react-router-dom';
 
 import { isApiError } from '../../api/api-error';
 import { ErrorNotice } from '../../components/error-notice';
+import { NotAllowed } from '../../components/not-allowed';
 import { Page } from '../../components/page';
 import { PageHeader } from '../../components/page-header';
 import { NewChainForm } from '../../features/chains/components/specification/new-chain-form';
@@ -28,7 +29,16 @@ export function Component() {
               { label: 'New chain' },
             ]}
           />
-          <NewChainForm projectId={projectId} currency={project.currency} />
+          {project.can.createChain ? (
+            <NewChainForm projectId={projectId} currency={project.currency} />
+          ) : (
+            <NotAllowed
+              title="You may not add chains to this project"
+              back={{ label: 'Back to the project', to: `/projects/${projectId}` }}
+            >
+              Chains are added by designers and leads.
+            </NotAllowed>
+          )}
         </>
       )}
     </Page>

@@ -1,4 +1,4 @@
-import { App, Button } from 'antd';
+import { App, Button, ConfigProvider } from 'antd';
 import { useState, type FormEvent } from 'react';
 import { useNavigate } from 'react-router-dom';
 
@@ -62,10 +62,13 @@ export function ProjectSettingsForm({ project }: { project: Project }) {
         onTakeTheirs={() => newer && restart(newer)}
         onClose={() => update.reset()}
       />
-      <IdentityFields draft={draft} onChange={setDraft} problems={problems} />
-      <Section title="Access">
-        <AccessFields draft={draft} onChange={setDraft} problems={problems} />
-      </Section>
+      {!base.can.edit && <p className="soft">Shown for information: designers and leads change it.</p>}
+      <ConfigProvider componentDisabled={!base.can.edit}>
+        <IdentityFields draft={draft} onChange={setDraft} problems={problems} />
+        <Section title="Access">
+          <AccessFields draft={draft} onChange={setDraft} problems={problems} />
+        </Section>
+      </ConfigProvider>
       <Section
         title="Margins"
         extra={base.can.setPolicy ? null : <span className="soft">Set by leads; shown for information.</span>}
