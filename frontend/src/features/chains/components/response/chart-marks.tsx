@@ -2,6 +2,7 @@ import type { Curves, Figure } from '../../../../api/types';
 import { formatFigure, formatSignificant } from '../../../../lib/format-figure';
 import type { PlotBox, PlotScales } from '../../lib/response-geometry';
 import { useReport, useWorkspace } from '../workspace-context';
+import { RequirementMarks } from './requirement-marks';
 import styles from './response.module.css';
 
 interface ChartMarksProps {
@@ -40,24 +41,8 @@ export function ChartMarks({ box, scales, curves }: ChartMarksProps) {
           </text>
         </>
       )}
-      <RequiredWindow scales={scales} from={from} to={to} />
+      <RequirementMarks scales={scales} curves={curves} />
       {ideal !== null && <CornerMarks scales={scales} gainDb={ideal - HALF_POWER_DB} box={box} />}
-    </g>
-  );
-}
-
-function RequiredWindow({ scales, from, to }: { scales: PlotScales; from: number; to: number }) {
-  const { control } = useWorkspace();
-  const { gainDb, minimumGainDb, maximumGainDb } = control.draft.specification.requirements;
-  const low = gainDb ? gainDb.target - gainDb.tolerance : minimumGainDb;
-  const high = gainDb ? gainDb.target + gainDb.tolerance : maximumGainDb;
-  if (low === undefined && high === undefined) return null;
-  return (
-    <g className={styles.required}>
-      {high !== undefined && (
-        <path d={`M${from} ${scales.y(high) - 5}V${scales.y(high)}H${to}V${scales.y(high) - 5}`} />
-      )}
-      {low !== undefined && <path d={`M${from} ${scales.y(low) + 5}V${scales.y(low)}H${to}V${scales.y(low) + 5}`} />}
     </g>
   );
 }

@@ -1,5 +1,6 @@
 import { GBW_CASES, type Curves } from '../../../../api/types';
 import { formatSignificant, formatValue } from '../../../../lib/format-figure';
+import { requiredGain } from '../../lib/requirement-windows';
 import { CASE_NAMES } from '../frame/section-bar';
 import { useWorkspace } from '../workspace-context';
 import styles from './response.module.css';
@@ -13,13 +14,31 @@ interface ReadoutProps {
 const gainText = (gain: number | null | undefined): string =>
   typeof gain === 'number' ? `${formatSignificant(gain, 4)} dB` : '–';
 
+/** What the brackets in the plot stand for. */
+function RequirementLegend() {
+  const { control } = useWorkspace();
+  const { requirements } = control.draft.specification;
+  return (
+    <>
+      {requiredGain(requirements) && <span>Short brackets: gain required at the operating frequency.</span>}
+      {requirements.flatnessDb !== undefined && (
+        <span>
+          Dashed over the band: {formatValue(requirements.flatnessDb, 'dB')} of flatness under the highest gain.
+        </span>
+      )}
+    </>
+  );
+}
+
 /** The figures under the pointer. */
 export function Readout({ curves, shownStages, index }: ReadoutProps) {
   const { gbwCase } = useWorkspace();
   if (index === null) {
     return (
       <p className={styles.readout}>
-        Band between the three GBW cases; line: {CASE_NAMES[gbwCase]}. Point at the plot to read it.
+        <span>Band between the three GBW cases; line: {CASE_NAMES[gbwCase]}.</span>
+        <RequirementLegend />
+        <span>Point at the plot to read it.</span>
       </p>
     );
   }
