@@ -11,6 +11,7 @@ export interface TextFieldProps {
   required?: boolean;
   error?: string | null;
   hint?: ReactNode;
+  /** A longer text stays as it was typed or pasted, and the field says so. */
   maxLength?: number;
   placeholder?: string;
   multiline?: boolean;
@@ -22,14 +23,21 @@ export interface TextFieldProps {
   className?: string;
 }
 
+/** In code points, as the server counts, so that an emoji is one character. */
+function tooLong({ value, maxLength }: TextFieldProps): string | null {
+  if (maxLength === undefined || value.length <= maxLength) return null;
+  const length = [...value].length;
+  return length > maxLength ? `At most ${maxLength} characters; this has ${length}.` : null;
+}
+
 export function TextField(props: TextFieldProps) {
-  const { label, value, onChange, required, error, hint, multiline, suggestions, className } = props;
+  const { label, value, onChange, required, hint, multiline, suggestions, className } = props;
+  const error = tooLong(props) ?? props.error;
   const generatedId = useId();
   const id = props.id ?? generatedId;
   const shared = {
     id,
     value,
-    maxLength: props.maxLength,
     placeholder: props.placeholder,
     disabled: props.disabled,
     autoFocus: props.autoFocus,
