@@ -9,8 +9,10 @@ import { oneTimeLinkQuery, sessionQuery } from '../../features/session/queries';
 
 export function Component() {
   const { token = '' } = useParams();
-  const { data: session } = useQuery(sessionQuery());
-  const { data: link, error, refetch } = useQuery(oneTimeLinkQuery(token));
+  const { data: session, isPending } = useQuery(sessionQuery());
+  // Whoever is signed in goes on to the desk: a link that has just been used is not asked for again.
+  const asked = !isPending && !session?.user;
+  const { data: link, error, refetch } = useQuery({ ...oneTimeLinkQuery(token), enabled: asked });
   if (session?.user) return <Navigate to="/" replace />;
   const spent = isApiError(error, 404);
   return (

@@ -3,6 +3,7 @@ import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { deleteJson, postJson } from '../../api/client';
 import { KEYS } from '../../api/query-keys';
 import type { Session, SessionUser } from '../../api/types';
+import { isOfOneTimeLink } from './queries';
 
 interface SignedIn {
   readonly user: SessionUser;
@@ -20,7 +21,7 @@ function useSignedIn(): (answer: SignedIn) => Promise<void> {
     client.setQueryData<Session>(KEYS.session, (session) =>
       session ? { ...session, user, setupNeeded: false } : session,
     );
-    await client.invalidateQueries();
+    await client.invalidateQueries({ predicate: (query) => !isOfOneTimeLink(query) });
   };
 }
 

@@ -16,9 +16,15 @@ export interface OneTimeLink {
   readonly email: string;
 }
 
+const ONE_TIME_LINK = 'one-time-link';
+
+/** A link is spent by being used: what was read of it is never read again. */
+export const isOfOneTimeLink = ({ queryKey }: { readonly queryKey: readonly unknown[] }): boolean =>
+  queryKey[0] === KEYS.session[0] && queryKey[1] === ONE_TIME_LINK;
+
 export const oneTimeLinkQuery = (token: string) =>
   queryOptions({
-    queryKey: [...KEYS.session, 'one-time-link', token],
+    queryKey: [...KEYS.session, ONE_TIME_LINK, token],
     queryFn: ({ signal }) => getJson<OneTimeLink>(`/one-time-links/${encodeURIComponent(token)}`, { signal }),
     retry: false,
     staleTime: Infinity,
