@@ -56,6 +56,15 @@ describe('the desk', () => {
     expect(screen.queryByRole('link', { name: 'Enter a device' })).not.toBeInTheDocument();
   });
 
+  it('sends an administrator without a library to the people', async () => {
+    server.current
+      .on('GET /session', buildSession({ user: buildUser({ roles: ['admin'] }) }))
+      .on('GET /desk', { overChains: [], waiting: [], counts });
+    renderApp('/');
+    const invite = await screen.findByRole('link', { name: 'Invite people' });
+    expect(invite).toHaveAttribute('href', '/administration');
+  });
+
   it('shows that it is loading', async () => {
     server.current.on('GET /session', buildSession()).on('GET /desk', () => PENDING);
     renderApp('/');

@@ -6,13 +6,7 @@ import { useHasRole } from '../../../components/session-context';
 /** The way from an empty library to the first ledger, one step at a time. */
 export function FirstSteps({ counts }: { counts: Desk['counts'] }) {
   const plans = useHasRole('designer', 'lead');
-  if (!plans) {
-    return (
-      <EmptyState title="Nothing waits for you">
-        Chains that are over a limit appear here as soon as designers have built some.
-      </EmptyState>
-    );
-  }
+  if (!plans) return <NothingToPlan counts={counts} />;
   if (counts.devices === 0) {
     return (
       <EmptyState
@@ -59,6 +53,31 @@ export function FirstSteps({ counts }: { counts: Desk['counts'] }) {
   return (
     <EmptyState title="No chain is over its limits" action={<LinkButton to="/projects">Projects</LinkButton>}>
       Chains over a limit of yours or of the team appear here first.
+    </EmptyState>
+  );
+}
+
+/** For those who plan no chains themselves: whoever may invite starts with the people. */
+function NothingToPlan({ counts }: { counts: Desk['counts'] }) {
+  const invites = useHasRole('admin');
+  if (invites && counts.devices === 0) {
+    return (
+      <EmptyState
+        title="Invite the team"
+        action={
+          <LinkButton to="/administration" type="primary">
+            Invite people
+          </LinkButton>
+        }
+      >
+        Designers enter devices and build chains, buyers enter quotes, leads set the margins. A person may have several
+        roles, you too.
+      </EmptyState>
+    );
+  }
+  return (
+    <EmptyState title="Nothing waits for you">
+      Chains that are over a limit appear here as soon as designers have built some.
     </EmptyState>
   );
 }
