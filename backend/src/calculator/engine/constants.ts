@@ -1,9 +1,6 @@
 /** Boltzmann constant, J/K. Source: SI Brochure, 9th ed. (2019), section 2.2: exact. */
 export const BOLTZMANN_J_PER_K = 1.380649e-23;
 
-/** Elementary charge, C. Source: SI Brochure, 9th ed. (2019), section 2.2: exact. */
-export const ELEMENTARY_CHARGE_C = 1.602176634e-19;
-
 /**
  * Reference temperature of the noise figure, K.
  * Source: IRE Standards on Methods of Measuring Noise in Linear Twoports, Proc. IRE 48 (1960), p. 60 ff. (from memory).
