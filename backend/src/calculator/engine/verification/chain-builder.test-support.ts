@@ -1,3 +1,4 @@
+import { DEFAULT_POLICY } from '../policy';
 import type {
   ChainInput,
   CurrentFeedbackDevice,
@@ -12,22 +13,8 @@ import type {
   VoltageFeedbackStage,
 } from '../types';
 
-/** The policy of the verification: every field a value of its own, so that a mixed-up one shows. */
-export const POLICY: Policy = {
-  gbwCase: 'minimum',
-  gbwDerating: 0.7,
-  temperatureFactor: 0.8,
-  slewDerating: 0.7,
-  headroomTarget: 3,
-  bandwidthTarget: 2,
-  slewTarget: 2,
-  levelMarginDb: 1,
-  noiseMarginDb: 0.5,
-  budgetMargin: 0.1,
-  toleranceMargin: 0.2,
-  phaseMarginOverDeg: 30,
-  phaseMarginTightDeg: 45,
-};
+/** The defaults, with a temperature factor under which the minimum and the hot case differ. */
+export const POLICY: Policy = { ...DEFAULT_POLICY, temperatureFactor: 0.8 };
 
 export const SPECIFICATION: Specification = {
   source: { kind: 'voltage', resistanceOhm: 50, levelKind: 'peak-emf', nominalLevel: 1e-3, largestLevel: 1e-3 },
