@@ -111,6 +111,7 @@ export function outputOffsetCheck(facts: ChainFacts): Check | null {
   });
 }
 
+/** Quiescent current of the chain in A against its requirement; null without one. */
 export function supplyCurrentCheck(facts: ChainFacts): Check | null {
   const limit = facts.input.specification.requirements.supplyCurrentA;
   if (limit === undefined) return null;
@@ -125,6 +126,7 @@ export function supplyCurrentCheck(facts: ChainFacts): Check | null {
   });
 }
 
+/** Quiescent power of the chain in W against its requirement; null without one. */
 export function supplyPowerCheck(facts: ChainFacts): Check | null {
   const limit = facts.input.specification.requirements.supplyPowerW;
   if (limit === undefined) return null;
