@@ -7,7 +7,8 @@ import { readSettings } from './lib/settings.mjs';
 
 await launch(async () => {
   checkNode();
-  checkFolders(readSettings().dataFolder);
+  const { port, dataFolder } = readSettings();
+  checkFolders(dataFolder);
   await install((text) => console.log(`Bandledger: ${text} …`));
   const child = spawn(
     process.execPath,
@@ -19,7 +20,8 @@ await launch(async () => {
       'npm run dev -w backend',
       'npm run dev -w frontend',
     ],
-    { cwd: root, stdio: 'inherit' },
+    // Vite hands /api on to wherever the backend listens.
+    { cwd: root, stdio: 'inherit', env: { ...process.env, BACKEND_URL: `http://127.0.0.1:${port}` } },
   );
   // Ctrl-C reaches the children by themselves: wait for them.
   process.on('SIGINT', () => {});
