@@ -170,9 +170,16 @@ describe('calculations', () => {
       [
         'a figure nobody has',
         () => handReceiver({ include: { working: { stageId: null, figure: 'luck', gbwCase: 'minimum' } } }),
-        null,
-        null,
+        'include.working.figure',
+        'required',
       ],
+      [
+        'the working of a stage that is not there',
+        () => handReceiver({ include: { working: { stageId: randomUUID(), figure: 'headroom', gbwCase: 'minimum' } } }),
+        'include.working.stageId',
+        'required',
+      ],
+      ['stages that are no list', () => handReceiver({ stages: {} }), 'stages', 'not_a_list'],
       [
         'one point of a curve',
         () => handReceiver({ include: { curves: { fromHz: 1, toHz: 2, points: 1 } } }),
@@ -182,11 +189,10 @@ describe('calculations', () => {
     ])('refuses %s', async (_case, body, path, code) => {
       const response = await calculate(body()).expect(422);
       expect(response.body).toMatchObject({ code: 'invalid', requestId: expect.any(String) });
-      if (path !== null) {
-        expect(response.body.fieldErrors).toContainEqual(
-          expect.objectContaining({ code, path: expect.stringContaining(path), message: expect.stringMatching(/\w/) }),
-        );
-      }
+      expect(response.body.fieldErrors).toContainEqual(
+        expect.objectContaining({ code, path: expect.stringContaining(path), message: expect.stringMatching(/\w/) }),
+      );
+      for (const { path: named } of response.body.fieldErrors) expect(named).not.toMatch(/undefined/);
     });
 
     it('refuses what is no JSON with 400, 1e400 with its field, and a body of 2 MB with 413', async () => {

@@ -121,6 +121,11 @@ describe('quotes', () => {
     expect(body.quote).toEqual(quote());
   });
 
+  it.each(['UDS', 'usd', 'US$'])('refuses %s, which is no currency of ISO 4217', async (currency) => {
+    const response = await buyer.agent.put(path).send(quote({ currency })).expect(422);
+    expect(response.body.fieldErrors).toEqual([expect.objectContaining({ path: 'currency', code: 'not_a_currency' })]);
+  });
+
   it('refuses a currency that is none and a day that does not exist', async () => {
     const response = await buyer.agent
       .put(path)

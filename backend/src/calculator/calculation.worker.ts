@@ -1,5 +1,5 @@
 import { EngineInputError, calculate, curves, working } from './engine';
-import type { ChainInput, CurveRequest, EngineIssue, WorkingRequest } from './engine';
+import type { ChainInput, CurveRequest, EngineIssue, Working, WorkingRequest } from './engine';
 import { warmUp } from './warm-up';
 
 export interface CalculationTask {
@@ -19,10 +19,20 @@ export default function runCalculation({ input, ...include }: CalculationTask): 
     const result = {
       report: calculate(input),
       curves: include.curves ? curves(input, include.curves) : null,
-      working: include.working ? working(input, include.working) : null,
+      working: include.working ? requestedWorking(input, include.working) : null,
     };
     return { json: JSON.stringify(result) };
   });
+}
+
+/** By now the chain is accepted: what is refused here is the question, which stands under `include.working`. */
+function requestedWorking(input: ChainInput, request: WorkingRequest): Working {
+  try {
+    return working(input, request);
+  } catch (error) {
+    if (!(error instanceof EngineInputError)) throw error;
+    throw new EngineInputError(error.issues.map((issue) => ({ ...issue, path: `include.working.${issue.path}` })));
+  }
 }
 
 /** Runs the calculator; what it refuses comes back as its issues. */

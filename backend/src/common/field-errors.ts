@@ -71,6 +71,9 @@ function ownError(error: ValidationError, path: string): FieldError[] {
 export function toFieldErrors(errors: readonly ValidationError[], parent = ''): FieldError[] {
   return errors.flatMap((error) => {
     const path = parent === '' ? error.property : `${parent}.${error.property}`;
-    return [...ownError(error, path), ...toFieldErrors(error.children ?? [], path)];
+    const own = ownError(error, path);
+    // What is no list at all has no entries that could be named.
+    const children = own[0]?.code === 'not_a_list' ? [] : (error.children ?? []);
+    return [...own, ...toFieldErrors(children, path)];
   });
 }

@@ -100,6 +100,7 @@ export class DevicesService {
     await this.queue.transaction(async (transaction) => {
       const row = await this.get(id, transaction);
       const allowed = verified ? canVerifyDevice(user, row) : canEditDevice(user);
+      if (!canEditDevice(user)) throw new ForbiddenError();
       if (!allowed) throw new ForbiddenError('Whoever entered or last edited the values cannot verify them.');
       await this.assertCurrent(user, row, version, transaction);
       row.set({

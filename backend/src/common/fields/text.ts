@@ -74,6 +74,9 @@ export function Uuid(options: FieldOptions = {}): PropertyDecorator {
 }
 
 /** ISO 4217 by shape: three capital letters. */
+/** ISO 4217 as the runtime knows it. */
+const CURRENCIES: ReadonlySet<unknown> = new Set(Intl.supportedValuesOf('currency'));
+
 export function Currency(options: FieldOptions = {}): PropertyDecorator {
   return applyDecorators(
     ApiProperty({
@@ -86,8 +89,8 @@ export function Currency(options: FieldOptions = {}): PropertyDecorator {
     ...presence(options),
     rule(
       'not_a_currency',
-      (value) => isAbsent(value) || (isText(value) && /^[A-Z]{3}$/.test(value)),
-      'must be a currency code of three capital letters, such as USD',
+      (value) => isAbsent(value) || CURRENCIES.has(value),
+      'must be an ISO 4217 currency code of three capital letters, such as USD',
     ),
   );
 }

@@ -1,3 +1,4 @@
+import { typed } from '../text/si-format';
 import { GBW_CASES, Policy, Requirements, Source, Specification } from '../types';
 import type { IssueCollector, RangeName } from './issue-collector';
 
@@ -25,10 +26,10 @@ function band(found: IssueCollector, path: string, { lowHz, operatingHz, highHz 
     found.add(
       'band_reversed',
       `${path}.highHz`,
-      `The upper band edge (${highHz} Hz) is below the lower (${lowHz} Hz).`,
+      `The upper band edge (${typed(highHz, 'Hz')}) is below the lower (${typed(lowHz, 'Hz')}).`,
     );
   } else if (operatingHz < lowHz || operatingHz > highHz) {
-    const edges = `${lowHz} Hz to ${highHz} Hz`;
+    const edges = `${typed(lowHz, 'Hz')} to ${typed(highHz, 'Hz')}`;
     found.add('band_reversed', `${path}.operatingHz`, `The operating frequency has to lie in the band, ${edges}.`);
   }
 }
@@ -48,6 +49,13 @@ const REQUIREMENT_RANGES: Readonly<Record<string, RangeName>> = {
   costMicros: 'notNegative',
 };
 
+/** Two limits that no chain could meet together. */
+function notBelow(found: IssueCollector, path: string, most?: number, least?: number, what = ''): void {
+  if (least !== undefined && most !== undefined && most < least) {
+    found.add('out_of_range', path, `Cannot be below ${least} ${what}.`);
+  }
+}
+
 function requirements(found: IssueCollector, path: string, value: Requirements): void {
   for (const [name, range] of Object.entries(REQUIREMENT_RANGES)) {
     found.optional(`${path}.${name}`, value[name as keyof Requirements], range);
@@ -56,6 +64,9 @@ function requirements(found: IssueCollector, path: string, value: Requirements):
     found.required(`${path}.gainDb.target`, value.gainDb.target, 'decibel');
     found.required(`${path}.gainDb.tolerance`, value.gainDb.tolerance, 'decibelOrZero');
   }
+  const { minimumGainDb, maximumGainDb, lowerCornerHz, upperCornerHz } = value;
+  notBelow(found, `${path}.maximumGainDb`, maximumGainDb, minimumGainDb, 'dB, the smallest gain asked for');
+  notBelow(found, `${path}.upperCornerHz`, upperCornerHz, lowerCornerHz, 'Hz, the lower corner asked for');
   if (value.polarity) found.oneOf(`${path}.polarity`, value.polarity, ['in-phase', 'inverted']);
 }
 

@@ -38,8 +38,23 @@ describe('validateChain(input)', () => {
     expect(codes(withSpecification({ band }))).toEqual([issue]);
   });
 
+  it('band edges are named with SI prefixes', () => {
+    const band = { lowHz: 7e6, operatingHz: 5e6, highHz: 50e3 };
+    const [issue] = validateChain(withSpecification({ band }));
+    expect(issue.message).toBe('The upper band edge (50 kHz) is below the lower (7 MHz).');
+  });
+
   it('a band of one frequency is a band', () => {
     expect(codes(withSpecification({ band: { lowHz: 5e6, operatingHz: 5e6, highHz: 5e6 } }))).toEqual([]);
+  });
+
+  it.each([
+    ['gain', { minimumGainDb: 60, maximumGainDb: 20 }, ['out_of_range specification.requirements.maximumGainDb']],
+    ['corners', { lowerCornerHz: 2e6, upperCornerHz: 1e6 }, ['out_of_range specification.requirements.upperCornerHz']],
+    ['equal gains', { minimumGainDb: 20, maximumGainDb: 20 }, []],
+    ['one of them', { minimumGainDb: 60, upperCornerHz: 1e6 }, []],
+  ])('requirements that contradict each other: %s', (_, requirements, issues) => {
+    expect(codes(withSpecification({ requirements }))).toEqual(issues);
   });
 
   it('a hot device is not better than a cold one', () => {
