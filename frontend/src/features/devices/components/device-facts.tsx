@@ -1,4 +1,5 @@
 import type { DeviceDto } from '../../../api/types';
+import { Facts } from '../../../components/facts';
 import { formatDay, formatPlainDate } from '../../../lib/dates';
 import { GRADE_LABELS, KIND_LABELS, LIFECYCLE_LABELS } from '../lib/device-filters';
 import styles from './device-facts.module.css';
@@ -28,14 +29,7 @@ export function DeviceFacts({ device }: { device: DeviceDto }) {
   ];
   return (
     <>
-      <dl className={styles.facts}>
-        {facts.map(([term, text]) => (
-          <div key={term}>
-            <dt>{term}</dt>
-            <dd>{text}</dd>
-          </div>
-        ))}
-      </dl>
+      <Facts facts={facts} />
       {device.notes && <p className={styles.notes}>{device.notes}</p>}
     </>
   );

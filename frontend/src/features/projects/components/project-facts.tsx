@@ -1,6 +1,6 @@
 import type { Project } from '../../../api/types';
+import { Facts } from '../../../components/facts';
 import { CASE_LABELS } from '../lib/policy-fields';
-import styles from './project-facts.module.css';
 
 /** Who sees a project and which margins its verdicts keep. */
 export function ProjectFacts({ project }: { project: Project }) {
@@ -13,14 +13,5 @@ export function ProjectFacts({ project }: { project: Project }) {
     ['Headroom target', `×${policy.headroomTarget} GBW, ×${policy.slewTarget} slew`],
     ['Bandwidth target', `×${policy.bandwidthTarget} of the top edge`],
   ];
-  return (
-    <dl className={styles.facts}>
-      {facts.map(([term, text]) => (
-        <div key={term}>
-          <dt>{term}</dt>
-          <dd>{text}</dd>
-        </div>
-      ))}
-    </dl>
-  );
+  return <Facts facts={facts} wide />;
 }
