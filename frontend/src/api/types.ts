@@ -78,7 +78,6 @@ export type SessionUser = Schemas['SessionUserDto'];
 export type DemoAccount = Schemas['DemoAccountDto'];
 export type Session = Schemas['SessionDto'];
 export type SignedIn = Schemas['SignedInDto'];
-export type LinkOwner = Schemas['LinkOwnerDto'];
 export type UserRow = Schemas['UserDto'];
 export type CreatedUser = Schemas['CreatedUserDto'];
 export type PasswordLink = Schemas['PasswordLinkDto'];

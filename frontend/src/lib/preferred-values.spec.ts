@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 
-import { isPreferred, seriesMantissas, snapToSeries, stepInSeries, type Series } from './preferred-values';
+import { seriesMantissas, snapToSeries, stepInSeries, type Series } from './preferred-values';
 
 describe('preferred series of IEC 60063:2015 (values from memory of its tables)', () => {
   it('E6 and E12 are the printed rows', () => {
@@ -42,13 +42,5 @@ describe('stepInSeries(value, series, direction)', () => {
     [0, 'E24', 1, 0],
   ])('from %d in %s by %d is %d', (value, series, direction, next) => {
     expect(stepInSeries(value, series, direction)).toBe(next);
-  });
-});
-
-describe('isPreferred(value, series)', () => {
-  it('knows members and others', () => {
-    expect(isPreferred(4700, 'E6')).toBe(true);
-    expect(isPreferred(4990, 'E24')).toBe(false);
-    expect(isPreferred(0, 'E24')).toBe(false);
   });
 });

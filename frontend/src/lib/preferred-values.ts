@@ -60,7 +60,3 @@ export function stepInSeries(value: number, series: Series, direction: 1 | -1): 
       : around.filter((candidate) => candidate < value * (1 - tolerance));
   return (direction === 1 ? beyond[0] : beyond[beyond.length - 1]) ?? value;
 }
-
-export function isPreferred(value: number, series: Series): boolean {
-  return value > 0 && Math.abs(snapToSeries(value, series) / value - 1) < 1e-9;
-}

@@ -1,4 +1,4 @@
-import type { DeviceDto, Figure, OptionSummary, Policy, Project, ProjectRow, Session, SessionUser } from '../api/types';
+import type { DeviceDto, Figure, OptionSummary, Policy, Project, Session, SessionUser } from '../api/types';
 
 /** Rows as the server answers them, with everything invented; a test states only what it is about. */
 
@@ -41,22 +41,6 @@ export function buildProject(changes: Partial<Project> = {}): Project {
     buildQuantity: 250,
     chainCount: 1,
     version: 1,
-    updatedAt: '2026-01-05T10:00:00.000Z',
-    can: { edit: true, setPolicy: false, createChain: true, delete: false },
-    ...changes,
-  };
-}
-
-export function buildProjectRow(changes: Partial<ProjectRow> = {}): ProjectRow {
-  return {
-    id: 'project-1',
-    code: 'PW-5',
-    name: 'Thickness receiver',
-    open: true,
-    memberCount: 2,
-    chainCount: 1,
-    currency: 'USD',
-    buildQuantity: 250,
     updatedAt: '2026-01-05T10:00:00.000Z',
     can: { edit: true, setPolicy: false, createChain: true, delete: false },
     ...changes,

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 
 import type { Quote } from '../../../api/types';
 import { buildDevice } from '../../../testing/builders';
-import { bandwidthOf, columnText, lowestPriceText, unitPriceAt } from './device-text';
+import { bandwidthOf, columnText, lowestPriceText } from './device-text';
 
 const quote: Quote = {
   currency: 'USD',
@@ -13,18 +13,6 @@ const quote: Quote = {
   ],
 };
 const plain = (text: string | null): string | null => text?.replace(/\u00a0/g, ' ') ?? null;
-
-describe('unitPriceAt(quote, quantity)', () => {
-  it.each([
-    [9, null],
-    [10, 1_120_000],
-    [249, 1_120_000],
-    [250, 620_000],
-    [5000, 550_000],
-  ])('for %d pieces is %s', (quantity, price) => {
-    expect(unitPriceAt(quote, quantity)).toBe(price);
-  });
-});
 
 describe('lowestPriceText(quote)', () => {
   it('names the lowest price and where it starts', () => {

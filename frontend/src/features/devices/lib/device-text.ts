@@ -16,13 +16,7 @@ export function bandwidthOf(device: DeviceDto): { readonly sheet: DatasheetValue
   return device.upperCornerHz ? { sheet: device.upperCornerHz, note: 'no GBW; corner' } : null;
 }
 
-/** "0.62 USD" at a quantity: the highest break that is reached; null below the first. */
-export function unitPriceAt(quote: Quote, quantity: number): number | null {
-  const reached = quote.breaks.filter((step) => step.quantity <= quantity);
-  return reached[reached.length - 1]?.unitPriceMicros ?? null;
-}
-
-/** "from 0.55 USD at 1000": the lowest price and where it starts. */
+/** "0.55 USD at 1000": the lowest price and where it starts. */
 export function lowestPriceText(quote: Quote | undefined): string | null {
   if (!quote || quote.breaks.length === 0) return null;
   const lowest = quote.breaks.reduce((best, step) => (step.unitPriceMicros < best.unitPriceMicros ? step : best));
