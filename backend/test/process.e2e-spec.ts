@@ -149,6 +149,7 @@ describe('the server process', () => {
     [{ PORT: 'http' }, 'PORT must be a whole number from 0 to 65535, not "http".'],
     [{ DEMO: 'maybe' }, 'DEMO must be one of auto, on, off, not "maybe".'],
     [{ DEMO: 'on', HOST: '0.0.0.0' }, 'Demo mode refuses HOST=0.0.0.0'],
+    [{ DATA_DIR: '/proc/none/data' }, 'The data folder /proc/none/data cannot be made'],
     [{ HOST: '203.0.113.1' }, 'HOST=203.0.113.1 is no address of this machine.'],
   ])('says in one line what is wrong with %j', async (environment, message) => {
     const { code, stdout, stderr } = await start(environment as Record<string, string>).ended;

@@ -1,5 +1,14 @@
 import { randomBytes } from 'node:crypto';
-import { accessSync, chmodSync, constants, existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
+import {
+  accessSync,
+  chmodSync,
+  constants,
+  existsSync,
+  mkdirSync,
+  readFileSync,
+  statSync,
+  writeFileSync,
+} from 'node:fs';
 import path from 'node:path';
 import { StartError } from './start-error';
 
@@ -17,10 +26,20 @@ function assertWritable(file: string): void {
   }
 }
 
+/** Folder by folder: Node's own `recursive` never comes back from a place like /proc, where nothing can be made. */
+function makeFolder(folder: string): void {
+  if (existsSync(folder)) {
+    if (!statSync(folder).isDirectory()) throw new Error(`${folder} is no folder`);
+    return;
+  }
+  makeFolder(path.dirname(folder));
+  mkdirSync(folder, { mode: 0o700 });
+}
+
 /** Makes the data folder if need be and checks that everything in it can be written. */
 export function prepareDataFolder(dataDir: string): void {
   try {
-    mkdirSync(dataDir, { recursive: true, mode: 0o700 });
+    makeFolder(dataDir);
   } catch {
     throw new StartError(`The data folder ${dataDir} cannot be made; check DATA_DIR and who owns its parent folder.`);
   }

@@ -38,6 +38,16 @@ describe('a quote that is typed', () => {
     expect(Object.keys(quoteProblems({ ...draft, breaks }))).toHaveLength(2);
   });
 
+  it.each([
+    ['1000000', undefined],
+    ['1000000.000001', 'Must be at most 1000000.'],
+    ['1.0000001', 'A price has at most six decimals.'],
+    ['−1', 'Give a price, for example 0.62.'],
+  ])('answers the price “%s” in words before the server does', (price, message) => {
+    const draft = { ...quoteDraftOf(quote), breaks: [{ id: 0, quantity: '1', price }] };
+    expect(quoteProblems(draft)['breaks.0.unitPriceMicros']).toBe(message);
+  });
+
   it('gives every added line an id of its own', () => {
     const ids = addBreak(addBreak(quoteDraftOf(quote))).breaks.map((step) => step.id);
     expect(new Set(ids).size).toBe(4);

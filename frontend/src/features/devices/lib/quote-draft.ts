@@ -1,3 +1,4 @@
+import { API_LIMITS } from '../../../api/limits';
 import type { Quote, QuoteBody } from '../../../api/types';
 import { formatMicros, parsePrice } from '../../../lib/money';
 
@@ -16,7 +17,16 @@ export interface QuoteDraft {
   readonly validUntil: string;
 }
 
-const MAXIMUM_QUANTITY = 1e9;
+const { maximum: MAXIMUM_QUANTITY } = API_LIMITS.PriceBreak.quantity;
+const { maximum: MAXIMUM_MICROS } = API_LIMITS.PriceBreak.unitPriceMicros;
+const NO_QUANTITY = `A whole number from 1 to ${MAXIMUM_QUANTITY}.`;
+
+function priceProblem(text: string): string | null {
+  const price = parsePrice(text);
+  if (!price.ok) return price.message;
+  if (price.micros === 0) return 'Must be more than 0.';
+  return price.micros > MAXIMUM_MICROS ? `Must be at most ${MAXIMUM_MICROS / 1e6}.` : null;
+}
 
 export function quoteDraftOf(quote: Quote | undefined): QuoteDraft {
   if (!quote) {
@@ -56,13 +66,12 @@ function breakProblems(breaks: readonly BreakDraft[]): Record<string, string> {
   breaks.forEach((step, index) => {
     const quantity = readQuantity(step.quantity);
     const before = index > 0 ? readQuantity(breaks[index - 1]?.quantity ?? '') : null;
-    if (quantity === null) problems[`breaks.${index}.quantity`] = 'A whole number from 1.';
+    if (quantity === null) problems[`breaks.${index}.quantity`] = NO_QUANTITY;
     else if (before !== null && quantity <= before) {
       problems[`breaks.${index}.quantity`] = `Must be more than ${before}, the line above.`;
     }
-    const price = parsePrice(step.price);
-    if (!price.ok) problems[`breaks.${index}.unitPriceMicros`] = price.message;
-    else if (price.micros === 0) problems[`breaks.${index}.unitPriceMicros`] = 'Must be more than 0.';
+    const price = priceProblem(step.price);
+    if (price !== null) problems[`breaks.${index}.unitPriceMicros`] = price;
   });
   return problems;
 }
