@@ -18,7 +18,7 @@ test('from sign-in to the stage that is over, why, what clears it and what that 
   // By hand: 75 MHz / (11 · 7 MHz) = 0.974; 4.10 + 0.62 + 1.45 + 1.95 = 8.12.
   await expect(ledger.row('S2')).toHaveAccessibleName(/over$/);
   await expect(ledger.figure('S2', 'headroom')).toHaveText('×0.974');
-  await expect(ledger.figure('S2', 'Noise gain')).toHaveText('×11');
+  await expect(ledger.figure('S2', 'Noise gain')).toHaveText('11');
   await expect(ledger.verdict).toContainText('S2');
   await expect(ledger.verdict).toContainText('7');
   await expect(ledger.chainCost()).toHaveText('8.12');

@@ -1698,7 +1698,7 @@ export interface components {
             readonly negativeV: number;
         };
         /** @enum {string} */
-        readonly Unit: "Hz" | "V" | "A" | "W" | "Ω" | "F" | "s" | "dB" | "dBΩ" | "ratio" | "gain" | "deg" | "V/s" | "V/√Hz" | "A/√Hz" | "fraction";
+        readonly Unit: "Hz" | "V" | "A" | "W" | "Ω" | "F" | "s" | "dB" | "dBΩ" | "ratio" | "gain" | "number" | "deg" | "V/s" | "V/√Hz" | "A/√Hz" | "fraction";
         readonly UpdateChain: {
             readonly name?: string;
             readonly specification?: components["schemas"]["Specification"];

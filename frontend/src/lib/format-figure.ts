@@ -87,6 +87,7 @@ const FORMATTERS: Readonly<Record<Unit, Formatter>> = {
   dBΩ: (value, digits) => formatDecibels(value, 'dBΩ', digits),
   ratio: (value, digits) => join(`×${formatSignificant(value, digits)}`, ''),
   gain: formatGain,
+  number: (value, digits) => join(formatSignificant(value, digits), ''),
   deg: (value, digits) => join(formatSignificant(value, digits), '°', ''),
   fraction: (value, digits) => join(formatSignificant(value * 100, digits), '%'),
 };
@@ -108,7 +109,7 @@ export function formatValue(value: number, unit: Unit, digits = 3): string {
 export function otherNotation(figure: Figure): string | null {
   const { value, unit, digits } = figure;
   if (value === null || !Number.isFinite(value)) return null;
-  if (unit === 'ratio' || unit === 'gain') {
+  if (unit === 'ratio' || unit === 'gain' || unit === 'number') {
     return value === 0 ? null : formatDecibels(20 * Math.log10(Math.abs(value)), 'dB', digits).text;
   }
   if (unit === 'dB') return `×${formatSignificant(10 ** (value / 20), digits)} in voltage`;

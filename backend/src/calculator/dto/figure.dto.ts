@@ -16,6 +16,7 @@ export const UNITS = membersOf<Unit>({
   dBΩ: true,
   ratio: true,
   gain: true,
+  number: true,
   deg: true,
   'V/s': true,
   'V/√Hz': true,

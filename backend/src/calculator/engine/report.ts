@@ -18,13 +18,14 @@ export type Unit =
   | 'dBΩ'
   | 'ratio'
   | 'gain'
+  | 'number'
   | 'deg'
   | 'V/s'
   | 'V/√Hz'
   | 'A/√Hz'
   | 'fraction';
 
-/** `ratio` prints as ×0.974, `gain` as a signed gain (×10, −10), `fraction` as %. `digits` = significant digits to print. */
+/** `ratio` prints as ×0.974, `gain` as a signed gain (×10, −10), `number` plain (a noise gain of 11), `fraction` as %. `digits` = significant digits to print. */
 export interface Figure {
   readonly value: number | null;
   readonly unit: Unit;
@@ -283,9 +284,7 @@ export interface Curves {
   }[];
 }
 
-export interface CurveRequest {
-  readonly fromHz: number;
-  readonly toHz: number;
+export interface CurveRequest extends FrequencyAxis {
   /** 2 to 2001. */
   readonly points: number;
 }

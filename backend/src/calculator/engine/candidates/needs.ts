@@ -57,7 +57,7 @@ function stableGainNeed(stage: StageFacts): StageNeed | null {
   return {
     id: 'minimum-stable-gain',
     text: `minimum stable gain at most ${noiseGainText(rounded)}`,
-    figure: figure(rounded, 'ratio', { plainGain: true }),
+    figure: figure(rounded, 'number', { plainGain: true }),
     money: null,
   };
 }

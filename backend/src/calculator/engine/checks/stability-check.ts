@@ -64,8 +64,8 @@ function noiseGainTooLow(each: Case): Check | null {
     `Its noise gain of ${noiseGainText(noiseGain, [least])}${whereLow(each, noiseGain)} is below ` +
     `${noiseGainText(least)}, the smallest at which ${partName(each.stage)} is stable.`;
   return makeCheck('stability', TITLE, 'over', sentence, () => ({
-    actual: figure(noiseGain, 'ratio', { plainGain: true, limits: [least] }),
-    limit: limitFigure(least, 'ratio'),
+    actual: figure(noiseGain, 'number', { plainGain: true, limits: [least] }),
+    limit: limitFigure(least, 'number'),
   }));
 }
 

@@ -88,11 +88,12 @@ const BUILDERS: Readonly<Record<StageFigureKey, Builder>> = {
     const isTransimpedance = stage.stage.kind === 'voltage-feedback' && stage.stage.topology === 'transimpedance';
     return figureOf(known(stage.analysis.signalGain), isTransimpedance ? 'Ω' : 'gain', { plainGain: true });
   },
-  noiseGain: (_facts, stage) => figureOf(noiseGainMaybe(stage, stage.analysis.noiseGain), 'ratio', { plainGain: true }),
+  noiseGain: (_facts, stage) =>
+    figureOf(noiseGainMaybe(stage, stage.analysis.noiseGain), 'number', { plainGain: true }),
   noiseGainOperating: (_facts, stage) =>
-    figureOf(noiseGainMaybe(stage, stage.analysis.noiseGainOperating), 'ratio', { plainGain: true }),
+    figureOf(noiseGainMaybe(stage, stage.analysis.noiseGainOperating), 'number', { plainGain: true }),
   noiseGainTop: (_facts, stage) =>
-    figureOf(noiseGainMaybe(stage, stage.analysis.noiseGainTop), 'ratio', { plainGain: true }),
+    figureOf(noiseGainMaybe(stage, stage.analysis.noiseGainTop), 'number', { plainGain: true }),
   gbwHave: (facts, stage) =>
     figureOf(gbwMaybe(stage), 'Hz', { limits: [gbwUsed(facts, stage, 'worst').value ?? undefined] }),
   gbwUsedOperating: of('Hz', (stage, facts) => gbwUsed(facts, stage, 'operating')),

@@ -73,7 +73,7 @@ export type NumberStyle = 'all-digits' | 'trimmed';
  * A number with its unit as it stands in a sentence.
  *
  * @param value finite number in the SI unit
- * @param unit unit; `ratio` → ×0.974, `gain` → ×10 or −10, `fraction` → %, `V/s` → V/µs
+ * @param unit unit; `ratio` → ×0.974, `gain` → ×10 or −10, `number` → 11, `fraction` → %, `V/s` → V/µs
  * @param digits significant digits
  * @param style `trimmed` leaves trailing zeros out
  * @returns e.g. `quantity(77e6, 'Hz', 3)` → "77.0 MHz"
@@ -85,6 +85,8 @@ export function quantity(value: number, unit: Unit, digits: number, style: Numbe
       return `×${write(value, digits)}`;
     case 'gain':
       return value < 0 ? trimmed(value, digits) : `×${trimmed(value, digits)}`;
+    case 'number':
+      return write(value, digits);
     case 'deg':
       return `${write(value, digits)}°`;
     case 'fraction':
