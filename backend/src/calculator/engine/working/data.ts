@@ -1,7 +1,9 @@
 import type { UsedValue } from '../analysis';
-import { openLoopGainDbFor, outputResistanceFor } from '../devices/amplifier-values';
+import { invertingInputResistanceFor, openLoopGainDbFor, outputResistanceFor } from '../devices/amplifier-values';
+import { referenceBandwidthFor } from '../devices/used-values';
 import { isFeedbackStage } from '../report/facts';
 import type { ChainFacts, StageFacts } from '../report/facts';
+import type { CurrentFeedbackDevice } from '../types';
 import type { Unit, WorkingDatum } from '../report';
 import { typed } from '../text/si-format';
 import { isBelow } from '../text/deciding-digits';
@@ -78,12 +80,36 @@ export function loopData(facts: ChainFacts, stage: StageFacts): readonly Working
   const { device, analysis, stability } = stage;
   if (!device || device.kind === 'matched-block') return [];
   const gain =
-    device.kind === 'voltage-feedback' ? deviceDatum(stage, 'A0', openLoopGainDbFor(device, facts.gbwCase), 'dB') : [];
+    device.kind === 'voltage-feedback'
+      ? [
+          ...deviceDatum(stage, 'GBW', analysis.gbw, 'Hz'),
+          ...deviceDatum(stage, 'A0', openLoopGainDbFor(device, facts.gbwCase), 'dB'),
+        ]
+      : referenceCircuitData(facts, stage, device);
   return [
-    ...deviceDatum(stage, 'GBW', analysis.gbw, 'Hz'),
     ...gain,
     ...deviceDatum(stage, 'Ro', outputResistanceFor(device), 'Ω'),
     ...secondPoleDatum(stability?.secondPoleHz ?? null, stability?.secondPoleText ?? null),
+  ];
+}
+
+/** What stands in place of a GBW: the bandwidth, and the circuit in which the datasheet states it. */
+export function referenceCircuitData(
+  facts: ChainFacts,
+  stage: StageFacts,
+  device: CurrentFeedbackDevice,
+): readonly WorkingDatum[] {
+  const stated = (label: string, value: string): WorkingDatum => ({
+    label,
+    value,
+    origin: `${device.partNumber}, reference circuit`,
+    assumed: false,
+  });
+  return [
+    ...deviceDatum(stage, 'reference bandwidth', referenceBandwidthFor(device, facts.policy, facts.gbwCase), 'Hz'),
+    stated('its feedback resistor', num(device.referenceFeedbackOhm, 'Ω')),
+    stated('its noise gain', num(device.referenceNoiseGain)),
+    ...deviceDatum(stage, 'Rb', invertingInputResistanceFor(device), 'Ω'),
   ];
 }
 

@@ -1,13 +1,12 @@
 import type { UsedValue } from '../analysis';
 import { currentFeedbackSecondPole } from '../devices/second-pole';
 import { invertingInputResistanceFor } from '../devices/amplifier-values';
-import { referenceBandwidthFor } from '../devices/used-values';
 import { gbwMaybe, gbwUsed, worstHeadroom } from '../report/derived';
 import { fullLabel, isFeedbackStage } from '../report/facts';
 import type { StageFacts } from '../report/facts';
 import type { Unit, WorkingStep } from '../report';
 import { setFrequency } from '../text/phrases';
-import { bandData, derivedDatum, deviceDatum, networkData, policyDatum } from './data';
+import { bandData, derivedDatum, deviceDatum, networkData, policyDatum, referenceCircuitData } from './data';
 import { complexText, lastStep, magnitude, num, probeAt, step } from './scope';
 import type { Draft, StageScope } from './scope';
 import {
@@ -251,11 +250,7 @@ function currentFeedbackCorner(scope: StageScope, title: string): Draft {
         k / (2 * Math.PI * seen),
       ),
     ],
-    data: [
-      ...deviceDatum(stage, 'reference bandwidth', referenceBandwidthFor(device, facts.policy, facts.gbwCase), 'Hz'),
-      ...deviceDatum(stage, 'Rb', buffer, 'Ω'),
-      ...networkData(stage),
-    ],
+    data: [...referenceCircuitData(facts, stage, device), ...networkData(stage)],
     assumptions: currentFeedbackSecondPole(device).known ? [] : ['No second pole entered: one pole.'],
     validity: ['Current feedback has no GBW; Rf sets the bandwidth.'],
     source: CURRENT_FEEDBACK_SOURCE,

@@ -93,14 +93,27 @@ export function loopGainWorking(scope: StageScope): Draft {
       ),
     ],
     data: [...bandData(scope.facts), ...networkData(scope.stage), ...loopData(scope.facts, scope.stage)],
-    assumptions: ['A is the open-loop gain behind its output resistance, loaded.'],
+    assumptions: [
+      isCurrentFeedback(scope)
+        ? 'Z is the open-loop transimpedance behind its output resistance, loaded.'
+        : 'A is the open-loop gain behind its output resistance, loaded.',
+    ],
     validity: [LINEAR_NETWORK],
     source: FEEDBACK_SOURCE,
   };
 }
 
+function isCurrentFeedback(scope: StageScope): boolean {
+  return scope.stage.stage.kind === 'current-feedback';
+}
+
 function loopFormula(scope: StageScope): string {
-  return scope.stage.stage.kind === 'current-feedback' ? 'T = Z/(D − Z)' : 'T = A/(D − A)';
+  return isCurrentFeedback(scope) ? 'T = Z/(D − Z)' : 'T = A/(D − A)';
+}
+
+/** What limits the loop: a current-feedback amplifier has no GBW, but a bandwidth in its reference circuit. */
+function speedName(scope: StageScope): string {
+  return isCurrentFeedback(scope) ? 'bandwidth' : 'GBW';
 }
 
 /** |1/(1 + T)|: what is missing from the ideal vector. */
@@ -121,8 +134,8 @@ function gbwRangeData(scope: StageScope): Draft['data'] {
   const { stability } = scope.stage;
   if (!stability) return [];
   return [
-    ...deviceDatum(scope.stage, 'GBW, lower end', stability.minimumGbw, 'Hz'),
-    ...deviceDatum(scope.stage, 'GBW, upper end', stability.maximumGbw, 'Hz'),
+    ...deviceDatum(scope.stage, `${speedName(scope)}, lower end`, stability.minimumGbw, 'Hz'),
+    ...deviceDatum(scope.stage, `${speedName(scope)}, upper end`, stability.maximumGbw, 'Hz'),
   ];
 }
 
@@ -145,14 +158,14 @@ function crossingSteps(scope: StageScope): readonly WorkingStep[] {
   const point = worsePoint(scope.stage);
   if (!stability || !point || point.crossingHz === null || point.phaseMarginDeg === null) return [];
   const used = stability.worse === 'maximum' ? stability.maximumGbw : stability.minimumGbw;
-  const substituted = `loaded loop, ${stability.worse} GBW (${basisText(used)})`;
+  const substituted = `loaded loop, ${stability.worse} ${speedName(scope)} (${basisText(used)})`;
   return [step('|T(f)| = 1', substituted, `${num(point.crossingHz, 'Hz')}, ∠T = ${num(point.phaseMarginDeg - 180)}°`)];
 }
 
 function phaseMarginAssumptions(scope: StageScope): readonly string[] {
   const { stability } = scope.stage;
   const always = [
-    'Looked at with the smallest and the largest GBW; the worse counts in every case.',
+    `Looked at with the smallest and the largest ${speedName(scope)}; the worse counts in every case.`,
     'Of several crossings the smallest margin counts.',
   ];
   if (!stability) return always;

@@ -76,6 +76,20 @@ describe('working', () => {
     expect(each.data).toContainEqual(expect.objectContaining({ label: 'slew rate', assumed: true }));
   });
 
+  it('of a current-feedback stage names its bandwidth and reference circuit, never a GBW', () => {
+    const input = receiver('Baseline');
+    const labelsOf = (figure: string): string[] =>
+      working(input, { stageId: 'S4', figure, gbwCase: 'minimum' }).data.map((datum) => datum.label);
+    expect(labelsOf('cornerUpper')).toEqual(
+      expect.arrayContaining(['reference bandwidth', 'its feedback resistor', 'its noise gain']),
+    );
+    const margin = working(input, { stageId: 'S4', figure: 'phaseMargin', gbwCase: 'minimum' });
+    expect(margin.data.map((datum) => datum.label)).toEqual(
+      expect.arrayContaining(['bandwidth, lower end', 'bandwidth, upper end']),
+    );
+    expect(texts(margin).join(' ')).not.toContain('GBW');
+  });
+
   it('of costs ends in the money printed', () => {
     const input = receiver('Baseline');
     expect(working(input, { stageId: 'S2', figure: 'unitCost', gbwCase: 'minimum' }).result).toBe('0.62 USD');
