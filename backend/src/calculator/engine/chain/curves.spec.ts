@@ -29,4 +29,18 @@ describe('computeCurves(input, request)', () => {
     const { typical, minimum } = curves.chain;
     expect(typical.gainDb[2] ?? NaN).toBeGreaterThan(minimum.gainDb[2] ?? NaN);
   });
+
+  it('a chain in phase reads near 0° at the operating frequency, whatever its couplings do below', () => {
+    const coupled = HAND_BASELINE.map((stage) => ({
+      ...stage,
+      couplingF: 1e-6,
+      ...(stage.topology === 'non-inverting' ? { biasOhm: 100 } : {}),
+    }));
+    const request = { fromHz: 50, toHz: 5e8, points: 701 };
+    const phase = computeCurves(handReceiver(coupled), request).chain.minimum.phaseDeg;
+    // 100 points a decade: the 500th stands at 5 MHz, where couplings of 0.3 to 1.6 kHz turn the phase by less than 0.1°.
+    const lags = [120e6, 75e6 / 11, 52e6, 150e6].reduce((sum, corner) => sum + Math.atan(5e6 / corner), 0);
+    expect(phase[500]).toBeCloseTo((-lags * 180) / Math.PI, 0);
+    expect(phase[0]).toBeGreaterThan(300);
+  });
 });

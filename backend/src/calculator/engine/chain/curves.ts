@@ -63,11 +63,30 @@ function traces(response: ChainResponse, frequenciesHz: readonly number[], chain
   return found;
 }
 
+/**
+ * Turns a trace by whole turns until its phase at the operating frequency is a principal value: a chain in phase reads
+ * near 0° there, whatever its couplings do at the first frequency.
+ */
+function unwindAt(trace: Trace, index: number): void {
+  const at = trace.phaseDeg[index];
+  if (at === null || at === undefined) return;
+  const turns = Math.ceil((at - 180) / 360) * 360;
+  trace.phaseDeg.forEach((phase, k) => {
+    if (phase !== null) trace.phaseDeg[k] = phase - turns;
+  });
+}
+
+function indexNearest(frequenciesHz: readonly number[], frequencyHz: number): number {
+  const after = frequenciesHz.findIndex((each) => each >= frequencyHz);
+  if (after < 1) return after < 0 ? frequenciesHz.length - 1 : 0;
+  return frequencyHz / frequenciesHz[after - 1] < frequenciesHz[after] / frequencyHz ? after - 1 : after;
+}
+
 const curveOf = ({ gainDb, phaseDeg }: Trace): CurveCase => ({ gainDb, phaseDeg });
 
 /**
  * Gain and phase over a logarithmic frequency range: the chain in its gain basis and every stage node to node, in all
- * three cases. Phase in degrees, followed continuously from the principal value at the first frequency.
+ * three cases. Phase in degrees, continuous, and between −180° and 180° at the point nearest to the operating frequency.
  *
  * @throws EngineInputError like analyzeChain
  * @example computeCurves(input, { fromHz: 1e5, toHz: 1e8, points: 401 }).chain.minimum.gainDb[0]
@@ -75,6 +94,7 @@ const curveOf = ({ gainDb, phaseDeg }: Trace): CurveCase => ({ gainDb, phaseDeg 
 export function computeCurves(input: ChainInput, request: CurveRequest): Curves {
   assertValid(input);
   const frequenciesHz = frequencies(request);
+  const operatingIndex = indexNearest(frequenciesHz, input.specification.band.operatingHz);
   const offset = basisOffsetDb(input.specification).value;
   const all = {} as Record<GbwCase, Trace[]>;
   const { policy } = input;
@@ -87,6 +107,7 @@ export function computeCurves(input: ChainInput, request: CurveRequest): Curves 
     }
     const response = new ChainResponse(input, new ChainNetwork(input, gbwCase));
     all[gbwCase] = traces(response, frequenciesHz, offset);
+    all[gbwCase].forEach((trace) => unwindAt(trace, operatingIndex));
     if (gbwCase === idealCase) ideal = response.idealGain;
   }
   const caseCurves = (k: number): Record<GbwCase, CurveCase> => ({
