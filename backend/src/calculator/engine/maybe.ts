@@ -17,12 +17,16 @@ export function unknown(reason: string): Maybe {
 }
 
 /**
- * No value because a device's data lacks something.
+ * No value because a device's data lacks something, or several things.
  *
  * @example notEntered('slew rate', device).reason // 'Slew rate of MRWG-G072 is not entered.'
  */
-export function notEntered(what: string, device: Pick<Device, 'partNumber'>): Maybe {
-  return unknown(`${what.charAt(0).toUpperCase()}${what.slice(1)} of ${device.partNumber} is not entered.`);
+export function notEntered(what: string | readonly string[], device: Pick<Device, 'partNumber'>): Maybe {
+  const all = typeof what === 'string' ? [what] : what;
+  const last = all.length - 1;
+  const listed = last > 0 ? `${all.slice(0, last).join(', ')} and ${all[last]}` : all[last];
+  const are = last > 0 ? 'are' : 'is';
+  return unknown(`${listed.charAt(0).toUpperCase()}${listed.slice(1)} of ${device.partNumber} ${are} not entered.`);
 }
 
 /** f(value), or the same reason. */

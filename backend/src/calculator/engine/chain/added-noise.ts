@@ -42,8 +42,7 @@ export function addedNoise(input: ChainInput, network: ChainNetwork, frequencyHz
     const { sources, missing } = stage.ownNoise(network.ports[k], omega);
     const ownV2PerHz = sources.reduce((total, next) => total + next.v2PerHzAtOutput, 0);
     const { device } = network.prepared[k];
-    if (missing.length > 0 && device)
-      return { ownV2PerHz, sources, referred: notEntered(missing.join(' and '), device) };
+    if (missing.length > 0 && device) return { ownV2PerHz, sources, referred: notEntered(missing, device) };
     const { emfRe, emfIm } = network.ports[k + 1];
     const gainSquared = (emfRe * emfRe + emfIm * emfIm) * (perCurrent ? sourceSquared : 1);
     return { ownV2PerHz, sources, referred: known(ownV2PerHz / gainSquared) };
