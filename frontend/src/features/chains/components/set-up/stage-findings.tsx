@@ -5,11 +5,16 @@ import { VerdictIcon } from '../../../../components/verdict-mark';
 import { useWorkspace } from '../workspace-context';
 import styles from './set-up.module.css';
 
+/** What lacks may as well be a level of the specification, which the device page cannot take. */
+function lacksDeviceData(sentence: string): boolean {
+  return sentence.includes('device page');
+}
+
 /** Every check of this stage that is not clear, in words, with what would help. */
 export function StageFindings({ report }: { report: StageReport }) {
   const { edits, editable } = useWorkspace();
   const findings = report.checks.filter((check) => check.verdict !== 'clear');
-  const missing = findings.some((check) => check.verdict === 'unknown');
+  const missing = findings.some((check) => check.verdict === 'unknown' && lacksDeviceData(check.sentence));
   if (findings.length === 0) return <p className="soft">Every check of this stage is clear.</p>;
   return (
     <ul className={styles.findings}>
