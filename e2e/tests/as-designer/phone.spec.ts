@@ -16,3 +16,15 @@ test('the ledger is read on a phone', async ({ page, api }) => {
   await page.getByRole('navigation', { name: 'Main' }).getByRole('link', { name: 'Projects' }).click();
   await expect(page.getByRole('heading', { name: 'Projects', level: 1 })).toBeVisible();
 });
+
+for (const [path, table] of [
+  ['/projects', 'Projects'],
+  ['/devices', 'Devices'],
+]) {
+  test(`${path} scrolls its table sideways on a phone, not the page`, async ({ page }) => {
+    await page.goto(path ?? '');
+    await expect(page.getByRole('table', { name: table })).toBeVisible();
+    const width = await page.evaluate(() => document.documentElement.scrollWidth);
+    expect(width).toBeLessThanOrEqual(390);
+  });
+}

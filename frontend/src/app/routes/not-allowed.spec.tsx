@@ -31,6 +31,7 @@ describe('a form that a buyer could not save', () => {
     openAsBuyer('/projects/project-1/settings');
     expect(await screen.findByLabelText(/^Code/)).toBeDisabled();
     expect(screen.getByLabelText(/^Currency/)).toBeDisabled();
+    for (const choice of screen.getAllByRole('radio')) expect(choice).toBeDisabled();
     expect(screen.getByText(/designers and leads change it/)).toBeVisible();
   });
 });

@@ -66,7 +66,9 @@ export function ProjectSettingsForm({ project }: { project: Project }) {
       <ConfigProvider componentDisabled={!base.can.edit}>
         <IdentityFields draft={draft} onChange={setDraft} problems={problems} />
         <Section title="Access">
-          <AccessFields draft={draft} onChange={setDraft} problems={problems} />
+          <fieldset className={styles.plain} disabled={!base.can.edit}>
+            <AccessFields draft={draft} onChange={setDraft} problems={problems} />
+          </fieldset>
         </Section>
       </ConfigProvider>
       <Section
