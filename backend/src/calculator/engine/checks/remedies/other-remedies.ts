@@ -6,6 +6,7 @@ import { worsePoint } from '../../report/stage-figures';
 import { atLeastText, atMostText, noiseGainText, setFrequency, targetText, valueText } from '../../text/phrases';
 import { typed } from '../../text/si-format';
 import { nearestPreferred } from '../../preferred-values';
+import { feedbackCapacitorRemedy } from './feedback-capacitor-remedy';
 import { hint, proposal, trialStages, trialVerdict } from './trials';
 import type { FoundRemedy, Trial, Trials } from './trials';
 
@@ -43,15 +44,14 @@ export function swingRemedies(trials: Trials, stage: StageFacts): readonly Found
   return [hint(sentence)];
 }
 
-/** Stability: the noise gain that the device asks for, or a resistor that separates a capacitive load. */
+/** Stability: the noise gain that the device asks for, a capacitor across Rf, or a resistor that separates a capacitive load. */
 export function stabilityRemedies(trials: Trials, stage: StageFacts): readonly FoundRemedy[] {
   const least = stage.device?.kind === 'voltage-feedback' ? stage.device.minimumStableGain : undefined;
   if (least !== undefined && (stage.analysis.noiseGain ?? least) < least) {
     const sentence = `${partName(stage)} needs a noise gain of at least ${noiseGainText(least)}; a unity-gain stable device has no such limit.`;
     return [hint(sentence)];
   }
-  const isolation = isolationRemedy(trials, stage);
-  return isolation ? [isolation] : [];
+  return [feedbackCapacitorRemedy(trials, stage), isolationRemedy(trials, stage)].filter((remedy) => remedy !== null);
 }
 
 function isolationRemedy(trials: Trials, stage: StageFacts): FoundRemedy | null {
