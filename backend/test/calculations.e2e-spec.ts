@@ -186,6 +186,12 @@ describe('calculations', () => {
         'include.curves.points',
         'out_of_range',
       ],
+      [
+        'a curve that runs backwards',
+        () => handReceiver({ include: { curves: { fromHz: 1e6, toHz: 1e3, points: 11 } } }),
+        'include.curves.toHz',
+        'band_reversed',
+      ],
     ])('refuses %s', async (_case, body, path, code) => {
       const response = await calculate(body()).expect(422);
       expect(response.body).toMatchObject({ code: 'invalid', requestId: expect.any(String) });

@@ -26,6 +26,18 @@ describe('the demo’s sign-in', () => {
     }
   });
 
+  it('tells the administrator who is invented', async () => {
+    const { body: session } = await testApp.anonymous().get('/api/session').expect(200);
+    const admin = session.demoAccounts.find(({ roles }: { roles: string[] }) => roles.includes('admin'));
+    const agent = testApp.anonymous();
+    await agent.post('/api/session/demo').send({ userId: admin.userId }).expect(200);
+    const { body: people } = await agent.get('/api/users').expect(200);
+    expect(people.find(({ id }: { id: string }) => id === admin.userId)).toMatchObject({
+      demo: true,
+      hasPassword: false,
+    });
+  });
+
   it('opens no account of a real person, and none without the header', async () => {
     const { user } = await testApp.signedIn('designer');
     await testApp.anonymous().post('/api/session/demo').send({ userId: user.id }).expect(404);

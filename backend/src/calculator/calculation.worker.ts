@@ -1,11 +1,14 @@
 import { EngineInputError, calculate, curves, working } from './engine';
-import type { ChainInput, CurveRequest, EngineIssue, Working, WorkingRequest } from './engine';
+import type { ChainInput, CurveRequest, EngineIssue, WorkingRequest } from './engine';
 import { warmUp } from './warm-up';
 
-export interface CalculationTask {
-  readonly input: ChainInput;
+interface CalculationInclude {
   readonly curves?: CurveRequest;
   readonly working?: WorkingRequest;
+}
+
+export interface CalculationTask extends CalculationInclude {
+  readonly input: ChainInput;
 }
 
 /** A refusal travels as data: class instances do not survive the way between threads. */
@@ -18,20 +21,21 @@ export default function runCalculation({ input, ...include }: CalculationTask): 
   return refusable(() => {
     const result = {
       report: calculate(input),
-      curves: include.curves ? curves(input, include.curves) : null,
-      working: include.working ? requestedWorking(input, include.working) : null,
+      curves: asked('curves', include.curves, (request) => curves(input, request)),
+      working: asked('working', include.working, (request) => working(input, request)),
     };
     return { json: JSON.stringify(result) };
   });
 }
 
-/** By now the chain is accepted: what is refused here is the question, which stands under `include.working`. */
-function requestedWorking(input: ChainInput, request: WorkingRequest): Working {
+/** By now the chain is accepted: what is refused here is the question, which stands under `include`. */
+function asked<Q, A>(name: keyof CalculationInclude, question: Q | undefined, answer: (question: Q) => A): A | null {
+  if (!question) return null;
   try {
-    return working(input, request);
+    return answer(question);
   } catch (error) {
     if (!(error instanceof EngineInputError)) throw error;
-    throw new EngineInputError(error.issues.map((issue) => ({ ...issue, path: `include.working.${issue.path}` })));
+    throw new EngineInputError(error.issues.map((issue) => ({ ...issue, path: `include.${name}.${issue.path}` })));
   }
 }
 

@@ -90,7 +90,10 @@ export class ProjectsService {
     await this.queue.transaction(async (transaction) => {
       const chainCount = (await this.countChains(transaction)).get(id) ?? 0;
       if (!canDeleteProject(user, access, chainCount)) {
-        throw new ConflictError('in_use', `The project still has ${chainCount} chains; delete these first.`);
+        throw new ConflictError(
+          'in_use',
+          `The project still has ${chainCount === 1 ? 'a chain; delete it' : `${chainCount} chains; delete these`} first.`,
+        );
       }
       const row = await this.projects.findByPk(id, { transaction, rejectOnEmpty: true });
       const before = auditedProject(row, await this.memberIdsOf(id, transaction));

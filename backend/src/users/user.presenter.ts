@@ -8,7 +8,12 @@ export function presentUser(user: User, actor: SessionUser): UserDto {
   const { id, name, roles, active, version } = user;
   const shared = { id, name, roles, active, version, can: { edit: canManageUsers(actor) } };
   return canSeeEmail(actor)
-    ? { ...shared, email: user.email, hasPassword: typeof user.passwordHash === 'string' }
+    ? {
+        ...shared,
+        email: user.email,
+        hasPassword: typeof user.passwordHash === 'string',
+        ...(user.isDemo && { demo: true }),
+      }
     : shared;
 }
 

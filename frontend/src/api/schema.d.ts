@@ -1746,6 +1746,8 @@ export interface components {
             readonly active: boolean;
             /** @description Whether a password has been chosen; for administrators only */
             readonly hasPassword?: boolean;
+            /** @description Whether it is an invented person of the demo; for administrators only */
+            readonly demo?: boolean;
             readonly version: number;
             readonly can: components["schemas"]["UserCanDto"];
         };

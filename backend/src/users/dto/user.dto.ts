@@ -25,6 +25,9 @@ export class UserDto {
   @ApiPropertyOptional({ description: 'Whether a password has been chosen; for administrators only' })
   hasPassword?: boolean;
 
+  @ApiPropertyOptional({ description: 'Whether it is an invented person of the demo; for administrators only' })
+  demo?: boolean;
+
   @ApiProperty()
   version: number;
 

@@ -64,7 +64,7 @@ describe('analyzeChain(input), ultrasonic receiver with hand assumptions, minimu
     expect(reason(s4.fullPowerBandwidthHz)).toBe('Slew rate of TLYR-C220 is not entered.');
     expect(reason(s4.headroomTop)).toBe('Has no GBW (current feedback).');
     expect(reason(s4.supplyCurrentA)).toBe('Supply current of TLYR-C220 is not entered.');
-    expect(reason(minimum.inputNoise)).toContain('Voltage noise and current noise of QUIL-D618 is not entered.');
+    expect(reason(minimum.inputNoise)).toContain('Voltage noise and current noise of QUIL-D618 are not entered.');
     expect(reason(minimum.supplyCurrentA)).toContain('TLYR-C220');
     expect(reason(minimum.stages[1].swingAvailableV)).toContain('MRWG-G072');
   });

@@ -1,3 +1,4 @@
+import { EngineInputError } from '../errors';
 import type { MutableComplex } from '../complex';
 import { hotIsMinimum } from '../devices/used-values';
 import type { CurveCase, CurveRequest, Curves } from '../report';
@@ -33,6 +34,13 @@ function put(trace: Trace, offsetDb: number | null): void {
   const db = powerToDb(trace.re * trace.re + trace.im * trace.im);
   trace.gainDb.push(offsetDb !== null && Number.isFinite(db) ? db + offsetDb : null);
   trace.phaseDeg.push(Number.isFinite(trace.phase) ? degrees(trace.phase) : null);
+}
+
+function assertAscending({ fromHz, toHz }: CurveRequest): void {
+  if (fromHz < toHz) return;
+  throw new EngineInputError([
+    { code: 'band_reversed', path: 'toHz', message: 'The range has to end above its start.' },
+  ]);
 }
 
 function frequencies({ fromHz, toHz, points }: CurveRequest): number[] {
@@ -88,11 +96,12 @@ const curveOf = ({ gainDb, phaseDeg }: Trace): CurveCase => ({ gainDb, phaseDeg 
  * Gain and phase over a logarithmic frequency range: the chain in its gain basis and every stage node to node, in all
  * three cases. Phase in degrees, continuous, and between −180° and 180° at the point nearest to the operating frequency.
  *
- * @throws EngineInputError like analyzeChain
+ * @throws EngineInputError like analyzeChain, and for a range that does not ascend
  * @example computeCurves(input, { fromHz: 1e5, toHz: 1e8, points: 401 }).chain.minimum.gainDb[0]
  */
 export function computeCurves(input: ChainInput, request: CurveRequest): Curves {
   assertValid(input);
+  assertAscending(request);
   const frequenciesHz = frequencies(request);
   const operatingIndex = indexNearest(frequenciesHz, input.specification.band.operatingHz);
   const offset = basisOffsetDb(input.specification).value;

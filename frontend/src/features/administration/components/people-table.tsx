@@ -38,8 +38,9 @@ export function PeopleTable({ people, onEdit, onLink }: PeopleTableProps) {
   );
 }
 
-function stateOf({ active, hasPassword }: UserRow): string {
+function stateOf({ active, hasPassword, demo }: UserRow): string {
   if (!active) return 'deactivated';
+  if (demo) return 'active, invented for the demo';
   return hasPassword === false ? 'invited, no password yet' : 'active';
 }
 
