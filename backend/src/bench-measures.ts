@@ -78,7 +78,8 @@ export class BenchClient {
 }
 
 const CLIENTS = 10;
-const KEYSTROKE_MS = 120;
+/** Sixty words a minute. Faster keys are gathered by the screen, which waits 120 ms for the next one before it asks. */
+const KEYSTROKE_MS = 200;
 
 /** The chain with one resistor changed, as between two keystrokes. */
 function typed(input: ChainInput, step: number): ChainInput {
@@ -95,7 +96,8 @@ export async function measurePreview(client: BenchClient, keystrokes = 25): Prom
     const { specification, stages, devices, currency, buildQuantity } = typed(input, step);
     return { specification, stages, devices, currency, buildQuantity };
   };
-  await durationsMs(10, (step) => client.send('POST', '/calculations', body(step)));
+  // A server that has been up for a moment, not the first seconds of its compiler.
+  await durationsMs(150, (step) => client.send('POST', '/calculations', body(step)));
   const person = async (number: number): Promise<number[]> => {
     const durations: number[] = [];
     await pause((KEYSTROKE_MS / CLIENTS) * number);

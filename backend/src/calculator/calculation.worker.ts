@@ -1,5 +1,5 @@
-import { EngineInputError, calculate, curves, working } from './engine';
-import type { ChainInput, CurveRequest, EngineIssue, WorkingRequest } from './engine';
+import { EngineInputError, calculate, curves, tryDevices, working } from './engine';
+import type { ChainInput, CurveRequest, Device, EngineIssue, WorkingRequest } from './engine';
 import { warmUp } from './warm-up';
 
 interface CalculationInclude {
@@ -11,13 +11,20 @@ export interface CalculationTask extends CalculationInclude {
   readonly input: ChainInput;
 }
 
+export interface CandidatesTask {
+  readonly input: ChainInput;
+  readonly stageId: string;
+  readonly candidates: readonly Device[];
+}
+
 /** A refusal travels as data: class instances do not survive the way between threads. */
 export type Refusal = { readonly issues: readonly EngineIssue[] };
 /** Written out already: text crosses between threads for a fraction of what its objects would cost. */
 export type CalculationAnswer = { readonly json: string } | Refusal;
+export type CandidatesAnswer = CalculationAnswer;
 
-/** One live preview. Runs in a thread of its own where there is one, so that people typing do not wait for each other. */
-export default function runCalculation({ input, ...include }: CalculationTask): CalculationAnswer {
+/** One live preview. */
+export function runCalculation({ input, ...include }: CalculationTask): CalculationAnswer {
   return refusable(() => {
     const result = {
       report: calculate(input),
@@ -26,6 +33,11 @@ export default function runCalculation({ input, ...include }: CalculationTask): 
     };
     return { json: JSON.stringify(result) };
   });
+}
+
+/** A portion of the devices that are tried in one stage. */
+export function runCandidates({ input, stageId, candidates }: CandidatesTask): CandidatesAnswer {
+  return refusable(() => ({ json: JSON.stringify(tryDevices(input, stageId, candidates)) }));
 }
 
 /** By now the chain is accepted: what is refused here is the question, which stands under `include`. */
@@ -40,7 +52,7 @@ function asked<Q, A>(name: keyof CalculationInclude, question: Q | undefined, an
 }
 
 /** Runs the calculator; what it refuses comes back as its issues. */
-export function refusable<T>(run: () => T): T | Refusal {
+function refusable<T>(run: () => T): T | Refusal {
   try {
     return run();
   } catch (error) {
@@ -49,4 +61,7 @@ export function refusable<T>(run: () => T): T | Refusal {
   }
 }
 
-warmUp((input) => runCalculation({ input }));
+warmUp((input) => {
+  runCalculation({ input });
+  runCandidates({ input, stageId: '2', candidates: input.devices });
+});

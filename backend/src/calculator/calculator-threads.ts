@@ -6,9 +6,14 @@ import { Piscina } from 'piscina';
 import { compareCandidates } from './engine';
 import type { CandidatesReport } from './engine';
 import { InvalidError, TooManyRequestsError } from '../common/errors';
-import runCalculation from './calculation.worker';
-import type { CalculationAnswer, CalculationTask, Refusal } from './calculation.worker';
-import type { CandidatesAnswer, CandidatesTask } from './candidates.worker';
+import { runCalculation } from './calculation.worker';
+import type {
+  CalculationAnswer,
+  CalculationTask,
+  CandidatesAnswer,
+  CandidatesTask,
+  Refusal,
+} from './calculation.worker';
 
 /** Threads run compiled JavaScript; from the sources (unit tests) that is the build beside them. */
 const COMPILED = path.resolve(__dirname, '../../dist/calculator');
@@ -18,39 +23,59 @@ const THREADS = Math.max(1, Math.min(4, availableParallelism()));
 /** With more than this waiting the server is overrun; newer requests are refused and asked to come again. */
 const MAX_WAITING = 256;
 
-/** A pool whose threads are started, and kept, from the first moment that they may be needed. */
-class LazyPool<Task, Answer> {
+interface Tasks {
+  readonly runCalculation: { readonly task: CalculationTask; readonly answer: CalculationAnswer };
+  readonly runCandidates: { readonly task: CandidatesTask; readonly answer: CandidatesAnswer };
+}
+
+/**
+ * The calculator's threads. They never open the database: all they need comes with the task. Live previews and tried devices
+ * share them; many devices are tried in portions, so that a preview waits for one portion at most.
+ */
+@Injectable()
+export class CalculatorThreads implements OnApplicationBootstrap, OnApplicationShutdown {
   private readonly logger = new Logger('CalculatorThreads');
-  private pool: Piscina<Task, Answer> | null = null;
+  private pool: Piscina | null = null;
 
-  constructor(
-    private readonly file: string,
-    private readonly threads: number,
-  ) {}
+  onApplicationBootstrap(): void {
+    if (!RUNS_FROM_SOURCES) this.start();
+  }
 
-  start(): Piscina<Task, Answer> {
+  /** The answer as JSON text. */
+  async calculate(task: CalculationTask): Promise<string> {
+    return accepted(RUNS_FROM_SOURCES ? runCalculation(task) : await this.run('runCalculation', task));
+  }
+
+  /** The answer as JSON text. */
+  async tryDevices(task: CandidatesTask): Promise<string> {
+    const portions = portionsOf(task.candidates);
+    const answers = await Promise.all(portions.map((candidates) => this.run('runCandidates', { ...task, candidates })));
+    return merged(answers.map(accepted));
+  }
+
+  async onApplicationShutdown(): Promise<void> {
+    await this.pool?.destroy();
+  }
+
+  private start(): Piscina {
     this.pool ??= this.create();
     return this.pool;
   }
 
-  async run(task: Task): Promise<Answer> {
+  private async run<Name extends keyof Tasks>(name: Name, task: Tasks[Name]['task']): Promise<Tasks[Name]['answer']> {
     const pool = this.start();
     if (pool.queueSize >= MAX_WAITING) {
       throw new TooManyRequestsError('server_busy', 'The calculator is busy. Try again in a moment.', 1);
     }
-    return pool.run(task);
+    return pool.run(task, { name }) as Promise<Tasks[Name]['answer']>;
   }
 
-  async destroy(): Promise<void> {
-    await this.pool?.destroy();
-  }
-
-  private create(): Piscina<Task, Answer> {
-    const pool = new Piscina<Task, Answer>({
-      filename: path.join(COMPILED, this.file),
-      minThreads: this.threads,
-      maxThreads: this.threads,
-      maxQueue: MAX_WAITING,
+  private create(): Piscina {
+    const pool = new Piscina({
+      filename: path.join(COMPILED, 'calculation.worker.js'),
+      minThreads: THREADS,
+      maxThreads: THREADS,
+      maxQueue: 2 * MAX_WAITING,
     });
     // Nobody listening would end the server for a fault in one thread; the pool starts another one.
     pool.on('error', (error: Error) => this.logger.error(error.stack));
@@ -58,45 +83,13 @@ class LazyPool<Task, Answer> {
   }
 }
 
-/**
- * The calculator's threads. They never open the database: all they need comes with the task. Trying devices takes long,
- * so it has a pool of its own and live previews never queue behind it.
- */
-@Injectable()
-export class CalculatorThreads implements OnApplicationBootstrap, OnApplicationShutdown {
-  private readonly previews = new LazyPool<CalculationTask, CalculationAnswer>('calculation.worker.js', THREADS);
-  private readonly trials = new LazyPool<CandidatesTask, CandidatesAnswer>('candidates.worker.js', THREADS);
+/** Devices in one portion: a few hundredths of a second for one thread. */
+const PORTION = 40;
 
-  onApplicationBootstrap(): void {
-    if (!RUNS_FROM_SOURCES) this.previews.start();
-  }
-
-  /** The answer as JSON text. */
-  async calculate(task: CalculationTask): Promise<string> {
-    // Whoever looks at a chain will soon try devices in it.
-    if (!RUNS_FROM_SOURCES) this.trials.start();
-    return accepted(RUNS_FROM_SOURCES ? runCalculation(task) : await this.previews.run(task));
-  }
-
-  /** The answer as JSON text. */
-  async tryDevices(task: CandidatesTask): Promise<string> {
-    const parts = partsOf(task.candidates, THREADS);
-    const answers = await Promise.all(parts.map((candidates) => this.trials.run({ ...task, candidates })));
-    return merged(answers.map(accepted));
-  }
-
-  async onApplicationShutdown(): Promise<void> {
-    await Promise.all([this.previews.destroy(), this.trials.destroy()]);
-  }
-}
-
-/** Fewer devices than this in one thread are done before another thread has been asked. */
-const WORTH_A_THREAD = 40;
-
-/** The devices dealt out in turn, so that every thread gets as many of each sort. */
-function partsOf<T>(all: readonly T[], most: number): T[][] {
-  const count = Math.max(1, Math.min(most, Math.ceil(all.length / WORTH_A_THREAD)));
-  return Array.from({ length: count }, (_, part) => all.filter((_each, index) => index % count === part));
+/** The devices dealt out in turn, so that every portion has as many of each sort. */
+function portionsOf<T>(all: readonly T[]): T[][] {
+  const count = Math.max(1, Math.ceil(all.length / PORTION));
+  return Array.from({ length: count }, (_, portion) => all.filter((_each, index) => index % count === portion));
 }
 
 /** The answers of several threads about one stage as one. */

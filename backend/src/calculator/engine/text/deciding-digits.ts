@@ -26,6 +26,7 @@ function areEqual(a: number, b: number): boolean {
  * @returns significant digits; `decidingDigits(0.9996, 3, [1])` → 4, because "1.00" would hide that it is below 1
  */
 export function decidingDigits(value: number, least: number, limits: readonly number[]): number {
+  if (limits.length === 0) return Math.min(least, MOST_DIGITS);
   for (let digits = least; digits < MOST_DIGITS; digits += 1) {
     const rounded = Number(value.toPrecision(digits));
     if (limits.every((limit) => areEqual(value, limit) || sideOf(rounded, limit) === sideOf(value, limit)))

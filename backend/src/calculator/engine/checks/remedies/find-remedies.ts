@@ -4,7 +4,7 @@ import type { Device } from '../../types';
 import { flatnessContributions, gainContributions } from '../contributions';
 import type { Judgement } from '../judge';
 import { plainCheck } from '../make-check';
-import { badness, worstCheck } from '../verdict-order';
+import { isWorse, worstCheck } from '../verdict-order';
 import { chainDeviceRemedy } from './chain-remedy';
 import { deviceRemedy } from './device-remedy';
 import { gbwRemedies } from './gbw-remedies';
@@ -18,8 +18,11 @@ import {
 import { createTrials } from './trials';
 import type { FoundRemedy, Trials } from './trials';
 
-/** Evaluations of modified chains that one report may spend on remedies; the worst stages are served first. */
-const MOST_EVALUATIONS = 24;
+/**
+ * Evaluations of modified chains that one report may spend on remedies of what is over, and of what is tight: a live preview
+ * has to come while somebody types. The worst checks are served first.
+ */
+const MOST_EVALUATIONS = { over: 12, tight: 2 } as const;
 
 type Finder = (trials: Trials, stage: StageFacts) => readonly FoundRemedy[];
 
@@ -61,15 +64,18 @@ export interface ChecksWithRemedies {
  * @param alternatives devices that may be proposed beside those of the input
  */
 export function findRemedies(judgement: Judgement, alternatives: readonly Device[] = []): ChecksWithRemedies {
-  const trials = createTrials(judgement, MOST_EVALUATIONS, alternatives);
+  const forOver = createTrials(judgement, MOST_EVALUATIONS.over, alternatives);
+  const forTight = createTrials(judgement, MOST_EVALUATIONS.tight, alternatives);
+  const trialsOf = ({ verdict }: Check): Trials => (verdict === 'over' ? forOver : forTight);
   const found = new Map<Check, readonly FoundRemedy[]>();
   const order = judgement.facts.stages
     .flatMap((stage) => judgement.stageChecks[stage.index].map((check) => ({ stage, check })))
     .filter(({ check }) => canHelp(check))
-    .sort((a, b) => badness(b.check.verdict) - badness(a.check.verdict));
+    .sort((a, b) => Number(isWorse(b.check, a.check)) - Number(isWorse(a.check, b.check)));
   const deciding = new Set(order.map(({ stage }) => worstOf(judgement, stage)));
-  for (const { stage, check } of order) found.set(check, stageRemedies(trials, stage, check, deciding.has(check)));
-  for (const check of judgement.chainChecks) found.set(check, chainRemedies(trials, check));
+  for (const { stage, check } of order)
+    found.set(check, stageRemedies(trialsOf(check), stage, check, deciding.has(check)));
+  for (const check of judgement.chainChecks) found.set(check, chainRemedies(trialsOf(check), check));
   const briefs = new Map<Check, readonly string[]>();
   const withRemedies = (check: Check): Check => {
     const own = found.get(check) ?? [];
