@@ -3,7 +3,7 @@ import type { ChainResponse } from './response';
 import { StageSpan, stageSpan } from './stage-span';
 
 const COARSE_PER_DECADE = 2;
-const FINE_PER_DECADE = 6;
+const FINE_PER_DECADE = 4;
 const LOWEST_HZ = 1;
 /** |T|² between 1/400 and 400 (±26 dB) of any loop: crossings and peaks are near, so that every interval is looked into. */
 const NEAR_ONE = 400;
@@ -59,8 +59,9 @@ function loopIsStraight(a: Point, m: Point, b: Point, k: number): boolean {
   const squareIm = 2 * m.re[k] * m.im[k];
   const productRe = a.re[k] * b.re[k] - a.im[k] * b.im[k];
   const productIm = a.re[k] * b.im[k] + a.im[k] * b.re[k];
-  const size = Math.hypot(productRe, productIm);
-  return Math.hypot(squareRe - productRe, squareIm - productIm) <= STRAIGHT * size;
+  const offRe = squareRe - productRe;
+  const offIm = squareIm - productIm;
+  return offRe * offRe + offIm * offIm <= STRAIGHT * STRAIGHT * (productRe * productRe + productIm * productIm);
 }
 
 function powerIsStraight(a: Point, m: Point, b: Point, k: number): boolean {
