@@ -1,3 +1,6 @@
+/** Taken out once: these run at every frequency. */
+const { abs, min, sign } = Math;
+
 /**
  * Root of a continuous function between two points of opposite sign: regula falsi after Anderson and Björck, with a
  * bisection step when three steps together have not halved the interval. Ends when the interval is `tolerance` wide.
@@ -16,9 +19,9 @@ export function findRoot(
   tolerance = 1e-13,
 ): number {
   if (fa === 0) return a;
-  let width = Math.abs(b - a);
+  let width = abs(b - a);
   let stalled = 0;
-  for (let count = 0; count < 200 && fb !== 0 && Math.abs(b - a) > tolerance; count++) {
+  for (let count = 0; count < 200 && fb !== 0 && abs(b - a) > tolerance; count++) {
     const bisect = stalled >= 3;
     const x = bisect ? (a + b) / 2 : falsePosition(a, fa, b, fb, tolerance);
     const fx = f(x);
@@ -30,9 +33,9 @@ export function findRoot(
     }
     b = x;
     fb = fx;
-    if (bisect || Math.abs(b - a) <= width / 2) {
+    if (bisect || abs(b - a) <= width / 2) {
       stalled = 0;
-      width = Math.abs(b - a);
+      width = abs(b - a);
     } else {
       stalled++;
     }
@@ -49,7 +52,7 @@ function retained(fx: number, fb: number): number {
 /** Where the chord crosses zero, kept a little inside both ends so that the interval closes around the root. */
 function falsePosition(a: number, fa: number, b: number, fb: number, tolerance: number): number {
   const x = b - (fb * (b - a)) / (fb - fa);
-  const inset = (Math.min(tolerance, Math.abs(b - a)) / 2) * Math.sign(a - b);
-  if (!Number.isFinite(x) || Math.abs(x - b) < Math.abs(inset)) return b + inset;
-  return Math.abs(x - a) < Math.abs(inset) ? a - inset : x;
+  const inset = (min(tolerance, abs(b - a)) / 2) * sign(a - b);
+  if (!Number.isFinite(x) || abs(x - b) < abs(inset)) return b + inset;
+  return abs(x - a) < abs(inset) ? a - inset : x;
 }

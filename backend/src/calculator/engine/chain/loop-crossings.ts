@@ -1,6 +1,9 @@
 import type { Complex, MutableComplex } from '../complex';
 import { findRoot } from '../root';
 
+/** Taken out once: these run at every frequency. */
+const { atan2, ceil, exp, log, log10, max, sqrt } = Math;
+
 /** What the crossings of |T| = 1 say about a loop. */
 export interface LoopMargin {
   readonly noCrossing: boolean;
@@ -61,7 +64,7 @@ class LoopWalk {
     const dot = this.re * re + this.im * im;
     const steep = dot < 0 || dot * dot < LARGEST_TURN_COS_SQUARED * fromPower * toPower;
     if (depth > 0 || (steep && halvings < DEEPEST_TURN)) {
-      const middle = Math.sqrt(this.hz * hz);
+      const middle = sqrt(this.hz * hz);
       this.loop(middle, this.out);
       this.goTo(middle, this.out.re, this.out.im, depth - 1, halvings + 1);
       this.goTo(hz, re, im, depth - 1, halvings + 1);
@@ -86,15 +89,15 @@ class LoopWalk {
   private cross(toHz: number, fromPower: number, toPower: number): void {
     const { out } = this;
     const logPower = (logHz: number): number => {
-      this.loop(Math.exp(logHz), out);
-      return Math.log(out.re * out.re + out.im * out.im);
+      this.loop(exp(logHz), out);
+      return log(out.re * out.re + out.im * out.im);
     };
-    const from = Math.log(this.hz);
-    const logHz = findRoot(logPower, from, Math.log(fromPower), Math.log(toHz), Math.log(toPower), TOLERANCE);
-    const frequencyHz = Math.exp(logHz);
+    const from = log(this.hz);
+    const logHz = findRoot(logPower, from, log(fromPower), log(toHz), log(toPower), TOLERANCE);
+    const frequencyHz = exp(logHz);
     this.loop(frequencyHz, out);
     const turns = this.turns + this.passage(out.re, out.im);
-    this.crossings.push({ frequencyHz, phase: Math.atan2(out.im, out.re) + 2 * Math.PI * turns });
+    this.crossings.push({ frequencyHz, phase: atan2(out.im, out.re) + 2 * Math.PI * turns });
   }
 }
 
@@ -148,7 +151,7 @@ export function smallestPhaseMargin(
   toHz: number,
   pointsPerDecade = 60,
 ): LoopMargin {
-  const length = Math.max(2, Math.ceil(Math.log10(toHz / fromHz) * pointsPerDecade) + 1);
+  const length = max(2, ceil(log10(toHz / fromHz) * pointsPerDecade) + 1);
   const frequenciesHz = Array.from({ length }, (_, i) => fromHz * (toHz / fromHz) ** (i / (length - 1)));
   const values = frequenciesHz.map(loop);
   const re = values.map((value) => value.re);

@@ -2,6 +2,9 @@ import type { MutableComplex } from '../complex';
 import type { ChainResponse } from './response';
 import { StageSpan, stageSpan } from './stage-span';
 
+/** Taken out once: these run at every frequency. */
+const { abs, ceil, log10, max, min, sqrt } = Math;
+
 const COARSE_PER_DECADE = 2;
 const FINE_PER_DECADE = 4;
 const LOWEST_HZ = 1;
@@ -35,9 +38,9 @@ interface Point {
 
 /** Ascending grid from 1 Hz: coarse where every loop still has much gain, fine up to the highest limit. */
 function firstGrid(fineFromHz: number, toHz: number): number[] {
-  const coarse = Math.max(0, Math.ceil(Math.log10(fineFromHz / LOWEST_HZ) * COARSE_PER_DECADE));
+  const coarse = max(0, ceil(log10(fineFromHz / LOWEST_HZ) * COARSE_PER_DECADE));
   const startHz = coarse > 0 ? fineFromHz : LOWEST_HZ;
-  const fine = Math.max(1, Math.ceil(Math.log10(toHz / startHz) * FINE_PER_DECADE));
+  const fine = max(1, ceil(log10(toHz / startHz) * FINE_PER_DECADE));
   const grid: number[] = [];
   for (let i = 0; i < coarse; i++) grid.push(LOWEST_HZ * (startHz / LOWEST_HZ) ** (i / coarse));
   for (let i = 0; i <= fine; i++) grid.push(startHz * (toHz / startHz) ** (i / fine));
@@ -65,10 +68,10 @@ function loopIsStraight(a: Point, m: Point, b: Point, k: number): boolean {
 }
 
 function powerIsStraight(a: Point, m: Point, b: Point, k: number): boolean {
-  const highest = Math.max(a.power[k], m.power[k], b.power[k]);
+  const highest = max(a.power[k], m.power[k], b.power[k]);
   if (highest < FAINT) return true;
-  const straight = Math.sqrt(a.power[k] * b.power[k]);
-  return Math.abs(m.power[k] - straight) <= STRAIGHT * straight;
+  const straight = sqrt(a.power[k] * b.power[k]);
+  return abs(m.power[k] - straight) <= STRAIGHT * straight;
 }
 
 function isStraight(a: Point, m: Point, b: Point): boolean {
@@ -93,8 +96,8 @@ export function scanStages(response: ChainResponse): { grid: number[]; scans: St
     const span = stageSpan(prepared);
     return span ? [{ index: k + 1, span, re: [], im: [], power: [] }] : [];
   });
-  const fineFromHz = Math.min(...scans.map(({ span }) => span.cornerHz)) * 1e-3;
-  const first = firstGrid(fineFromHz, Math.max(...scans.map(({ span }) => span.limitHz)));
+  const fineFromHz = min(...scans.map(({ span }) => span.cornerHz)) * 1e-3;
+  const first = firstGrid(fineFromHz, max(...scans.map(({ span }) => span.limitHz)));
   const out: MutableComplex = { re: 0.5, im: 0.5 };
   const grid: number[] = [];
 
@@ -120,7 +123,7 @@ export function scanStages(response: ChainResponse): { grid: number[]; scans: St
   /** Keeps what lies between two points, and the later one. */
   const between = (a: Point, b: Point, depth: number): void => {
     if (depth > 0 && (isNearOne(a) || isNearOne(b))) {
-      const middle = sample(Math.sqrt(a.frequencyHz * b.frequencyHz));
+      const middle = sample(sqrt(a.frequencyHz * b.frequencyHz));
       const left = isStraight(a, middle, b) ? 0 : depth - 1;
       between(a, middle, left);
       between(middle, b, left);
